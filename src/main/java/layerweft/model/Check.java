@@ -61,7 +61,8 @@ public final class Check {
     /** Takes over findings on a part of the object, below the given field. */
     public Check within(String field, InadmissibleException part) {
         for (Finding f : part.findings()) {
-            String path = f.field().isEmpty() ? field : f.field().startsWith("[") ? field + f.field() : field + "." + f.field();
+            boolean joined = field.isEmpty() || f.field().isEmpty() || f.field().startsWith("[");
+            String path = field + (joined ? "" : ".") + f.field();
             findings.add(new Finding(path, f.found(), f.admissible()));
         }
         return this;
