@@ -15,30 +15,57 @@ final class RankOrder {
     static void rearrange(PerilYears work, int years, double[] scores, KeyedStream ties) {
         double[] totals = new double[years];
         work.totals(years, totals);
-        ties.seek(0);
-        int[] tieBreak = ties.ints(years).toArray();
-        int[] byTotal = order(totals, tieBreak, years);
-        int[] byScore = order(scores, tieBreak, years);
+        int[] visit = visits(years, ties);
+        int[] rankOfTotal = ranks(totals, visit);
+        int[] rankOfScore = ranks(Arrays.copyOf(scores, years), visit);
+        int[] yearOfRank = new int[years];
+        for (int y = 0; y < years; y++) {
+            yearOfRank[rankOfScore[y]] = y;
+        }
         if (work.target == null) {
             work.target = new int[work.counts.length];
         }
-        for (int rank = 0; rank < years; rank++) {
-            work.target[byTotal[rank]] = byScore[rank];
+        for (int y = 0; y < years; y++) {
+            work.target[y] = yearOfRank[rankOfTotal[y]];
         }
     }
 
-    /** Positions in rising order of value, then of tie break. */
-    private static int[] order(double[] values, int[] tieBreak, int years) {
-        Integer[] positions = new Integer[years];
-        Arrays.setAll(positions, y -> y);
-        Arrays.sort(positions, (a, b) -> {
-            int c = Double.compare(values[a], values[b]);
-            return c != 0 ? c : Integer.compare(tieBreak[a], tieBreak[b]);
-        });
-        int[] order = new int[years];
+    /** The years in random order (Fisher &amp; Yates 1938). */
+    private static int[] visits(int years, KeyedStream random) {
+        random.seek(0);
+        int[] visit = new int[years];
         for (int y = 0; y < years; y++) {
-            order[y] = positions[y];
+            int at = random.nextInt(y + 1);
+            visit[y] = visit[at];
+            visit[at] = y;
         }
-        return order;
+        return visit;
+    }
+
+    /** Ranks from 0; equal values get theirs in the order of the visits. Sorting plain numbers and searching is faster than sorting places. */
+    private static int[] ranks(double[] values, int[] visit) {
+        double[] sorted = values.clone();
+        Arrays.sort(sorted);
+        int[] equalSoFar = new int[values.length];
+        int[] rank = new int[values.length];
+        for (int y : visit) {
+            int first = firstOf(sorted, values[y]);
+            rank[y] = first + equalSoFar[first]++;
+        }
+        return rank;
+    }
+
+    private static int firstOf(double[] sorted, double value) {
+        int low = 0;
+        int high = sorted.length - 1;
+        while (low < high) {
+            int middle = (low + high) >>> 1;
+            if (sorted[middle] < value) {
+                low = middle + 1;
+            } else {
+                high = middle;
+            }
+        }
+        return low;
     }
 }
