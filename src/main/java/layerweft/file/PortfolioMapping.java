@@ -29,7 +29,7 @@ final class PortfolioMapping {
     private PortfolioMapping() {}
 
     static Portfolio read(Node.Members root, Faults faults) {
-        return portfolio(names(root.get("perils"))).read(root, "", faults);
+        return portfolio(names(root.get("perils"), Limits.PERILS)).read(root, "", faults);
     }
 
     /** The shapes of all objects of the file. */
@@ -61,7 +61,7 @@ final class PortfolioMapping {
             }
             return null;
         }
-        List<String> subPerils = node instanceof Node.Members object ? names(object.get("subPerils")) : List.of();
+        List<String> subPerils = node instanceof Node.Members object ? names(object.get("subPerils"), Limits.SUB_PERILS) : List.of();
         return peril(subPerils).read(node, path, faults);
     }
 
@@ -93,10 +93,10 @@ final class PortfolioMapping {
         };
     }
 
-    /** The names of the objects of a list, null for a name that is not there; empty where there is no list. */
-    static List<String> names(Node list) {
+    /** The names of the objects of a list, null for a name that is not there; empty where there is no list or a longer one. */
+    static List<String> names(Node list, int most) {
         List<String> names = new ArrayList<>();
-        if (list instanceof Node.Elements elements && elements.items().size() <= Limits.LAYERS) {
+        if (list instanceof Node.Elements elements && elements.items().size() <= most) {
             for (Node item : elements.items()) {
                 names.add(item instanceof Node.Members object && object.get("name") instanceof Node.Text text ? text.text() : null);
             }

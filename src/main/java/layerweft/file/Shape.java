@@ -19,6 +19,7 @@ import layerweft.model.InadmissibleException;
 record Shape<T>(String name, List<Variant<T>> variants) implements Reading<T> {
 
     @SafeVarargs
+    @SuppressWarnings("varargs") // copied at once
     static <T> Shape<T> of(String name, Variant<T>... variants) {
         return new Shape<>(name, List.of(variants));
     }
@@ -30,6 +31,17 @@ record Shape<T>(String name, List<Variant<T>> variants) implements Reading<T> {
             List<Field<?>> fields = new ArrayList<>(variant.fields());
             fields.add(extra);
             extended.add(new Variant<>(List.copyOf(fields), v -> change.apply(variant.build().apply(v), v.get(extra))));
+        }
+        return new Shape<>(name, List.copyOf(extended));
+    }
+
+    /** The same with the field that names the kind, before the others. */
+    Shape<T> tagged(Field<String> tag) {
+        List<Variant<T>> extended = new ArrayList<>();
+        for (Variant<T> variant : variants) {
+            List<Field<?>> fields = new ArrayList<>(List.of(tag));
+            fields.addAll(variant.fields());
+            extended.add(new Variant<>(List.copyOf(fields), variant.build()));
         }
         return new Shape<>(name, List.copyOf(extended));
     }
@@ -72,7 +84,7 @@ record Shape<T>(String name, List<Variant<T>> variants) implements Reading<T> {
                     hinted.add(near);
                 }
                 faults.add(field.getValue().namePlace(), FieldPath.field(path, Excerpt.plain(field.getKey())), "an unknown field",
-                        String.join(", ", known) + (near == null ? "" : " (did you mean " + near + "?)"));
+                        "the fields " + String.join(", ", known) + (near == null ? "" : " (did you mean " + near + "?)"));
             }
         }
         return hinted;

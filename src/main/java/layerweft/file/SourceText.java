@@ -69,8 +69,8 @@ final class SourceText {
 
     private static void requireNoOtherEncoding(String name, byte[] bytes) {
         boolean marked = startsWith(bytes, 0xFE, 0xFF) || startsWith(bytes, 0xFF, 0xFE);
-        boolean everyOtherZero = bytes.length >= 2 && (bytes[0] == 0) != (bytes[1] == 0);
-        if (marked || everyOtherZero) {
+        boolean wide = bytes.length >= 2 && (bytes[0] == 0 || bytes[1] == 0); // an object starts with {, which is one byte in UTF-8
+        if (marked || wide) {
             throw new FaultyFileException(List.of(new Fault(name, 1, 1, "", "text in UTF-16 or UTF-32", UTF_8)));
         }
     }

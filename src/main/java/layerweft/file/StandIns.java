@@ -29,8 +29,8 @@ final class StandIns {
 
     /** Null where a name cannot be read; faults between the perils are added. */
     static Portfolio portfolio(Node.Members root, Faults faults) {
-        List<String> names = PortfolioMapping.names(root.get("perils"));
-        if (names.contains(null) || !(root.get("perils") instanceof Node.Elements list)) {
+        List<String> names = PortfolioMapping.names(root.get("perils"), Limits.PERILS);
+        if (names.isEmpty() || names.contains(null) || !(root.get("perils") instanceof Node.Elements list)) {
             return null;
         }
         List<Peril> perils = new ArrayList<>();
@@ -50,7 +50,7 @@ final class StandIns {
     }
 
     private static EventLoss eventLoss(Node.Members peril, String path, Faults faults) {
-        List<String> names = PortfolioMapping.names(peril.get("subPerils"));
+        List<String> names = PortfolioMapping.names(peril.get("subPerils"), Limits.SUB_PERILS);
         if (names.isEmpty()) {
             return new EventLoss.Single(new Exponential(1));
         }
@@ -67,8 +67,8 @@ final class StandIns {
 
     /** Null where a name cannot be read; faults between the layers are added. */
     static Programme programme(Node.Members root, Faults faults) {
-        List<String> names = PortfolioMapping.names(root.get("layers"));
-        if (!(root.get("layers") instanceof Node.Elements list) || names.stream().anyMatch(n -> n == null || n.isBlank())) {
+        List<String> names = PortfolioMapping.names(root.get("layers"), Limits.LAYERS);
+        if (!(root.get("layers") instanceof Node.Elements list) || names.isEmpty() || names.stream().anyMatch(n -> n == null || n.isBlank())) {
             return null;
         }
         List<Layer> layers = new ArrayList<>();

@@ -9,8 +9,8 @@ final class SyntaxFault {
     /** Part of the parser's message, and what would have been admissible. */
     private static final String[][] ADMISSIBLE = {
         {"numeric value", "a number as JSON writes it, e.g. 0.5 or -1.2e3"},
-        {"escape", "one of the escapes \\\" \\\\ \\/ \\b \\f \\n \\r \\t \\uXXXX"},
         {"has to be escaped", "control characters written as escapes, e.g. \\n"},
+        {"escape", "one of the escapes \\\" \\\\ \\/ \\b \\f \\n \\r \\t \\uXXXX"},
         {"separate field name", "a colon after the field name"},
         {"double-quote to start field name", "a field name in double quotes"},
         {"separate Object entries", "a comma or } after a field"},

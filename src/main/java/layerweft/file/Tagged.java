@@ -18,7 +18,7 @@ final class Tagged<T> implements Reading<T> {
         this.tag = tag;
         for (Kind<T> kind : kinds) {
             Field<String> constant = Field.required(tag, Scalars.constant(kind.name()));
-            Shape<T> shape = new Shape<>(object + "." + kind.name(), kind.variants()).with(constant, (value, unused) -> value);
+            Shape<T> shape = new Shape<>(object + "." + kind.name(), kind.variants()).tagged(constant);
             this.kinds.put(kind.name(), common.apply(shape));
         }
     }
@@ -60,6 +60,7 @@ final class Tagged<T> implements Reading<T> {
     /** One kind: its name in the tag, and the ways to give its parameters. */
     record Kind<T>(String name, List<Variant<T>> variants) {
         @SafeVarargs
+        @SuppressWarnings("varargs") // copied at once
         static <T> Kind<T> of(String name, Variant<T>... variants) {
             return new Kind<>(name, List.of(variants));
         }
