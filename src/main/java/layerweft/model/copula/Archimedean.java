@@ -62,6 +62,9 @@ public record Archimedean(ArchimedeanFamily family, double theta, boolean surviv
     @Override
     public double cdf(double... u) {
         requireDimension(u.length);
+        if (u.length == 1) {
+            return u[0];
+        }
         if (!hasFrailty()) {
             NegativePair pair = new NegativePair(family, -theta);
             return survival ? pair.survival(u[0], u[1]) : pair.cdf(u[0], u[1]);
@@ -115,6 +118,9 @@ public record Archimedean(ArchimedeanFamily family, double theta, boolean surviv
     @Override
     public ScoreSampler sampler(int dimension) {
         requireDimension(dimension);
+        if (dimension == 1) {
+            return new Independence().sampler(1);
+        }
         boolean[] flipped = new boolean[dimension];
         Arrays.fill(flipped, survival);
         if (hasFrailty()) {

@@ -5,7 +5,7 @@ package layerweft.model.copula;
  * Symmetric, and linear in each.
  */
 final class Concordance {
-    private static final int CELLS = 96;
+    private static final int CELLS = 48;
 
     private Concordance() {
     }
@@ -13,6 +13,12 @@ final class Concordance {
     static double of(Copula first, Copula second) {
         if (first.equals(second)) {
             return first.kendallTau(0, 1);
+        }
+        if (first instanceof MixtureCopula mixture) {
+            return mixture.mean(component -> of(component, second));
+        }
+        if (second instanceof MixtureCopula) {
+            return of(second, first);
         }
         if (first instanceof Independence) {
             return second.spearmanRho(0, 1) / 3;
