@@ -106,8 +106,14 @@ public record Archimedean(ArchimedeanFamily family, double theta, boolean surviv
     /** The survival version has the same ρ, and is the slower to integrate. */
     @Override
     public double spearmanRho(int i, int j) {
-        return theta == family.independentTheta() ? 0
-                : family == ArchimedeanFamily.FRANK ? ArchimedeanTau.frankSpearman(theta) : SpearmanRho.of(new Archimedean(family, theta, false));
+        if (theta == family.independentTheta()) {
+            return 0;
+        }
+        return switch (family) {
+            case FRANK -> SpearmanRho.frank(theta);
+            case GUMBEL -> SpearmanRho.gumbel(theta);
+            case CLAYTON, JOE -> SpearmanRho.of(new Archimedean(family, theta, false));
+        };
     }
 
     @Override
