@@ -17,7 +17,8 @@ public record Archimedean(ArchimedeanFamily family, double theta, boolean surviv
     public Archimedean {
         double least = family.leastTheta(2);
         new Check().that(theta >= least && theta < Double.POSITIVE_INFINITY && theta > Double.NEGATIVE_INFINITY, "theta", theta,
-                least == Double.NEGATIVE_INFINITY ? "a finite number" : String.format(Locale.ROOT, "a finite number of at least %.0f", least)).orThrow();
+                least == Double.NEGATIVE_INFINITY ? "a finite number"
+                        : String.format(Locale.ROOT, "a finite number of at least %.0f", least)).orThrow();
     }
 
     public static Archimedean ofTheta(ArchimedeanFamily family, boolean survival, double theta) {
@@ -37,7 +38,8 @@ public record Archimedean(ArchimedeanFamily family, double theta, boolean surviv
 
     @Override
     public void requireDimension(int dimension) {
-        new Check().that(theta >= family.leastTheta(dimension), "kendallTau", String.format(Locale.ROOT, "%.6g (theta %.6g)", family.tauOf(theta), theta),
+        new Check().that(theta >= family.leastTheta(dimension), "kendallTau",
+                String.format(Locale.ROOT, "%.6g (theta %.6g)", family.tauOf(theta), theta),
                 TauRange.of(family, dimension) + " for " + dimension + " perils").orThrow();
     }
 

@@ -8,7 +8,8 @@ import java.util.Arrays;
  *
  * <pre>P(X ≤ h, Y ≤ k) = max(F(h) + F(k) − 1, 0) + (1/2π) ∫_{−π/2}^{asin ρ} w((h² − 2hk sin φ + k²)/cos²φ) dφ,</pre>
  *
- * w(x) = e^(−x/2) for the normal, (1 + x/ν)^(−ν/2) for t with any ν &gt; 0. Every term is positive, so small probabilities keep their digits.
+ * w(x) = e^(−x/2) for the normal, (1 + x/ν)^(−ν/2) for t with any ν &gt; 0. Every term is positive, so small probabilities keep their
+ * digits.
  */
 final class EllipticalPair {
     private static final double[] SPREADS = {0.2, 2};

@@ -35,8 +35,8 @@ final class SpearmanRho {
     }
 
     /**
-     * Any pair whose two variables may be exchanged, by quadrature. The triangle v &lt; u, twice: a strong copula has its ridge along the edge, where the
-     * quadrature can reach it.
+     * Any pair whose two variables may be exchanged, by quadrature. The triangle v &lt; u, twice: a strong copula has its ridge along the
+     * edge, where the quadrature can reach it.
      */
     static double of(Copula pair) {
         double triangle = AdaptiveQuadrature.integrate(

@@ -5,11 +5,12 @@ import org.apache.commons.rng.sampling.distribution.ZigguratSampler;
 
 /**
  * Sum of V_0 independent variables with generating function (1 − (1 − p_1 s)^α)/p_0, p_i = 1 − e^−θ_i: the inner frailty of nested Frank
- * copulas. One term is a Sibuya(α) variable tilted by p_1^k. Hofert (2011) rejects from one of two laws, and the better of the
- * two accepts at least 63 %:
- * from Sibuya with probability p_1^(k−1), or from the logarithmic series of θ_1 with the probability that a Sibuya variable is at least k.
+ * copulas. One term is a Sibuya(α) variable tilted by p_1^k, drawn by rejection as in Hofert (2011): from Sibuya with probability
+ * p_1^(k−1), or from the logarithmic series of θ_1 with the probability that a Sibuya variable is at least k. The better of the two
+ * accepts at least 63 %.
  *
- * <p>For many terms, as in {@link SibuyaSum}: a Poisson variable whose mean follows the tilted stable law of exp(−n((e^−θ_1 + s)^α − e^−θ_0)).
+ * <p>For many terms, as in {@link SibuyaSum}: a Poisson variable whose mean follows the tilted stable law of
+ * exp(−n((e^−θ_1 + s)^α − e^−θ_0)).
  */
 final class TiltedSibuyaSum extends CompoundFrailty {
     private final double outer;

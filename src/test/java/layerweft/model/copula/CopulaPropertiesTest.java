@@ -26,7 +26,8 @@ class CopulaPropertiesTest {
                 Stream.of(new Countermonotonic(), CopulaFamily.parse("clayton").at(-1), CopulaFamily.parse("gaussian").at(-1),
                         CopulaFamily.parse("gaussian").at(1),
                         new MixtureCopula(List.of(0.3, 0.7), List.of(new Countermonotonic(), CopulaFamily.parse("joe").at(0.5))),
-                        GroupedArchimedean.of(ArchimedeanFamily.FRANK, true, new Group(2, List.of(), List.of(new Group(4, List.of(0, 1), List.of()))))))
+                        GroupedArchimedean.of(ArchimedeanFamily.FRANK, true,
+                                new Group(2, List.of(), List.of(new Group(4, List.of(0, 1), List.of()))))))
                 .flatMap(s -> s);
     }
 
@@ -102,7 +103,8 @@ class CopulaPropertiesTest {
         Archimedean copula = (Archimedean) family.at(0.35);
         Archimedean turned = new Archimedean(copula.family(), copula.theta(), !copula.survival());
         assertEquals(0.2 + 0.3 - 1 + copula.cdf(0.8, 0.7), turned.cdf(0.2, 0.3), 1e-15);
-        double three = 1 - 0.8 - 0.7 - 0.6 + copula.cdf(0.8, 0.7, 1) + copula.cdf(0.8, 1, 0.6) + copula.cdf(1, 0.7, 0.6) - copula.cdf(0.8, 0.7, 0.6);
+        double pairs = copula.cdf(0.8, 0.7, 1) + copula.cdf(0.8, 1, 0.6) + copula.cdf(1, 0.7, 0.6);
+        double three = 1 - 0.8 - 0.7 - 0.6 + pairs - copula.cdf(0.8, 0.7, 0.6);
         assertEquals(three, turned.cdf(0.2, 0.3, 0.4), 1e-15);
         assertEquals(copula.upperTail(0, 1), turned.lowerTail(0, 1));
     }

@@ -27,7 +27,8 @@ class GroupedArchimedeanTest {
     static Stream<Arguments> strengths() {
         List<Arguments> all = new ArrayList<>();
         for (ArchimedeanFamily family : ArchimedeanFamily.values()) {
-            for (double[] tau : new double[][]{{0, 0.3, 0.6}, {0.1, 0.3, 0.5}, {0.5, 0.5, 0.9}, {0.05, 0.9, 0.99}, {0.9, 0.95, 0.99}, {0.2, 0.999, 0.9999}, {1e-9, 1e-6, 0.9}, {0.001, 0.002, 0.5}}) {
+            for (double[] tau : new double[][]{{0, 0.3, 0.6}, {0.1, 0.3, 0.5}, {0.5, 0.5, 0.9}, {0.05, 0.9, 0.99}, {0.9, 0.95, 0.99},
+                {0.2, 0.999, 0.9999}, {1e-9, 1e-6, 0.9}, {0.001, 0.002, 0.5}}) {
                 all.add(Arguments.of(family, false, tau));
             }
             all.add(Arguments.of(family, true, new double[]{0.1, 0.3, 0.5}));

@@ -94,7 +94,7 @@ class PublishedCopulaValuesTest {
         }
     }
 
-    /** Stephenson (2006), A User's Guide to the evd Package: five-dimensional logistic distribution, dependence 0.6, GEV(1, 1, ξ) margins. */
+    /** Five-dimensional logistic distribution with dependence 0.6 and GEV(1, 1, ξ) margins, as printed by Stephenson (2006). */
     @ParameterizedTest
     @CsvSource({"1, 1, 0.07233", "1.5, 1.5, 0.16387", "2, 2, 0.21949"})
     void fiveDimensionalLogistic(double x, double shape, double expected) {
