@@ -1,5 +1,6 @@
 package layerweft.engine.simulation;
 
+import java.util.Arrays;
 import layerweft.model.treaty.Cover;
 import layerweft.model.treaty.LayerTerms;
 import layerweft.model.treaty.Treaty;
@@ -18,6 +19,9 @@ final class TermsAtOnce implements TermsApplied {
     private int[] year = new int[0];
     private double[] ceded = new double[0];
     private int[] event = new int[0];
+    private double[] occurrence = new double[0];
+    private double[] covered = new double[0];
+    private int[] hit = new int[0];
 
     TermsAtOnce(Treaty treaty) {
         int layers = treaty.layers();
@@ -36,6 +40,7 @@ final class TermsAtOnce implements TermsApplied {
         for (int i = 0; i < work.length; i++) {
             reserve(work[i].events);
             int reaching = firstPass(work[i], years, threshold(i), out);
+            Arrays.fill(ceded, 0, reaching, 0);
             for (int j = 0; j < terms.length; j++) {
                 if (covers[j].covers(i)) {
                     layer(j, subject(work[i], i, j, reaching), reaching, out);
@@ -45,8 +50,9 @@ final class TermsAtOnce implements TermsApplied {
             double[] netLargest = out.netLargest;
             for (int k = 0; k < reaching; k++) {
                 int y = year[k];
-                cededLargest[y] = Math.max(cededLargest[y], ceded[k]);
-                netLargest[y] = Math.max(netLargest[y], loss[k] - ceded[k]);
+                double kept = loss[k] - ceded[k];
+                cededLargest[y] = ceded[k] > cededLargest[y] ? ceded[k] : cededLargest[y];
+                netLargest[y] = kept > netLargest[y] ? kept : netLargest[y];
             }
         }
     }
@@ -83,19 +89,19 @@ final class TermsAtOnce implements TermsApplied {
             for (int last = e + n; e < last; e++) {
                 double x = single != null ? single[e] : work.groundUp(e);
                 total += x;
-                largest = Math.max(largest, x);
-                if (x > threshold) {
-                    loss[reaching] = x;
-                    year[reaching] = y;
-                    ceded[reaching] = 0;
-                    event[reaching++] = e;
-                } else {
-                    largestKept = Math.max(largestKept, x);
-                }
+                largest = x > largest ? x : largest;
+                // written in any case, kept only if it reaches: no branch to guess wrong
+                loss[reaching] = x;
+                year[reaching] = y;
+                event[reaching] = e;
+                boolean reaches = x > threshold;
+                reaching += reaches ? 1 : 0;
+                double kept = reaches ? 0 : x;
+                largestKept = kept > largestKept ? kept : largestKept;
             }
             gross[y] += total;
-            grossLargest[y] = Math.max(grossLargest[y], largest);
-            netLargest[y] = Math.max(netLargest[y], largestKept);
+            grossLargest[y] = largest > grossLargest[y] ? largest : grossLargest[y];
+            netLargest[y] = largestKept > netLargest[y] ? largestKept : netLargest[y];
         }
         return reaching;
     }
@@ -105,43 +111,53 @@ final class TermsAtOnce implements TermsApplied {
         if (covers[j].coversWhole(peril)) {
             return loss;
         }
-        double[] subject = new double[reaching];
+        Arrays.fill(covered, 0, reaching, 0);
         for (int k = 0; k < work.parts.length; k++) {
             if (covers[j].covers(peril, k)) {
                 for (int r = 0; r < reaching; r++) {
-                    subject[r] += work.parts[k][event[r]];
+                    covered[r] += work.parts[k][event[r]];
                 }
             }
         }
-        return subject;
+        return covered;
     }
 
     private void layer(int j, double[] subject, int reaching, YearAmounts out) {
         LayerTerms t = terms[j];
+        t.occurrenceLosses(subject, reaching, occurrence);
+        int hitting = 0;
+        for (int k = 0; k < reaching; k++) {
+            hit[hitting] = k;
+            hitting += occurrence[k] > 0 ? 1 : 0;
+        }
+        boolean full = t.firstEventInFull();
         double s = share[j];
         double[] sum = out.sum[j];
         int[] hits = out.hits[j];
         double[] largest = out.largest[j];
-        for (int k = 0; k < reaching; k++) {
-            double o = t.occurrenceLoss(subject[k]);
-            if (o > 0) {
-                int y = year[k];
-                double alone = t.annualLoss(o);
-                sum[y] += o;
-                hits[y]++;
-                largest[y] = Math.max(largest[y], alone);
-                ceded[k] += s * alone;
-            }
+        for (int h = 0; h < hitting; h++) {
+            int k = hit[h];
+            int y = year[k];
+            double o = occurrence[k];
+            double alone = full ? o : t.annualLoss(o);
+            out.list(j, y);
+            sum[y] += o;
+            hits[y]++;
+            largest[y] = alone > largest[y] ? alone : largest[y];
+            ceded[k] += s * alone;
         }
     }
 
     private void reserve(int events) {
-        if (loss.length < events) {
-            int room = events + events / 4;
+        if (loss.length <= events) {
+            int room = events + events / 4 + 1;
             loss = new double[room];
             year = new int[room];
             ceded = new double[room];
             event = new int[room];
+            occurrence = new double[room];
+            covered = new double[room];
+            hit = new int[room];
         }
     }
 }
