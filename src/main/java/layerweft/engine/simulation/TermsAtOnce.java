@@ -14,7 +14,13 @@ final class TermsAtOnce implements TermsApplied {
     private final Cover[] covers;
     private final double[] share;
 
-    // the events of one peril that can reach a layer: loss by layer's cover, year, and recoveries of all layers so far
+    /** Years of events written before their number is looked at. */
+    private static final int WRITTEN_AHEAD = 4;
+
+    // all events of one peril: year, ground-up loss
+    private int[] yearOf = new int[WRITTEN_AHEAD];
+    private double[] total = new double[0];
+    // those that can reach a layer: loss, year, recoveries of all layers so far, and place among all
     private double[] loss = new double[0];
     private int[] year = new int[0];
     private double[] ceded = new double[0];
@@ -39,7 +45,8 @@ final class TermsAtOnce implements TermsApplied {
     public void apply(PerilYears[] work, int years, YearDraw draw, long block, YearAmounts out) {
         for (int i = 0; i < work.length; i++) {
             reserve(work[i].events);
-            int reaching = firstPass(work[i], years, threshold(i), out);
+            years(work[i], years);
+            int reaching = firstPass(work[i], threshold(i), out);
             Arrays.fill(ceded, 0, reaching, 0);
             for (int j = 0; j < terms.length; j++) {
                 if (covers[j].covers(i)) {
@@ -69,41 +76,61 @@ final class TermsAtOnce implements TermsApplied {
         return least;
     }
 
+    /** The year of every event, into {@link #yearOf}. */
+    private void years(PerilYears work, int years) {
+        int e = 0;
+        for (int drawn = 0; drawn < years; drawn++) {
+            int n = work.counts[drawn];
+            int y = work.year(drawn);
+            // most years have at most this many events: written in any case, no branch to guess wrong
+            yearOf[e] = y;
+            yearOf[e + 1] = y;
+            yearOf[e + 2] = y;
+            yearOf[e + 3] = y;
+            for (int j = WRITTEN_AHEAD; j < n; j++) {
+                yearOf[e + j] = y;
+            }
+            e += n;
+        }
+    }
+
     /** Gross amounts of all events; sets aside those above the threshold and returns their number. */
-    private int firstPass(PerilYears work, int years, double threshold, YearAmounts out) {
+    private int firstPass(PerilYears work, double threshold, YearAmounts out) {
         double[] gross = out.gross;
         double[] grossLargest = out.grossLargest;
         double[] netLargest = out.netLargest;
-        double[] single = work.parts.length == 1 ? work.parts[0] : null;
-        int e = 0;
+        double[] all = groundUp(work);
         int reaching = 0;
-        for (int drawn = 0; drawn < years; drawn++) {
-            int n = work.counts[drawn];
-            if (n == 0) {
-                continue;
-            }
-            int y = work.year(drawn);
-            double total = 0;
-            double largest = 0;
-            double largestKept = 0;
-            for (int last = e + n; e < last; e++) {
-                double x = single != null ? single[e] : work.groundUp(e);
-                total += x;
-                largest = x > largest ? x : largest;
-                // written in any case, kept only if it reaches: no branch to guess wrong
-                loss[reaching] = x;
-                year[reaching] = y;
-                event[reaching] = e;
-                boolean reaches = x > threshold;
-                reaching += reaches ? 1 : 0;
-                double kept = reaches ? 0 : x;
-                largestKept = kept > largestKept ? kept : largestKept;
-            }
-            gross[y] += total;
-            grossLargest[y] = largest > grossLargest[y] ? largest : grossLargest[y];
-            netLargest[y] = largestKept > netLargest[y] ? largestKept : netLargest[y];
+        for (int e = 0; e < work.events; e++) {
+            double x = all[e];
+            int y = yearOf[e];
+            gross[y] += x;
+            grossLargest[y] = x > grossLargest[y] ? x : grossLargest[y];
+            // written in any case, kept only if it reaches
+            loss[reaching] = x;
+            year[reaching] = y;
+            event[reaching] = e;
+            boolean reaches = x > threshold;
+            reaching += reaches ? 1 : 0;
+            double kept = reaches ? 0 : x;
+            netLargest[y] = kept > netLargest[y] ? kept : netLargest[y];
         }
         return reaching;
+    }
+
+    /** Ground-up loss of each event: the only part, or the sum of the parts. */
+    private double[] groundUp(PerilYears work) {
+        if (work.parts.length == 1) {
+            return work.parts[0];
+        }
+        System.arraycopy(work.parts[0], 0, total, 0, work.events);
+        for (int k = 1; k < work.parts.length; k++) {
+            double[] part = work.parts[k];
+            for (int e = 0; e < work.events; e++) {
+                total[e] += part[e];
+            }
+        }
+        return total;
     }
 
     /** Subject losses of the events set aside, for layer j: the whole loss, or the sum of the covered parts. */
@@ -149,8 +176,10 @@ final class TermsAtOnce implements TermsApplied {
     }
 
     private void reserve(int events) {
-        if (loss.length <= events) {
-            int room = events + events / 4 + 1;
+        if (loss.length < events + WRITTEN_AHEAD) {
+            int room = events + events / 4 + WRITTEN_AHEAD;
+            yearOf = new int[room];
+            total = new double[room];
             loss = new double[room];
             year = new int[room];
             ceded = new double[room];
