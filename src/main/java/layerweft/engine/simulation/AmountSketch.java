@@ -17,6 +17,9 @@ final class AmountSketch {
     private static final long ROUNDING = 8;
 
     private final int bits;
+    private final int shift;
+    private final long low;
+    private final int inOctave;
     private final double unit;
     private final double perUnit;
     private final int[][] cells = new int[OCTAVES][];
@@ -30,6 +33,9 @@ final class AmountSketch {
      */
     AmountSketch(int bits, double unit) {
         this.bits = bits;
+        this.shift = 52 - bits;
+        this.low = (1L << shift) - 1;
+        this.inOctave = (1 << bits) - 1;
         this.unit = unit;
         this.perUnit = 1 / unit;
     }
@@ -43,30 +49,38 @@ final class AmountSketch {
     /** Counts the first {@code years} amounts, each at least 0. */
     void add(double[] amounts, int years) {
         count += years;
-        int shift = 52 - bits;
-        long low = (1L << shift) - 1;
-        int inOctave = (1 << bits) - 1;
-        double scale = perUnit;
         for (int y = 0; y < years; y++) {
-            double a = amounts[y];
-            if (a <= 0) {
-                zeros++;
-                continue;
-            }
-            // a sum of limits may be off its edge by a rounding or two: read it as on the edge
-            long raw = Double.doubleToRawLongBits(a * scale) + ROUNDING;
-            int octave = (int) (raw >>> 52) - 1;
-            if (octave < 0 || octave >= OCTAVES) {
-                outside(octave);
-                continue;
-            }
-            int[] cell = cells[octave];
-            if (cell == null) {
-                cell = cells[octave] = new int[2 << bits];
-            }
-            int at = ((int) (raw >>> shift) & inOctave) << 1;
-            cell[(raw & low) <= 2 * ROUNDING ? at : at + 1]++;
+            add(amounts[y]);
         }
+    }
+
+    /** Counts {@code years} amounts of which all are 0 but those of the years listed, which come first in {@code listed}. */
+    void add(double[] amounts, int[] listed, int listedYears, int years) {
+        count += years;
+        zeros += years - listedYears;
+        for (int k = 0; k < listedYears; k++) {
+            add(amounts[listed[k]]);
+        }
+    }
+
+    private void add(double amount) {
+        if (amount <= 0) {
+            zeros++;
+            return;
+        }
+        // a sum of limits may be off its edge by a rounding or two: read it as on the edge
+        long raw = Double.doubleToRawLongBits(amount * perUnit) + ROUNDING;
+        int octave = (int) (raw >>> 52) - 1;
+        if (octave < 0 || octave >= OCTAVES) {
+            outside(octave);
+            return;
+        }
+        int[] cell = cells[octave];
+        if (cell == null) {
+            cell = cells[octave] = new int[2 << bits];
+        }
+        int at = (int) (raw >>> shift) & inOctave;
+        cell[2 * at + ((raw & low) <= 2 * ROUNDING ? 0 : 1)]++;
     }
 
     private void outside(int octave) {

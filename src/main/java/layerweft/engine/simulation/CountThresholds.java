@@ -12,11 +12,15 @@ final class CountThresholds {
     /** Below this length a scan from 0 beats a binary search: most counts are small. */
     private static final int SCAN = 24;
 
+    private static final int UNROLLED = 4;
+
+    /** Rising; at least {@value #UNROLLED}, filled up with infinity. */
     private final double[] thresholds;
 
     CountThresholds(CountTable table, ScoreSampler sampler, int margin) {
-        thresholds = new double[table.size()];
-        for (int n = 0; n < thresholds.length; n++) {
+        thresholds = new double[Math.max(UNROLLED, table.size())];
+        Arrays.fill(thresholds, Double.POSITIVE_INFINITY);
+        for (int n = 0; n < table.size(); n++) {
             thresholds[n] = sampler.score(margin, table.cdf(n), table.survival(n));
         }
     }
@@ -26,10 +30,15 @@ final class CountThresholds {
         double[] t = thresholds;
         long sum = 0;
         if (t.length <= SCAN) {
+            double t0 = t[0];
+            double t1 = t[1];
+            double t2 = t[2];
+            double t3 = t[3];
             for (int y = 0; y < years; y++) {
                 double score = scores[y];
-                int n = 0;
-                while (n < t.length && score > t[n]) {
+                // most counts are decided by these four comparisons, which cost no wrong guess of a branch
+                int n = (score > t0 ? 1 : 0) + (score > t1 ? 1 : 0) + (score > t2 ? 1 : 0) + (score > t3 ? 1 : 0);
+                while (n >= UNROLLED && n < t.length && score > t[n]) {
                     n++;
                 }
                 counts[y] = n;

@@ -30,11 +30,10 @@ final class LayerSums {
         int[] hits = amounts.hits[layer];
         double[] timed = amounts.timedFactor[layer];
         boolean reinstates = terms.hasPaidReinstatements();
-        for (int i = 0; i < years; i++) {
+        int[] listed = amounts.hitYear[layer];
+        for (int k = 0; k < amounts.hitYears[layer]; k++) {
+            int i = listed[k];
             double a = sum[i];
-            if (a <= 0) {
-                continue;
-            }
             double y = terms.annualLoss(a);
             s.a += a;
             s.aa += a * a;

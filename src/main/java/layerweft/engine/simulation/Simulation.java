@@ -22,7 +22,7 @@ import layerweft.model.treaty.Treaty;
  */
 public final class Simulation {
     /** Years of a block where years are independent: workspaces stay in the processor's cache. */
-    static final int BLOCK = 8_192;
+    static final int BLOCK = 4_096;
     /** Years of a block within which annual totals are rearranged. */
     static final int REARRANGED_BLOCK = 65_536;
     /** Fewest full blocks from which batch means give a standard error worth having. */

@@ -1,5 +1,6 @@
 package layerweft.engine.simulation;
 
+import java.util.Arrays;
 import layerweft.model.treaty.Cover;
 import layerweft.model.treaty.LayerTerms;
 import layerweft.model.treaty.Treaty;
@@ -13,11 +14,20 @@ final class TermsAtOnce implements TermsApplied {
     private final Cover[] covers;
     private final double[] share;
 
-    // the events of one peril that can reach a layer: loss by layer's cover, year, and recoveries of all layers so far
+    /** Years of events written before their number is looked at. */
+    private static final int WRITTEN_AHEAD = 4;
+
+    // all events of one peril: year, ground-up loss
+    private int[] yearOf = new int[WRITTEN_AHEAD];
+    private double[] total = new double[0];
+    // those that can reach a layer: loss, year, recoveries of all layers so far, and place among all
     private double[] loss = new double[0];
     private int[] year = new int[0];
     private double[] ceded = new double[0];
     private int[] event = new int[0];
+    private double[] occurrence = new double[0];
+    private double[] covered = new double[0];
+    private int[] hit = new int[0];
 
     TermsAtOnce(Treaty treaty) {
         int layers = treaty.layers();
@@ -35,7 +45,9 @@ final class TermsAtOnce implements TermsApplied {
     public void apply(PerilYears[] work, int years, YearDraw draw, long block, YearAmounts out) {
         for (int i = 0; i < work.length; i++) {
             reserve(work[i].events);
-            int reaching = firstPass(work[i], years, threshold(i), out);
+            years(work[i], years);
+            int reaching = firstPass(work[i], threshold(i), out);
+            Arrays.fill(ceded, 0, reaching, 0);
             for (int j = 0; j < terms.length; j++) {
                 if (covers[j].covers(i)) {
                     layer(j, subject(work[i], i, j, reaching), reaching, out);
@@ -45,8 +57,9 @@ final class TermsAtOnce implements TermsApplied {
             double[] netLargest = out.netLargest;
             for (int k = 0; k < reaching; k++) {
                 int y = year[k];
-                cededLargest[y] = Math.max(cededLargest[y], ceded[k]);
-                netLargest[y] = Math.max(netLargest[y], loss[k] - ceded[k]);
+                double kept = loss[k] - ceded[k];
+                cededLargest[y] = ceded[k] > cededLargest[y] ? ceded[k] : cededLargest[y];
+                netLargest[y] = kept > netLargest[y] ? kept : netLargest[y];
             }
         }
     }
@@ -63,41 +76,61 @@ final class TermsAtOnce implements TermsApplied {
         return least;
     }
 
+    /** The year of every event, into {@link #yearOf}. */
+    private void years(PerilYears work, int years) {
+        int e = 0;
+        for (int drawn = 0; drawn < years; drawn++) {
+            int n = work.counts[drawn];
+            int y = work.year(drawn);
+            // most years have at most this many events: written in any case, no branch to guess wrong
+            yearOf[e] = y;
+            yearOf[e + 1] = y;
+            yearOf[e + 2] = y;
+            yearOf[e + 3] = y;
+            for (int j = WRITTEN_AHEAD; j < n; j++) {
+                yearOf[e + j] = y;
+            }
+            e += n;
+        }
+    }
+
     /** Gross amounts of all events; sets aside those above the threshold and returns their number. */
-    private int firstPass(PerilYears work, int years, double threshold, YearAmounts out) {
+    private int firstPass(PerilYears work, double threshold, YearAmounts out) {
         double[] gross = out.gross;
         double[] grossLargest = out.grossLargest;
         double[] netLargest = out.netLargest;
-        double[] single = work.parts.length == 1 ? work.parts[0] : null;
-        int e = 0;
+        double[] all = groundUp(work);
         int reaching = 0;
-        for (int drawn = 0; drawn < years; drawn++) {
-            int n = work.counts[drawn];
-            if (n == 0) {
-                continue;
-            }
-            int y = work.year(drawn);
-            double total = 0;
-            double largest = 0;
-            double largestKept = 0;
-            for (int last = e + n; e < last; e++) {
-                double x = single != null ? single[e] : work.groundUp(e);
-                total += x;
-                largest = Math.max(largest, x);
-                if (x > threshold) {
-                    loss[reaching] = x;
-                    year[reaching] = y;
-                    ceded[reaching] = 0;
-                    event[reaching++] = e;
-                } else {
-                    largestKept = Math.max(largestKept, x);
-                }
-            }
-            gross[y] += total;
-            grossLargest[y] = Math.max(grossLargest[y], largest);
-            netLargest[y] = Math.max(netLargest[y], largestKept);
+        for (int e = 0; e < work.events; e++) {
+            double x = all[e];
+            int y = yearOf[e];
+            gross[y] += x;
+            grossLargest[y] = x > grossLargest[y] ? x : grossLargest[y];
+            // written in any case, kept only if it reaches
+            loss[reaching] = x;
+            year[reaching] = y;
+            event[reaching] = e;
+            boolean reaches = x > threshold;
+            reaching += reaches ? 1 : 0;
+            double kept = reaches ? 0 : x;
+            netLargest[y] = kept > netLargest[y] ? kept : netLargest[y];
         }
         return reaching;
+    }
+
+    /** Ground-up loss of each event: the only part, or the sum of the parts. */
+    private double[] groundUp(PerilYears work) {
+        if (work.parts.length == 1) {
+            return work.parts[0];
+        }
+        System.arraycopy(work.parts[0], 0, total, 0, work.events);
+        for (int k = 1; k < work.parts.length; k++) {
+            double[] part = work.parts[k];
+            for (int e = 0; e < work.events; e++) {
+                total[e] += part[e];
+            }
+        }
+        return total;
     }
 
     /** Subject losses of the events set aside, for layer j: the whole loss, or the sum of the covered parts. */
@@ -105,43 +138,55 @@ final class TermsAtOnce implements TermsApplied {
         if (covers[j].coversWhole(peril)) {
             return loss;
         }
-        double[] subject = new double[reaching];
+        Arrays.fill(covered, 0, reaching, 0);
         for (int k = 0; k < work.parts.length; k++) {
             if (covers[j].covers(peril, k)) {
                 for (int r = 0; r < reaching; r++) {
-                    subject[r] += work.parts[k][event[r]];
+                    covered[r] += work.parts[k][event[r]];
                 }
             }
         }
-        return subject;
+        return covered;
     }
 
     private void layer(int j, double[] subject, int reaching, YearAmounts out) {
         LayerTerms t = terms[j];
+        t.occurrenceLosses(subject, reaching, occurrence);
+        int hitting = 0;
+        for (int k = 0; k < reaching; k++) {
+            hit[hitting] = k;
+            hitting += occurrence[k] > 0 ? 1 : 0;
+        }
+        boolean full = t.firstEventInFull();
         double s = share[j];
         double[] sum = out.sum[j];
         int[] hits = out.hits[j];
         double[] largest = out.largest[j];
-        for (int k = 0; k < reaching; k++) {
-            double o = t.occurrenceLoss(subject[k]);
-            if (o > 0) {
-                int y = year[k];
-                double alone = t.annualLoss(o);
-                sum[y] += o;
-                hits[y]++;
-                largest[y] = Math.max(largest[y], alone);
-                ceded[k] += s * alone;
-            }
+        for (int h = 0; h < hitting; h++) {
+            int k = hit[h];
+            int y = year[k];
+            double o = occurrence[k];
+            double alone = full ? o : t.annualLoss(o);
+            out.list(j, y);
+            sum[y] += o;
+            hits[y]++;
+            largest[y] = alone > largest[y] ? alone : largest[y];
+            ceded[k] += s * alone;
         }
     }
 
     private void reserve(int events) {
-        if (loss.length < events) {
-            int room = events + events / 4;
+        if (loss.length < events + WRITTEN_AHEAD) {
+            int room = events + events / 4 + WRITTEN_AHEAD;
+            yearOf = new int[room];
+            total = new double[room];
             loss = new double[room];
             year = new int[room];
             ceded = new double[room];
             event = new int[room];
+            occurrence = new double[room];
+            covered = new double[room];
+            hit = new int[room];
         }
     }
 }

@@ -101,6 +101,9 @@ final class TermsInOrder implements TermsApplied {
             double o = terms[j].occurrenceLoss(Math.max(subject, 0));
             alone[j] = terms[j].annualLoss(terms[j].occurrenceLoss(Math.max(subjectAlone, 0)));
             ceded += share[j] * alone[j];
+            if (o > 0 || alone[j] > 0) {
+                out.list(j, y);
+            }
             out.largest[j][y] = Math.max(out.largest[j][y], alone[j]);
             if (o > 0) {
                 double before = terms[j].annualLoss(soFar[j]);

@@ -48,8 +48,8 @@ final class Worker {
         LayerSums[] layers = new LayerSums[terms.length];
         for (int j = 0; j < layers.length; j++) {
             layers[j] = LayerSums.of(terms[j], amounts, j, years);
-            sketches.sums[j].add(amounts.sum[j], years);
-            sketches.largest[j].add(amounts.largest[j], years);
+            sketches.sums[j].add(amounts.sum[j], amounts.hitYear[j], amounts.hitYears[j], years);
+            sketches.largest[j].add(amounts.largest[j], amounts.hitYear[j], amounts.hitYears[j], years);
         }
         double[][] totals = {amounts.gross, ceded, net};
         double[][] largest = {amounts.grossLargest, amounts.cededLargest, amounts.netLargest};
@@ -65,11 +65,9 @@ final class Worker {
     private void wholeTotals(int years) {
         Arrays.fill(ceded, 0, years, 0);
         for (int j = 0; j < terms.length; j++) {
-            double[] sum = amounts.sum[j];
-            for (int y = 0; y < years; y++) {
-                if (sum[y] > 0) {
-                    ceded[y] += share[j] * terms[j].annualLoss(sum[y]);
-                }
+            for (int k = 0; k < amounts.hitYears[j]; k++) {
+                int y = amounts.hitYear[j][k];
+                ceded[y] += share[j] * terms[j].annualLoss(amounts.sum[j][y]);
             }
         }
         for (int y = 0; y < years; y++) {

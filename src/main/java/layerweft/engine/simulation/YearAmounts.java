@@ -4,6 +4,8 @@ import java.util.Arrays;
 
 /**
  * The amounts of each year of a block, at 100 % of each layer: what the terms make of the events. A workspace, zeroed for each block.
+ *
+ * <p>Most layers are hit in few years: those years are listed, so that whatever follows passes over the others.
  */
 final class YearAmounts {
     /** A: annual sum of occurrence losses, {@code sum[layer][year]}. */
@@ -14,6 +16,9 @@ final class YearAmounts {
     final double[][] largest;
     /** Reinstatement premium as a multiple of the upfront premium, only for layers pro rata as to time; otherwise null. */
     final double[][] timedFactor;
+    /** The years in which the layer has any amount, in no order: the first {@code hitYears[layer]} of {@code hitYear[layer]}. */
+    final int[][] hitYear;
+    final int[] hitYears;
     /** Ground-up total of all perils, and its largest event. */
     final double[] gross;
     final double[] grossLargest;
@@ -26,6 +31,8 @@ final class YearAmounts {
         sum = new double[layers][years];
         hits = new int[layers][years];
         largest = new double[layers][years];
+        hitYear = new int[layers][years + 1];
+        hitYears = new int[layers];
         timedFactor = new double[layers][];
         for (int j = 0; j < layers; j++) {
             timedFactor[j] = proRataTime[j] ? new double[years] : null;
@@ -36,14 +43,24 @@ final class YearAmounts {
         netLargest = new double[years];
     }
 
+    /** Lists a year for a layer unless it is already; to be called before the layer's first amount of the year is put in. */
+    void list(int layer, int year) {
+        hitYear[layer][hitYears[layer]] = year;
+        hitYears[layer] += sum[layer][year] == 0 && largest[layer][year] == 0 ? 1 : 0;
+    }
+
     void clear(int years) {
         for (int j = 0; j < sum.length; j++) {
-            Arrays.fill(sum[j], 0, years, 0);
-            Arrays.fill(hits[j], 0, years, 0);
-            Arrays.fill(largest[j], 0, years, 0);
-            if (timedFactor[j] != null) {
-                Arrays.fill(timedFactor[j], 0, years, 0);
+            for (int k = 0; k < hitYears[j]; k++) {
+                int y = hitYear[j][k];
+                sum[j][y] = 0;
+                hits[j][y] = 0;
+                largest[j][y] = 0;
+                if (timedFactor[j] != null) {
+                    timedFactor[j][y] = 0;
+                }
             }
+            hitYears[j] = 0;
         }
         Arrays.fill(gross, 0, years, 0);
         Arrays.fill(grossLargest, 0, years, 0);
