@@ -52,7 +52,7 @@ final class CopulaMapping {
     private final Shape<Copula> mixture;
 
     private CopulaMapping(List<String> names) {
-        this.names = names;
+        this.names = new ArrayList<>(names);
         this.component = Shape.of("mixtureComponent", Variant.of(number("weight"), required("copula", of(names)), Component::new));
         this.mixture = Shape.of("copula.mixture", Variant.of(required("mixture", Lists.of(component, Limits.LIST)),
                 parts -> new MixtureCopula(parts.stream().map(Component::weight).toList(), parts.stream().map(Component::copula).toList())));
@@ -131,15 +131,20 @@ final class CopulaMapping {
         if (name == null) {
             return null;
         }
-        int index = names.indexOf(name);
         if (!grouped.add(name)) {
             faults.wrongType(node, path, "each peril in one group only");
             return null;
         }
-        if (index < 0 && !names.contains(null)) {
-            faults.wrongType(node, path, "one of the perils joined: " + String.join(", ", names));
+        int index = names.indexOf(name);
+        if (index < 0 && names.contains(null)) {
+            index = names.indexOf(null);
+            names.set(index, name); // the peril whose own name is at fault may be meant: that fault is enough
         }
-        return index < 0 ? null : index;
+        if (index < 0) {
+            faults.wrongType(node, path, "one of the perils joined: " + String.join(", ", names));
+            return null;
+        }
+        return index;
     }
 
     private static double[][] matrix(List<List<Double>> rows) {
