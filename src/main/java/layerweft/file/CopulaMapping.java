@@ -101,7 +101,8 @@ final class CopulaMapping {
             return e;
         }
         return new InadmissibleException(e.findings().stream()
-                .map(f -> f.field().equals("kendallTau") ? new Finding("theta", "kendallTau " + f.found(), "kendallTau " + f.admissible()) : f).toList());
+                .map(f -> f.field().equals("kendallTau") ? new Finding("theta", "kendallTau " + f.found(), "kendallTau " + f.admissible()) : f)
+                .toList());
     }
 
     private Kind<Copula> archimedean(ArchimedeanFamily family) {
