@@ -136,6 +136,9 @@ final class CopulaMapping {
             faults.wrongType(node, path, "each peril in one group only");
             return null;
         }
+        if (names.isEmpty()) {
+            return grouped.size() - 1; // a list of perils that is itself at fault: any index serves to read on
+        }
         int index = names.indexOf(name);
         if (index < 0 && names.contains(null)) {
             index = names.indexOf(null);
