@@ -101,7 +101,8 @@ final class CopulaMapping {
             return e;
         }
         return new InadmissibleException(e.findings().stream()
-                .map(f -> f.field().equals("kendallTau") ? new Finding("theta", "kendallTau " + f.found(), "kendallTau " + f.admissible()) : f).toList());
+                .map(f -> f.field().equals("kendallTau") ? new Finding("theta", "kendallTau " + f.found(), "kendallTau " + f.admissible()) : f)
+                .toList());
     }
 
     private Kind<Copula> archimedean(ArchimedeanFamily family) {
@@ -134,6 +135,9 @@ final class CopulaMapping {
         if (!grouped.add(name)) {
             faults.wrongType(node, path, "each peril in one group only");
             return null;
+        }
+        if (names.isEmpty()) {
+            return grouped.size() - 1; // a list of perils that is itself at fault: any index serves to read on
         }
         int index = names.indexOf(name);
         if (index < 0 && names.contains(null)) {

@@ -17,6 +17,8 @@ import layerweft.model.InadmissibleException;
  * @param name of this kind of object, as the JSON Schema calls it, e.g. {@code severity.pareto}
  */
 record Shape<T>(String name, List<Variant<T>> variants) implements Reading<T> {
+    /** Unknown fields of one object that are held against the known ones: more are no misspellings. */
+    private static final int MOST_HINTS = 20;
 
     @SafeVarargs
     @SuppressWarnings("varargs") // copied at once
@@ -76,10 +78,11 @@ record Shape<T>(String name, List<Variant<T>> variants) implements Reading<T> {
     private Set<String> unknownFields(Node.Members object, String path, Faults faults) {
         Set<String> known = fieldNames();
         Set<String> hinted = new LinkedHashSet<>();
+        int unknown = 0;
         for (Map.Entry<String, Node.Member> field : object.fields().entrySet()) {
             if (!known.contains(field.getKey())) {
                 List<String> missing = known.stream().filter(n -> object.get(n) == null && !hinted.contains(n)).toList();
-                String near = NearMiss.of(field.getKey(), missing);
+                String near = ++unknown > MOST_HINTS ? null : NearMiss.of(field.getKey(), missing);
                 if (near != null) {
                     hinted.add(near);
                 }

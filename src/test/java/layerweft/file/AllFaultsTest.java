@@ -75,6 +75,17 @@ class AllFaultsTest {
     }
 
     @Test
+    void aPerilWithoutANameDoesNotSpoilTheGroups() {
+        String groups = "\"kendallTau\": 0.3, \"groups\": [{\"perils\": [\"gale\", \"flood\"], \"kendallTau\": 0.5}]";
+        String text = Examples.changed(Examples.PORTFOLIO, "\"kendallTau\": 0.3", groups);
+        assertEquals(List.of("perils[0].name"), faults(Examples.changed(text, "\"name\": \"wind\", ", "")).stream().map(Fault::path).toList());
+        assertEquals(List.of("perils", "perrils"),
+                faults("{\"format\": \"layerweft/portfolio/1\", \"name\": \"n\", \"currency\": \"\", \"unit\": \"\", \"perils\": [],\n"
+                        + "\"perrils\": 1, \"dependence\": {\"links\": \"counts\", \"copula\": {\"family\": \"gumbel\", " + groups + "}}}").stream()
+                        .map(Fault::path).toList());
+    }
+
+    @Test
     void moreFaultsThanAnyoneReadsAreCutOff() {
         String text = Examples.changed(Examples.PROGRAMME, "[10, 200]", "[" + "true,".repeat(999) + "true]");
         String more = Examples.changed(text, "[1.0, 0.5]", "[" + "true,".repeat(999) + "true]");

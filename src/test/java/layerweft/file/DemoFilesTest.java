@@ -32,8 +32,9 @@ class DemoFilesTest {
     @ParameterizedTest
     @MethodSource("treaties")
     void everyProgrammeFormsATreatyWithTheBookOfItsName(String programme) throws IOException {
+        String name = programme.substring("treaties/".length());
         List<String> books = files("demo-portfolios").stream()
-                .filter(p -> programme.substring("treaties/".length()).startsWith(p.substring("demo-portfolios/".length()).replace(".json", "-"))).toList();
+                .filter(p -> name.startsWith(p.substring("demo-portfolios/".length()).replace(".json", "-"))).toList();
         assertEquals(1, books.size(), "books for " + programme);
         assertTrue(TreatyReader.read(Path.of(books.get(0)), Path.of(programme)).layers() > 0);
         assertArrayEquals(Files.readAllBytes(Path.of(programme)), DemoFiles.bytes(programme));

@@ -29,7 +29,8 @@ class FileCheckTest {
         Path portfolio = file("p.json", PORTFOLIO);
         List<String> valid = new ArrayList<>();
         assertEquals(List.of(), FileCheck.of(List.of(programme, portfolio), valid::add));
-        assertEquals(List.of(programme + ": a valid programme, \"Cover\", of 2 layers", portfolio + ": a valid portfolio, \"Book\", of 2 perils"), valid);
+        assertEquals(List.of(programme + ": a valid programme, \"Cover\", of 2 layers", portfolio + ": a valid portfolio, \"Book\", of 2 perils"),
+                valid);
     }
 
     @Test

@@ -169,7 +169,8 @@ class ModelsFromFilesTest {
     void aProgrammeBecomesItsModel() {
         Layer cat = new Layer("Cat", List.of("wind", "flood/sea"), OccurrenceTerms.excess(30, 20), AnnualTerms.NONE, List.of(1.0, 0.5), 1, 0.9,
                 false, List.of(), 6.5);
-        Layer aggregate = new Layer("Aggregate", List.of(), OccurrenceTerms.NONE, new AnnualTerms(40, 60), null, 1, 1, false, List.of("Cat"), null);
+        Layer aggregate = new Layer("Aggregate", List.of(), OccurrenceTerms.NONE, new AnnualTerms(40, 60), null, 1, 1, false, List.of("Cat"),
+                null);
         assertEquals(new Programme("Cover", List.of(cat, aggregate), new Pricing(new Loading.StandardDeviation(0.25), 0.1, 0.05, true),
                 new Buyer(List.of(10.0, 200.0), 0.99, 0.07)), programme(PROGRAMME));
     }
@@ -193,7 +194,8 @@ class ModelsFromFilesTest {
     void everyFieldOfALayerArrivesInItsPlace() {
         Layer layer = programme("""
                 {"format": "layerweft/programme/1", "name": "P", "layers": [{"name": "L", "occurrence": {"franchise": 7, "limit": 20},
-                 "annual": {"deductible": 3, "limit": 30}, "reinstatements": [], "quotaShare": 0.5, "share": 0.25, "proRataTime": true, "premium": 0}]}
+                 "annual": {"deductible": 3, "limit": 30}, "reinstatements": [], "quotaShare": 0.5, "share": 0.25, "proRataTime": true,
+                 "premium": 0}]}
                 """).layers().get(0);
         assertEquals(new Layer("L", List.of(), new OccurrenceTerms(0, 7.0, 20), new AnnualTerms(3, 30), List.of(), 0.5, 0.25, true, List.of(), 0.0),
                 layer);
