@@ -108,10 +108,7 @@ public record Mixture(List<Double> weights, List<SeverityModel> components) impl
         return sum;
     }
 
-    /**
-     * The smallest amount at which a rising condition holds: it lies between the least and the greatest of the components' own, and is
-     * found exactly by bisection on the bits of the amounts, whose order is that of the amounts themselves.
-     */
+    /** The smallest amount at which a rising condition holds: it lies between the least and the greatest of the components' own. */
     private double smallest(ToDoubleFunction<SeverityModel> own, DoublePredicate holds) {
         double least = Double.POSITIVE_INFINITY;
         double greatest = 0;
@@ -122,16 +119,6 @@ public record Mixture(List<Double> weights, List<SeverityModel> components) impl
                 greatest = Math.max(greatest, x);
             }
         }
-        long low = Double.doubleToRawLongBits(Math.max(least, 0.0) + 0.0);
-        long high = Double.doubleToRawLongBits(greatest + 0.0);
-        while (low < high) {
-            long middle = (low + high) >>> 1;
-            if (holds.test(Double.longBitsToDouble(middle))) {
-                high = middle;
-            } else {
-                low = middle + 1;
-            }
-        }
-        return Double.longBitsToDouble(low);
+        return Bisection.smallest(least, greatest, holds);
     }
 }
