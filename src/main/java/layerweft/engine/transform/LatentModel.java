@@ -1,0 +1,147 @@
+package layerweft.engine.transform;
+
+import java.util.ArrayList;
+import java.util.Arrays;
+import java.util.List;
+import java.util.Optional;
+import layerweft.model.copula.Archimedean;
+import layerweft.model.copula.Comonotonic;
+import layerweft.model.copula.Copula;
+import layerweft.model.copula.Correlation;
+import layerweft.model.copula.Countermonotonic;
+import layerweft.model.copula.Gaussian;
+import layerweft.model.copula.GroupedArchimedean;
+import layerweft.model.copula.Independence;
+import layerweft.model.copula.MixtureCopula;
+import layerweft.model.copula.Student;
+
+/** Chooses, for a copula and the perils that matter, how the joint law of their counts becomes {@link LatentNodes}. */
+final class LatentModel {
+    /** Differences of C are exact and cheap up to so many. */
+    private static final int CHEAP_DIFFERENCES = 6_000;
+    /** A pair without a latent factor may take so many. */
+    private static final int MOST_DIFFERENCES = 4_000_000;
+    private static final int MOST_GROUP_NODES = 3_000;
+
+    private LatentModel() {
+    }
+
+    /** Why the copula cannot be used for these perils (indices in the portfolio); empty where it can. */
+    static Optional<String> refusal(Copula copula, int[] perils, CountMargin[] margins) {
+        if (copula instanceof MixtureCopula mixture) {
+            return mixture.components().stream().map(c -> refusal(c, perils, margins)).flatMap(Optional::stream).findFirst();
+        }
+        if (copula instanceof Gaussian gaussian) {
+            return refusal(gaussian.correlation(), perils);
+        }
+        if (copula instanceof Student student) {
+            return refusal(student.correlation(), perils);
+        }
+        if (copula instanceof GroupedArchimedean grouped && perils.length > 2
+                && GroupedNodes.cost(grouped, perils, margins) > MOST_GROUP_NODES) {
+            return Optional.of("groups of the copula join too many perils with too many events for the transform");
+        }
+        boolean pairOnly = copula instanceof Countermonotonic || copula instanceof Archimedean a && !a.hasFrailty();
+        if (pairOnly && perils.length == 2 && DifferencedNodes.cost(margins) > MOST_DIFFERENCES) {
+            return Optional.of("negative dependence between perils with too many events for the transform");
+        }
+        return Optional.empty();
+    }
+
+    private static Optional<String> refusal(Correlation correlation, int[] perils) {
+        boolean possible = perils.length <= 3 || FactorNodes.loadings(correlation, perils) != null;
+        return possible ? Optional.empty()
+                : Optional.of("a correlation matrix without a common factor joins " + perils.length + " perils of the layer, and the transform takes at most 3");
+    }
+
+    /**
+     * @param perils indices in the portfolio of the perils wanted, rising
+     * @param margins of these perils
+     * @param budget for the error of joint probabilities when nodes are merged
+     */
+    static LatentNodes of(Copula copula, int[] perils, CountMargin[] margins, double budget) {
+        if (perils.length <= 1 || copula instanceof Independence) {
+            return independent(margins);
+        }
+        if (copula instanceof MixtureCopula mixture) {
+            return mixture(mixture, perils, margins, budget);
+        }
+        if (copula instanceof Comonotonic) {
+            return OrderedNodes.of(margins, new boolean[perils.length]);
+        }
+        if (copula instanceof Countermonotonic) {
+            return OrderedNodes.of(margins, new boolean[] {false, true});
+        }
+        if (copula instanceof Archimedean archimedean) {
+            return archimedean(archimedean, margins, budget);
+        }
+        if (copula instanceof GroupedArchimedean grouped) {
+            return perils.length == 2 ? archimedean(grouped.pair(perils[0], perils[1]), margins, budget)
+                    : GroupedNodes.of(grouped, perils, margins).merged(budget);
+        }
+        if (copula instanceof Gaussian gaussian) {
+            return elliptical(gaussian.correlation(), Double.POSITIVE_INFINITY, perils, margins, budget);
+        }
+        Student student = (Student) copula;
+        return elliptical(student.correlation(), student.degreesOfFreedom(), perils, margins, budget);
+    }
+
+    private static LatentNodes independent(CountMargin[] margins) {
+        double[][][] survival = new double[margins.length][1][];
+        for (int i = 0; i < margins.length; i++) {
+            survival[i][0] = margins[i].survival();
+        }
+        return new LatentNodes(new double[] {1}, survival, 0);
+    }
+
+    private static LatentNodes archimedean(Archimedean copula, CountMargin[] margins, double budget) {
+        if (copula.theta() == copula.family().independentTheta()) {
+            return independent(margins);
+        }
+        boolean cheap = margins.length == 2 && DifferencedNodes.cost(margins) <= CHEAP_DIFFERENCES;
+        if (cheap || !copula.hasFrailty()) {
+            return DifferencedNodes.of(copula, margins).merged(budget);
+        }
+        return FrailtyNodes.of(copula.family(), copula.theta(), copula.generator(), copula.survival(), margins).merged(budget);
+    }
+
+    private static LatentNodes elliptical(Correlation correlation, double degreesOfFreedom, int[] perils, CountMargin[] margins, double budget) {
+        double[] loadings = FactorNodes.loadings(correlation, perils);
+        if (loadings == null) {
+            return ThreePerilNodes.of(correlation, perils, degreesOfFreedom, margins).merged(budget);
+        }
+        boolean sure = Arrays.stream(loadings).allMatch(l -> Math.abs(l) > 1 - 1e-9);
+        if (sure) {
+            boolean[] falling = new boolean[loadings.length];
+            for (int i = 0; i < falling.length; i++) {
+                falling[i] = loadings[i] * loadings[0] < 0;
+            }
+            return OrderedNodes.of(margins, falling);
+        }
+        return FactorNodes.of(loadings, degreesOfFreedom, margins).merged(budget);
+    }
+
+    private static LatentNodes mixture(MixtureCopula mixture, int[] perils, CountMargin[] margins, double budget) {
+        List<LatentNodes> parts = new ArrayList<>();
+        double error = 0;
+        int size = 0;
+        for (int c = 0; c < mixture.components().size(); c++) {
+            parts.add(of(mixture.components().get(c), perils, margins, budget));
+            error += mixture.weights().get(c) * parts.get(c).error();
+            size += parts.get(c).size();
+        }
+        double[] weights = new double[size];
+        double[][][] survival = new double[margins.length][size][];
+        int k = 0;
+        for (int c = 0; c < parts.size(); c++) {
+            LatentNodes part = parts.get(c);
+            for (int j = 0; j < part.size(); j++, k++) {
+                weights[k] = mixture.weights().get(c) * part.weights()[j];
+                for (int i = 0; i < margins.length; i++) {
+                    survival[i][k] = part.survival()[i][j];
+                }
+            }
+        }
+        return new LatentNodes(weights, survival, error);
+    }
+}
