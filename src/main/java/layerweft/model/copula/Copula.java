@@ -33,6 +33,14 @@ public sealed interface Copula
     /** Lower tail dependence λ_L = lim P(U_j ≤ u | U_i ≤ u) as u → 0 of the pair (i, j), i ≠ j. */
     double lowerTail(int i, int j);
 
+    /** Spearman's ρ = 12∫∫C − 3 of the pair (i, j), i ≠ j; to 1e-7 where no closed form is known. */
+    default double spearmanRho(int i, int j) {
+        return SpearmanRho.of(pair(i, j));
+    }
+
+    /** The copula of the pair (i, j), i ≠ j, alone. */
+    Copula pair(int i, int j);
+
     /** A sampler of d variables; immutable, may be shared between threads. */
     ScoreSampler sampler(int dimension);
 }

@@ -1,11 +1,54 @@
 package layerweft.model.copula;
 
+/** C(u) = u_1 · … · u_d. */
 public record Independence() implements Copula {
-    public String label() { throw new UnsupportedOperationException(); }
-    public void requireDimension(int d) { throw new UnsupportedOperationException(); }
-    public double cdf(double... u) { throw new UnsupportedOperationException(); }
-    public double kendallTau(int i, int j) { throw new UnsupportedOperationException(); }
-    public double upperTail(int i, int j) { throw new UnsupportedOperationException(); }
-    public double lowerTail(int i, int j) { throw new UnsupportedOperationException(); }
-    public ScoreSampler sampler(int d) { throw new UnsupportedOperationException(); }
+
+    @Override
+    public String label() {
+        return "independence";
+    }
+
+    /** Any. */
+    @Override
+    public void requireDimension(int dimension) {
+    }
+
+    @Override
+    public double cdf(double... u) {
+        double product = 1;
+        for (double x : u) {
+            product *= x;
+        }
+        return product;
+    }
+
+    @Override
+    public double kendallTau(int i, int j) {
+        return 0;
+    }
+
+    @Override
+    public double upperTail(int i, int j) {
+        return 0;
+    }
+
+    @Override
+    public double lowerTail(int i, int j) {
+        return 0;
+    }
+
+    @Override
+    public double spearmanRho(int i, int j) {
+        return 0;
+    }
+
+    @Override
+    public Copula pair(int i, int j) {
+        return this;
+    }
+
+    @Override
+    public ScoreSampler sampler(int dimension) {
+        return new ExponentialSampler(ExponentialSampler.Kind.INDEPENDENT, dimension);
+    }
 }
