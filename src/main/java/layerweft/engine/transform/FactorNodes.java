@@ -4,6 +4,7 @@ import java.util.Arrays;
 import layerweft.model.copula.Correlation;
 import org.apache.commons.numbers.gamma.Erfc;
 import org.apache.commons.numbers.gamma.LogGamma;
+import org.apache.commons.statistics.distribution.ContinuousDistribution;
 import org.apache.commons.statistics.distribution.NormalDistribution;
 import org.apache.commons.statistics.distribution.TDistribution;
 
@@ -108,7 +109,7 @@ final class FactorNodes {
     }
 
     private static double score(double degreesOfFreedom, double p, double q) {
-        var law = Double.isInfinite(degreesOfFreedom) ? NormalDistribution.of(0, 1) : TDistribution.of(degreesOfFreedom);
+        ContinuousDistribution law = Double.isInfinite(degreesOfFreedom) ? NormalDistribution.of(0, 1) : TDistribution.of(degreesOfFreedom);
         return p < q ? law.inverseCumulativeProbability(p) : law.inverseSurvivalProbability(q);
     }
 

@@ -15,9 +15,10 @@ final class FrailtyNodes {
     private FrailtyNodes() {
     }
 
-    static LatentNodes of(ArchimedeanFamily family, double theta, Generator generator, boolean survival, CountMargin[] margins) {
+    static LatentNodes of(ArchimedeanFamily family, double theta, Generator generator, boolean survival, CountMargin[] margins,
+            double error) {
         double[][] logInverse = logInverses(generator, survival, margins);
-        FrailtyRule rule = rule(family, theta, logInverse);
+        FrailtyRule rule = rule(family, theta, logInverse, error);
         double[][][] conditional = new double[margins.length][rule.logs().length][];
         for (int i = 0; i < margins.length; i++) {
             for (int k = 0; k < rule.logs().length; k++) {
@@ -28,11 +29,12 @@ final class FrailtyNodes {
     }
 
     /** The rule that {@link #of} takes its nodes from. */
-    static FrailtyRule rule(ArchimedeanFamily family, double theta, Generator generator, boolean survival, CountMargin[] margins) {
-        return rule(family, theta, logInverses(generator, survival, margins));
+    static FrailtyRule rule(ArchimedeanFamily family, double theta, Generator generator, boolean survival, CountMargin[] margins,
+            double error) {
+        return rule(family, theta, logInverses(generator, survival, margins), error);
     }
 
-    private static FrailtyRule rule(ArchimedeanFamily family, double theta, double[][] logInverse) {
+    private static FrailtyRule rule(ArchimedeanFamily family, double theta, double[][] logInverse, double error) {
         double least = Double.POSITIVE_INFINITY;
         double most = Double.NEGATIVE_INFINITY;
         for (double[] logs : logInverse) {
@@ -43,8 +45,8 @@ final class FrailtyNodes {
                 }
             }
         }
-        return most == Double.NEGATIVE_INFINITY ? FrailtyRule.of(family, theta, FLAT_BELOW, FLAT_ABOVE)
-                : FrailtyRule.of(family, theta, FLAT_BELOW - most, FLAT_ABOVE - least);
+        return most == Double.NEGATIVE_INFINITY ? FrailtyRule.of(family, theta, FLAT_BELOW, FLAT_ABOVE, error)
+                : FrailtyRule.of(family, theta, FLAT_BELOW - most, FLAT_ABOVE - least, error);
     }
 
     private static double[][] logInverses(Generator generator, boolean survival, CountMargin[] margins) {

@@ -60,15 +60,15 @@ final class GroupedNodes {
         return cost;
     }
 
-    static LatentNodes of(GroupedArchimedean copula, int[] perils, CountMargin[] margins) {
-        return new GroupedNodes(copula, perils, margins).nodes();
+    static LatentNodes of(GroupedArchimedean copula, int[] perils, CountMargin[] margins, double error) {
+        return new GroupedNodes(copula, perils, margins).nodes(error);
     }
 
-    private LatentNodes nodes() {
+    private LatentNodes nodes(double error) {
         // the root's rule is made for the perils one by one: a group is nowhere wider than its members
         double theta = copula.root().theta();
-        LatentNodes flat = FrailtyNodes.of(copula.family(), theta, root, copula.survival(), margins);
-        FrailtyRule rule = FrailtyNodes.rule(copula.family(), theta, root, copula.survival(), margins);
+        LatentNodes flat = FrailtyNodes.of(copula.family(), theta, root, copula.survival(), margins, error);
+        FrailtyRule rule = FrailtyNodes.rule(copula.family(), theta, root, copula.survival(), margins, error);
         List<int[]> branches = branches(copula, perils);
         List<Double> weights = new ArrayList<>();
         List<double[][]> rows = new ArrayList<>();

@@ -21,6 +21,11 @@ final class LatentModel {
     private static final int CHEAP_DIFFERENCES = 6_000;
     /** A pair without a latent factor may take so many. */
     private static final int MOST_DIFFERENCES = 4_000_000;
+    /**
+     * Excess of θ over independence below which a copula is a mean of independence and the one at this excess: the difference is of the
+     * order of WEAK², and a frailty law as narrow as a needle is avoided.
+     */
+    private static final double WEAK = 2e-4;
     private static final int MOST_GROUP_NODES = 3_000;
 
     private LatentModel() {
@@ -57,14 +62,14 @@ final class LatentModel {
     /**
      * @param perils indices in the portfolio of the perils wanted, rising
      * @param margins of these perils
-     * @param budget for the error of joint probabilities when nodes are merged
+     * @param error wanted of joint probabilities of the counts
      */
-    static LatentNodes of(Copula copula, int[] perils, CountMargin[] margins, double budget) {
+    static LatentNodes of(Copula copula, int[] perils, CountMargin[] margins, double error) {
         if (perils.length <= 1 || copula instanceof Independence) {
             return independent(margins);
         }
         if (copula instanceof MixtureCopula mixture) {
-            return mixture(mixture, perils, margins, budget);
+            return mixture(mixture, perils, margins, error);
         }
         if (copula instanceof Comonotonic) {
             return OrderedNodes.of(margins, new boolean[perils.length]);
@@ -73,17 +78,17 @@ final class LatentModel {
             return OrderedNodes.of(margins, new boolean[] {false, true});
         }
         if (copula instanceof Archimedean archimedean) {
-            return archimedean(archimedean, margins, budget);
+            return archimedean(archimedean, margins, error);
         }
         if (copula instanceof GroupedArchimedean grouped) {
-            return perils.length == 2 ? archimedean(grouped.pair(perils[0], perils[1]), margins, budget)
-                    : GroupedNodes.of(grouped, perils, margins).merged(budget);
+            return perils.length == 2 ? archimedean(grouped.pair(perils[0], perils[1]), margins, error)
+                    : GroupedNodes.of(grouped, perils, margins, error).merged(error);
         }
         if (copula instanceof Gaussian gaussian) {
-            return elliptical(gaussian.correlation(), Double.POSITIVE_INFINITY, perils, margins, budget);
+            return elliptical(gaussian.correlation(), Double.POSITIVE_INFINITY, perils, margins, error);
         }
         Student student = (Student) copula;
-        return elliptical(student.correlation(), student.degreesOfFreedom(), perils, margins, budget);
+        return elliptical(student.correlation(), student.degreesOfFreedom(), perils, margins, error);
     }
 
     private static LatentNodes independent(CountMargin[] margins) {
@@ -94,21 +99,27 @@ final class LatentModel {
         return new LatentNodes(new double[] {1}, survival, 0);
     }
 
-    private static LatentNodes archimedean(Archimedean copula, CountMargin[] margins, double budget) {
+    private static LatentNodes archimedean(Archimedean copula, CountMargin[] margins, double error) {
         if (copula.theta() == copula.family().independentTheta()) {
             return independent(margins);
         }
         boolean cheap = margins.length == 2 && DifferencedNodes.cost(margins) <= CHEAP_DIFFERENCES;
         if (cheap || !copula.hasFrailty()) {
-            return DifferencedNodes.of(copula, margins).merged(budget);
+            return DifferencedNodes.of(copula, margins).merged(error);
         }
-        return FrailtyNodes.of(copula.family(), copula.theta(), copula.generator(), copula.survival(), margins).merged(budget);
+        double excess = copula.theta() - copula.family().independentTheta();
+        if (excess < 0.999 * WEAK) {
+            Archimedean stronger = new Archimedean(copula.family(), copula.family().independentTheta() + WEAK, copula.survival());
+            int[] all = java.util.stream.IntStream.range(0, margins.length).toArray();
+            return mixture(new MixtureCopula(List.of(1 - excess / WEAK, excess / WEAK), List.of(new Independence(), stronger)), all, margins, error);
+        }
+        return FrailtyNodes.of(copula.family(), copula.theta(), copula.generator(), copula.survival(), margins, error).merged(error);
     }
 
-    private static LatentNodes elliptical(Correlation correlation, double degreesOfFreedom, int[] perils, CountMargin[] margins, double budget) {
+    private static LatentNodes elliptical(Correlation correlation, double degreesOfFreedom, int[] perils, CountMargin[] margins, double error) {
         double[] loadings = FactorNodes.loadings(correlation, perils);
         if (loadings == null) {
-            return ThreePerilNodes.of(correlation, perils, degreesOfFreedom, margins).merged(budget);
+            return ThreePerilNodes.of(correlation, perils, degreesOfFreedom, margins).merged(error);
         }
         boolean sure = Arrays.stream(loadings).allMatch(l -> Math.abs(l) > 1 - 1e-9);
         if (sure) {
@@ -118,16 +129,16 @@ final class LatentModel {
             }
             return OrderedNodes.of(margins, falling);
         }
-        return FactorNodes.of(loadings, degreesOfFreedom, margins).merged(budget);
+        return FactorNodes.of(loadings, degreesOfFreedom, margins).merged(error);
     }
 
-    private static LatentNodes mixture(MixtureCopula mixture, int[] perils, CountMargin[] margins, double budget) {
+    private static LatentNodes mixture(MixtureCopula mixture, int[] perils, CountMargin[] margins, double error) {
         List<LatentNodes> parts = new ArrayList<>();
-        double error = 0;
+        double total = 0;
         int size = 0;
         for (int c = 0; c < mixture.components().size(); c++) {
-            parts.add(of(mixture.components().get(c), perils, margins, budget));
-            error += mixture.weights().get(c) * parts.get(c).error();
+            parts.add(of(mixture.components().get(c), perils, margins, error));
+            total += mixture.weights().get(c) * parts.get(c).error();
             size += parts.get(c).size();
         }
         double[] weights = new double[size];
@@ -142,6 +153,6 @@ final class LatentModel {
                 }
             }
         }
-        return new LatentNodes(weights, survival, error);
+        return new LatentNodes(weights, survival, total);
     }
 }

@@ -89,7 +89,7 @@ record LatentNodes(double[] weights, double[][][] survival, double error) {
             sum += range;
             sumOfSquares += range * range;
         }
-        return weight * (sum * sum - sumOfSquares) / 8;
+        return Math.abs(weight) * (sum * sum - sumOfSquares) / 8;
     }
 
     private double[] mean(int peril, int start, int end, double weight) {

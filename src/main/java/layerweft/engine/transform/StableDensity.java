@@ -5,39 +5,35 @@ import org.apache.commons.numbers.gamma.LogGamma;
 /**
  * The density of Y = ln V for V positive stable with index α in (0, 1), E[e^(−tV)] = e^(−t^α): the frailty of the Gumbel copula.
  *
- * <p>For α ≥ 0.6 by Humbert's series (1945; Feller 1971, XVII.6), which in y is
- * h(y) = (1/π) Σ_{k≥1} (−1)^(k+1) Γ(kα + 1)/k! · sin(kπα) e^(−kαy). For smaller α by Kanter's representation (1975)
- * V = (A(U)/E)^b, b = (1 − α)/α, U uniform on (0, π), E exponential: h(y) = (1/b)·E[x e^(−x)], x = A(U)e^(−y/b).
+ * <p>In the lower part by Kanter's representation (1975) V = (A(U)/E)^b, b = (1 − α)/α, U uniform on (0, π), E exponential:
+ * h(y) = (1/b)·E[x e^(−x)], x = A(U)e^(−y/b). In the upper part, where A(0)e^(−y/b) is small, by Humbert's series (1945; Feller 1971,
+ * XVII.6), which in y is h(y) = (1/π) Σ_{k≥1} (−1)^(k+1) Γ(kα + 1)/k! · sin(kπα) e^(−kαy).
  */
 final class StableDensity {
-    private static final double SERIES_FROM = 0.6;
+    /** ln(A(0)e^(−y/b)) from which the integral takes over from the series. */
+    private static final double INTEGRAL_FROM = -1;
     private final double alpha;
     private final double b;
-    /** Series: coefficients; integral: A(u_j). */
-    private final double[] first;
-    /** Integral: weights. */
-    private final double[] second;
+    private final double[] series;
+    private final double[] logA;
+    private final double[] weights;
 
     StableDensity(double alpha) {
         this.alpha = alpha;
         this.b = (1 - alpha) / alpha;
-        if (alpha >= SERIES_FROM) {
-            first = coefficients(alpha);
-            second = null;
-        } else {
-            int half = 42;
-            double step = 0.08;
-            first = new double[2 * half + 1];
-            second = new double[2 * half + 1];
-            for (int j = -half; j <= half; j++) {
-                // tanh-sinh rule (Takahasi & Mori 1974) for u in (0, π), the distance to π kept exact
-                double s = Math.PI / 2 * Math.sinh(j * step);
-                double u = Math.PI / (1 + Math.exp(-2 * s));
-                double toEnd = Math.PI / (1 + Math.exp(2 * s));
-                double cosh = Math.cosh(s);
-                first[j + half] = logA(u, toEnd);
-                second[j + half] = step * Math.PI / 4 * Math.cosh(j * step) / (cosh * cosh);
-            }
+        series = coefficients(alpha);
+        int half = 84;
+        double step = 0.04;
+        logA = new double[2 * half + 1];
+        weights = new double[2 * half + 1];
+        for (int j = -half; j <= half; j++) {
+            // tanh-sinh rule (Takahasi & Mori 1974) for u in (0, π), the distance to π kept exact
+            double s = Math.PI / 2 * Math.sinh(j * step);
+            double u = Math.PI / (1 + Math.exp(-2 * s));
+            double toEnd = Math.PI / (1 + Math.exp(2 * s));
+            double cosh = Math.cosh(s);
+            logA[j + half] = logA(u, toEnd);
+            weights[j + half] = step * Math.PI / 4 * Math.cosh(j * step) / (cosh * cosh);
         }
     }
 
@@ -63,30 +59,26 @@ final class StableDensity {
     }
 
     double of(double y) {
-        return second == null ? series(y) : integral(y);
+        return logLeast() - y / b > INTEGRAL_FROM ? integral(y) : series(y);
     }
 
     private double series(double y) {
         double ratio = Math.exp(-alpha * y);
         double power = 1;
         double sum = 0;
-        for (int k = 1; k < first.length; k++) {
+        for (int k = 1; k < series.length && power > 1e-40; k++) {
             power *= ratio;
-            double term = first[k] * power;
-            sum += term;
-            if (power < 1e-40) {
-                break;
-            }
+            sum += series[k] * power;
         }
         return Math.max(0, sum);
     }
 
     private double integral(double y) {
         double sum = 0;
-        for (int j = 0; j < first.length; j++) {
-            double logX = first[j] - y / b;
-            if (logX < 4 && second[j] > 0) {
-                sum += second[j] * Math.exp(logX - Math.exp(logX));
+        for (int j = 0; j < logA.length; j++) {
+            double logX = logA[j] - y / b;
+            if (logX < 4) {
+                sum += weights[j] * Math.exp(logX - Math.exp(logX));
             }
         }
         return sum / b;
