@@ -72,10 +72,10 @@ final class LatentModel {
             return mixture(mixture, perils, margins, error);
         }
         if (copula instanceof Comonotonic) {
-            return OrderedNodes.of(margins, new boolean[perils.length]);
+            return OrderedNodes.of(margins, new boolean[perils.length]).nodes(margins);
         }
         if (copula instanceof Countermonotonic) {
-            return OrderedNodes.of(margins, new boolean[] {false, true});
+            return OrderedNodes.of(margins, new boolean[] {false, true}).nodes(margins);
         }
         if (copula instanceof Archimedean archimedean) {
             return archimedean(archimedean, margins, error);
@@ -89,6 +89,12 @@ final class LatentModel {
         }
         Student student = (Student) copula;
         return elliptical(student.correlation(), student.degreesOfFreedom(), perils, margins, error);
+    }
+
+    /** The same for amounts on a lattice, with many thresholds each: by the latent factor wherever there is one. */
+    static LatentNodes ofAmounts(Copula copula, int[] members, CountMargin[] margins, double error) {
+        Copula joint = copula instanceof GroupedArchimedean grouped ? grouped.pair(members[0], members[1]) : copula;
+        return of(joint, members, margins, error);
     }
 
     private static LatentNodes independent(CountMargin[] margins) {
@@ -127,7 +133,7 @@ final class LatentModel {
             for (int i = 0; i < falling.length; i++) {
                 falling[i] = loadings[i] * loadings[0] < 0;
             }
-            return OrderedNodes.of(margins, falling);
+            return OrderedNodes.of(margins, falling).nodes(margins);
         }
         return FactorNodes.of(loadings, degreesOfFreedom, margins).merged(error);
     }

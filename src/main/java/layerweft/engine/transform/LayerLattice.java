@@ -23,8 +23,13 @@ final class LayerLattice {
     private Level atoms;
     private double reach = 1.6;
 
-    /** One lattice with the transforms on it. */
-    record Level(double step, int wanted, Spectrum spectrum, double[][][] deficits, double[] never) {}
+    /**
+     * One lattice with the transforms on it.
+     *
+     * @param wanted cells of the annual sum
+     * @param lost by peril: what a law fused to the lattice lacks of the mean, or the chance that an event's loss is no atom; else null
+     */
+    record Level(double step, int wanted, Spectrum spectrum, double[][][] deficits, double[] lost) {}
 
     /**
      * @param events of the perils that can reach the layer, in their order
@@ -37,6 +42,18 @@ final class LayerLattice {
         this.end = end;
         double[] landmarks = events.stream().flatMapToDouble(e -> DoubleStream.of(e.landmarks())).distinct().toArray();
         this.firstStep = LatticeStep.of(cap, terms, landmarks, end, FIRST_CELLS);
+    }
+
+    private LayerLattice(LayerLattice whole, EventLaw event) {
+        this.events = List.of(event);
+        this.cap = whole.cap;
+        this.end = whole.end;
+        this.firstStep = whole.firstStep;
+    }
+
+    /** The same lattice for the sum of one peril's events alone. */
+    LayerLattice of(EventLaw event) {
+        return new LayerLattice(this, event);
     }
 
     double end() {
@@ -78,13 +95,7 @@ final class LayerLattice {
 
     /** Cell averages of P(A' &gt; y) for the law of A from event laws below the true ones in increasing convex order. */
     double[] lowerSum(LatentNodes nodes, int level) {
-        while (lower.size() <= level) {
-            lower.add(null);
-        }
-        if (lower.get(level) == null) {
-            lower.set(level, make(step(level), e -> e.lowerSurvival(step(level), LatticeStep.cells(cap, step(level))), level));
-        }
-        return survival(nodes, lower.get(level));
+        return survival(nodes, lower(level));
     }
 
     /** The same for event laws rounded down and up. */
@@ -95,6 +106,33 @@ final class LayerLattice {
             sums[side] = survival(nodes, make(step(level), e -> e.roundedSurvival(step(level), LatticeStep.cells(cap, step(level)))[s], level));
         }
         return sums;
+    }
+
+    /** E[A] less the mean of the sum behind {@link #lowerSum}, for events capped at the cap. */
+    double lostMean(int level, double[] meanCounts) {
+        double lost = 0;
+        for (int i = 0; i < meanCounts.length; i++) {
+            lost += meanCounts[i] * lower(level).lost[i];
+        }
+        return lost;
+    }
+
+    private Level lower(int level) {
+        while (lower.size() <= level) {
+            lower.add(null);
+        }
+        if (lower.get(level) == null) {
+            double step = step(level);
+            int cells = LatticeStep.cells(cap, step);
+            double[] lost = new double[events.size()];
+            for (int i = 0; i < lost.length; i++) {
+                double whole = Arrays.stream(events.get(i).cellSurvival(step, cells)).sum();
+                lost[i] = Math.max(0, step * (whole - Arrays.stream(events.get(i).lowerSurvival(step, cells)).sum()));
+            }
+            Level made = make(step, e -> e.lowerSurvival(step, cells), level);
+            lower.set(level, new Level(step, made.wanted, made.spectrum, made.deficits, lost));
+        }
+        return lower.get(level);
     }
 
     private double[] survival(LatentNodes nodes, Level at) {
@@ -134,7 +172,7 @@ final class LayerLattice {
 
     /**
      * The atoms' own lattice: their event laws, with the rest of each law at infinity. Where all perils have atoms at 0 and at the cap
-     * only, its step is the cap. {@code never} is the chance that an event's loss is no atom.
+     * only, its step is the cap.
      */
     private Level atoms() {
         if (atoms == null) {
@@ -190,7 +228,7 @@ final class LayerLattice {
         Level at = atoms();
         double[][] deficit = JointDeficit.of(nodes, at.deficits);
         // a year with any loss that is no atom is no atom: U at infinity, taken off before the inverse transform
-        double constant = JointDeficit.at(nodes, at.never);
+        double constant = JointDeficit.at(nodes, at.lost);
         for (int j = 0; j < deficit[0].length; j++) {
             deficit[0][j] -= constant;
         }

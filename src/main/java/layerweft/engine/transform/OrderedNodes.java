@@ -2,64 +2,65 @@ package layerweft.engine.transform;
 
 import java.util.Arrays;
 
-/** Exact nodes where one uniform decides everything: between two steps of the perils' quantile functions all counts are fixed. */
-final class OrderedNodes {
-
-    private OrderedNodes() {
-    }
+/**
+ * Where one uniform decides everything: between two steps of the perils' quantile functions all counts are fixed, and nodes are exact.
+ *
+ * @param weights of the intervals between steps
+ * @param counts interval × peril
+ */
+record OrderedNodes(double[] weights, int[][] counts) {
 
     /** @param falling for each peril whether its count falls in the common uniform (countermonotonic) */
-    static LatentNodes of(CountMargin[] margins, boolean[] falling) {
-        // steps are measured from whichever end they are nearer to, so that rare counts keep their probabilities
-        double[] steps = new double[Arrays.stream(margins).mapToInt(CountMargin::size).sum() + 1];
-        double[] toEnd = new double[steps.length];
+    static OrderedNodes of(CountMargin[] margins, boolean[] falling) {
+        // each step both as a distance from 0 and from 1, so that rare counts keep their probabilities
+        int total = Arrays.stream(margins).mapToInt(CountMargin::size).sum();
+        double[] from = new double[total];
+        double[] toEnd = new double[total];
+        int[] peril = new int[total];
         int s = 0;
         for (int i = 0; i < margins.length; i++) {
             for (int n = 0; n < margins[i].size(); n++) {
-                steps[s] = falling[i] ? margins[i].survival()[n] : margins[i].cdf()[n];
-                toEnd[s++] = falling[i] ? margins[i].cdf()[n] : margins[i].survival()[n];
+                from[s] = falling[i] ? margins[i].survival()[n] : margins[i].cdf()[n];
+                toEnd[s] = falling[i] ? margins[i].cdf()[n] : margins[i].survival()[n];
+                peril[s++] = i;
             }
         }
-        steps[s] = 1;
-        Arrays.sort(steps);
-        Arrays.sort(toEnd);
-        double[] weights = new double[steps.length];
-        double[][][] survival = new double[margins.length][steps.length][];
+        Integer[] order = new Integer[total];
+        Arrays.setAll(order, k -> k);
+        Arrays.sort(order, (a, b) -> from[a] != from[b] ? Double.compare(from[a], from[b]) : Double.compare(toEnd[b], toEnd[a]));
+        int[] now = new int[margins.length];
+        for (int i = 0; i < now.length; i++) {
+            now[i] = falling[i] ? margins[i].size() : 0;
+        }
+        double[] weights = new double[total + 1];
+        int[][] counts = new int[total + 1][];
+        double last = 0;
+        double lastToEnd = 1;
         int kept = 0;
-        for (int k = 0; k < steps.length; k++) {
-            double from = k == 0 ? 0 : steps[k - 1];
-            double fromEnd = k == 0 ? 1 : toEnd[steps.length - k];
-            double weight = from < 0.5 ? steps[k] - from : fromEnd - toEnd[steps.length - 1 - k];
-            if (weight <= 0) {
-                continue;
+        for (int k = 0; k <= total; k++) {
+            double next = k == total ? 1 : from[order[k]];
+            double nextToEnd = k == total ? 0 : toEnd[order[k]];
+            double weight = next < 0.5 ? next - last : lastToEnd - nextToEnd;
+            if (weight > 0) {
+                weights[kept] = weight;
+                counts[kept++] = now.clone();
+                last = next;
+                lastToEnd = nextToEnd;
             }
-            weights[kept] = weight;
-            for (int i = 0; i < margins.length; i++) {
-                survival[i][kept] = DifferencedNodes.sure(count(margins[i], falling[i], from, fromEnd, weight), margins[i].size());
+            if (k < total) {
+                now[peril[order[k]]] += falling[peril[order[k]]] ? -1 : 1;
             }
-            kept++;
         }
+        return new OrderedNodes(Arrays.copyOf(weights, kept), Arrays.copyOf(counts, kept));
+    }
+
+    LatentNodes nodes(CountMargin[] margins) {
+        double[][][] survival = new double[margins.length][weights.length][];
         for (int i = 0; i < margins.length; i++) {
-            survival[i] = Arrays.copyOf(survival[i], kept);
+            for (int k = 0; k < weights.length; k++) {
+                survival[i][k] = DifferencedNodes.sure(counts[k][i], margins[i].size());
+            }
         }
-        return new LatentNodes(Arrays.copyOf(weights, kept), survival, 0);
-    }
-
-    /** The count on the interval that starts at u = from: how many thresholds lie at or before it. */
-    private static int count(CountMargin margin, boolean falling, double from, double fromEnd, double weight) {
-        int n = 0;
-        while (n < margin.size() && (falling ? above(margin.cdf()[n], fromEnd, weight) : passed(margin, n, from, fromEnd))) {
-            n++;
-        }
-        return n;
-    }
-
-    private static boolean passed(CountMargin margin, int n, double from, double fromEnd) {
-        return from < 0.5 ? margin.cdf()[n] <= from : margin.survival()[n] >= fromEnd;
-    }
-
-    /** With u falling, N > n while 1 − u > F(n): on the whole interval when its far end still is. */
-    private static boolean above(double cdf, double fromEnd, double weight) {
-        return cdf <= fromEnd - weight * (1 - 1e-9);
+        return new LatentNodes(weights, survival, 0);
     }
 }
