@@ -23,7 +23,9 @@ final class LayerAnswer {
     private final LatticeSum[] levels = new LatticeSum[3];
     private int start;
     private SumFacts facts;
-    private Figure[] figures;
+    private Figure[] means;
+    /** Error of the expected loss that a finer lattice makes smaller. */
+    private double latticeError;
 
     /** @param start level to begin with, where an earlier answer for this layer ended */
     LayerAnswer(AnnualSums sums, LayerTerms terms, Programme programme, Accuracy accuracy, int start) {
@@ -59,7 +61,7 @@ final class LayerAnswer {
         }
         compute();
         double wanted = accuracy.relative() * scale();
-        while (figures[0].error() > wanted && 2L * sums.cells(start + 2) <= accuracy.mostCells()) {
+        while (latticeError > wanted && 2L * sums.cells(start + 2) <= accuracy.mostCells()) {
             start++;
             levels[0] = levels[1];
             levels[1] = levels[2];
@@ -83,51 +85,65 @@ final class LayerAnswer {
     private void compute() {
         facts = sums.facts(levels[2]);
         Loading loading = programme.pricing().loading();
-        List<Double> asked = programme.buyer().levels();
         double[][] rows = new double[3][];
         for (int k = 0; k < 3; k++) {
-            rows[k] = new LevelFigures(levels[k], terms, facts, sums.end()).row(loading, asked, programme.buyer().tailLevel());
+            rows[k] = figures(levels[k]).means(loading, programme.buyer().tailLevel());
         }
-        figures = new Figure[rows[0].length];
-        double depth = sums.end() - terms.deductible();
+        means = new Figure[rows[0].length];
+        double floor = (sums.jointError() + levels[2].noise()) * (sums.end() - terms.deductible());
+        for (int f = 0; f < means.length; f++) {
+            means[f] = Extrapolation.of(rows[0][f], rows[1][f], rows[2][f], floor);
+        }
+        latticeError = means[0].error() - floor;
+    }
+
+    private LevelFigures figures(LatticeSum sum) {
+        return new LevelFigures(sum, terms, facts, sums.end());
+    }
+
+    /** Point values of the two finest lattices, each corrected by the one below it. */
+    private Figure[] points() {
+        double[] fine = figures(levels[2].corrected(levels[1])).points(programme.buyer().levels());
+        double[] coarse = figures(levels[1].corrected(levels[0])).points(programme.buyer().levels());
+        Figure[] points = new Figure[fine.length];
         double probability = sums.jointError() + levels[2].noise();
-        for (int f = 0; f < figures.length; f++) {
-            boolean isProbability = f == 2 || f == 3;
-            double floor = isProbability ? probability : f >= 8 ? levels[2].step() * 1e-3 : probability * depth;
-            figures[f] = Extrapolation.of(rows[0][f], rows[1][f], rows[2][f], floor);
+        for (int f = 0; f < fine.length; f++) {
+            points[f] = new Figure(fine[f], Math.abs(fine[f] - coarse[f]) + (f < 2 ? probability : 1e-6 * levels[2].step()));
         }
+        return points;
     }
 
     LayerStatistics statistics() {
         List<Double> asked = programme.buyer().levels();
+        Figure[] points = points();
         SortedMap<Double, Figure> valueAtRisk = new TreeMap<>();
         SortedMap<Double, Figure> occurrence = new TreeMap<>();
         for (int k = 0; k < asked.size(); k++) {
-            Figure v = figures[8 + k];
+            Figure v = points[2 + k];
             valueAtRisk.put(asked.get(k), new Figure(Math.min(Math.max(0, v.value()), terms.annualLimit()), v.error()));
             double largest = sums.largestEvent(asked.get(k));
             occurrence.put(asked.get(k), Double.isNaN(largest) ? Figure.UNDEFINED : new Figure(largest, 1e-12 * largest));
         }
-        Figure mean = positive(figures[0]);
+        Figure mean = positive(means[0]);
         Bracket bracket = Double.isInfinite(mean.value()) ? null : sums.bracket(start + 2, levels[2]);
-        PremiumBuildUp premium = PremiumBuildUp.of(programme.pricing(), new PremiumBuildUp.Inputs(mean.value(), figures[1].value(),
-                figures[6].value(), figures[5].value(), figures[4].value()));
+        PremiumBuildUp premium = PremiumBuildUp.of(programme.pricing(), new PremiumBuildUp.Inputs(mean.value(), means[1].value(),
+                means[4].value(), means[3].value(), means[2].value()));
         double premiumError = error(premium.slopes());
-        return new LayerStatistics(Engine.TRANSFORM, mean, bracket, positive(figures[1]), probability(figures[2]),
-                probability(figures[3]), Figure.exact(facts.expectedEvents()), positive(figures[4]),
+        return new LayerStatistics(Engine.TRANSFORM, mean, bracket, positive(means[1]), probability(points[0]),
+                probability(points[1]), Figure.exact(facts.expectedEvents()), positive(means[2]),
                 new Figure(premium.net(), netError(premium, premiumError)), new Figure(premium.upfront(), premiumError), valueAtRisk,
-                positive(figures[7]), occurrence);
+                positive(means[5]), occurrence);
     }
 
     private double error(PremiumBuildUp.Slopes slopes) {
-        return part(slopes.byExpectedLoss(), figures[0]) + part(slopes.byStandardDeviation(), figures[1]) + part(slopes.byTail(), figures[6])
-                + part(slopes.byDistorted(), figures[5]) + part(slopes.byReinstatementFactor(), figures[4]);
+        return part(slopes.byExpectedLoss(), means[0]) + part(slopes.byStandardDeviation(), means[1]) + part(slopes.byTail(), means[4])
+                + part(slopes.byDistorted(), means[3]) + part(slopes.byReinstatementFactor(), means[2]);
     }
 
     /** The net premium is the upfront one without the divisor, and does not move with the reinstatement factor. */
     private double netError(PremiumBuildUp premium, double upfrontError) {
         double divisor = premium.upfront() == 0 ? 1 : premium.net() / premium.upfront();
-        return Math.max(0, upfrontError - part(premium.slopes().byReinstatementFactor(), figures[4])) * divisor;
+        return Math.max(0, upfrontError - part(premium.slopes().byReinstatementFactor(), means[2])) * divisor;
     }
 
     private static double part(double slope, Figure figure) {
