@@ -28,13 +28,8 @@ public record Accuracy(double relative, int mostCells) {
         return relative * 1e-3;
     }
 
-    /** Error allowed for merging latent nodes, of the same joint probabilities; it is bounded, not estimated. */
-    double ofMerging() {
-        return relative * 2e-2;
-    }
-
     /** Counts are cut where this part of their probability is left. */
     double ofCounts() {
-        return relative * 1e-4;
+        return relative * 1e-6;
     }
 }

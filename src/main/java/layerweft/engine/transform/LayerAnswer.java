@@ -14,8 +14,14 @@ import layerweft.model.treaty.Programme;
 
 /** Refines a layer's lattices until its expected loss is as good as wanted and writes down its figures with their errors. */
 final class LayerAnswer {
-    /** Below this part of P(A &gt; 0) the deductible asks for transforms that keep more digits. */
+    /** Below these parts of P(A &gt; 0) the deductible or the end of the layer asks for transforms that keep more digits. */
     private static final double RARE = 1e-3;
+    /** Errors of figures measured by themselves may be so many times larger than the accuracy: they are stated with much to spare. */
+    private static final double OWN_SIZE = 30;
+    /** Values at risk may have errors so many times the accuracy, of themselves. */
+    private static final double QUANTILES = 1000;
+    private static final int CHEAP_CELLS = 4096;
+    private static final double RARELY_FULL = 3e-6;
     private final AnnualSums sums;
     private final LayerTerms terms;
     private final Programme programme;
@@ -24,8 +30,9 @@ final class LayerAnswer {
     private int start;
     private SumFacts facts;
     private Figure[] means;
-    /** Error of the expected loss that a finer lattice makes smaller. */
-    private double latticeError;
+    private Figure[] points;
+    /** Errors of the means that a finer lattice makes smaller. */
+    private double[] latticeError;
 
     /** @param start level to begin with, where an earlier answer for this layer ended */
     LayerAnswer(AnnualSums sums, LayerTerms terms, Programme programme, Accuracy accuracy, int start) {
@@ -60,8 +67,7 @@ final class LayerAnswer {
             }
         }
         compute();
-        double wanted = accuracy.relative() * scale();
-        while (latticeError > wanted && 2L * sums.cells(start + 2) <= accuracy.mostCells()) {
+        while (!good() && 2L * sums.cells(start + 2) <= accuracy.mostCells()) {
             start++;
             levels[0] = levels[1];
             levels[1] = levels[2];
@@ -70,10 +76,28 @@ final class LayerAnswer {
         }
     }
 
+    /** Whether the lattice's part of the errors is small: of the limit for the expected loss, and, while that is cheap, of each figure itself. */
+    private boolean good() {
+        if (latticeError[0] > accuracy.relative() * scale()) {
+            return false;
+        }
+        double part = OWN_SIZE * accuracy.relative();
+        boolean cheap = 2L * sums.cells(start + 2) <= CHEAP_CELLS;
+        for (int k = 2; cheap && k < points.length; k++) {
+            if (points[k].error() > QUANTILES * accuracy.relative() * points[k].value() + 1e-5 * levels[2].step()) {
+                return false;
+            }
+        }
+        return !cheap || latticeError[0] <= part * Math.abs(means[0].value()) && latticeError[1] <= part * means[1].value()
+                && points[0].error() <= part * points[0].value() + floor() && points[1].error() <= 2 * part * points[1].value() + floor();
+    }
+
     private boolean rare() {
         double[] mean = levels[2].mean();
         int at = Math.min(mean.length - 1, (int) (terms.deductible() / levels[2].step()));
-        return terms.deductible() > 0 && mean.length > 0 && mean[at] < RARE * mean[0];
+        int last = Math.min(mean.length, sums.cells(start + 2)) - 1;
+        return terms.deductible() > 0 && mean[at] < RARE * mean[0]
+                || terms.annualLimit() < Double.POSITIVE_INFINITY && mean[last] < RARELY_FULL * mean[0];
     }
 
     /** What errors are measured by: L, M where there is no L, the expected loss where there is neither. */
@@ -90,11 +114,19 @@ final class LayerAnswer {
             rows[k] = figures(levels[k]).means(loading, programme.buyer().tailLevel());
         }
         means = new Figure[rows[0].length];
-        double floor = (sums.jointError() + levels[2].noise()) * (sums.end() - terms.deductible());
+        latticeError = new double[means.length];
+        double floor = floor() * (sums.end() - terms.deductible());
         for (int f = 0; f < means.length; f++) {
-            means[f] = Extrapolation.of(rows[0][f], rows[1][f], rows[2][f], floor);
+            Figure figure = Extrapolation.of(rows[0][f], rows[1][f], rows[2][f]);
+            latticeError[f] = figure.error();
+            means[f] = new Figure(figure.value(), figure.error() + floor);
         }
-        latticeError = means[0].error() - floor;
+        points = points();
+    }
+
+    /** Error of probabilities that no lattice removes. */
+    private double floor() {
+        return sums.jointError() + levels[2].noise();
     }
 
     private LevelFigures figures(LatticeSum sum) {
@@ -106,7 +138,7 @@ final class LayerAnswer {
         double[] fine = figures(levels[2].corrected(levels[1])).points(programme.buyer().levels());
         double[] coarse = figures(levels[1].corrected(levels[0])).points(programme.buyer().levels());
         Figure[] points = new Figure[fine.length];
-        double probability = sums.jointError() + levels[2].noise();
+        double probability = floor();
         for (int f = 0; f < fine.length; f++) {
             points[f] = new Figure(fine[f], Math.abs(fine[f] - coarse[f]) + (f < 2 ? probability : 1e-6 * levels[2].step()));
         }
@@ -115,7 +147,6 @@ final class LayerAnswer {
 
     LayerStatistics statistics() {
         List<Double> asked = programme.buyer().levels();
-        Figure[] points = points();
         SortedMap<Double, Figure> valueAtRisk = new TreeMap<>();
         SortedMap<Double, Figure> occurrence = new TreeMap<>();
         for (int k = 0; k < asked.size(); k++) {
