@@ -47,6 +47,13 @@ final class CountSums implements AnnualSums {
     }
 
     @Override
+    public double weightOfErrors() {
+        boolean limited = layer.terms().annualLimit() < Double.POSITIVE_INFINITY;
+        double depth = limited ? end() - layer.terms().deductible() : layer.terms().deductible();
+        return Math.min(depth, layer.weightOfCounts());
+    }
+
+    @Override
     public double largestEvent(double level) {
         return new LargestEvent(layer.events(), nodes, layer.terms()).quantile(level);
     }
@@ -63,7 +70,7 @@ final class CountSums implements AnnualSums {
     @Override
     public Bracket bracket(int level, LatticeSum finest) {
         LayerTerms terms = layer.terms();
-        double slack = (SAFETY * jointError() + 2 * finest.noise()) * (end() - terms.deductible()) * Math.max(1, layer.events().size() - 1);
+        double slack = (SAFETY * jointError() * Math.max(1, layer.events().size() - 1) + 2 * finest.noise()) * weightOfErrors();
         if (layer.events().isEmpty()) {
             return new Bracket(0, 0);
         }

@@ -115,11 +115,11 @@ final class LayerAnswer {
         }
         means = new Figure[rows[0].length];
         latticeError = new double[means.length];
-        double floor = floor() * (sums.end() - terms.deductible());
+        double floor = floor() * sums.weightOfErrors();
         for (int f = 0; f < means.length; f++) {
             Figure figure = Extrapolation.of(rows[0][f], rows[1][f], rows[2][f]);
             latticeError[f] = figure.error();
-            means[f] = new Figure(figure.value(), figure.error() + floor);
+            means[f] = new Figure(figure.value(), figure.error() + (f == 0 ? floor : Math.max(floor, floor() * (sums.end() - terms.deductible()))));
         }
         points = points();
     }

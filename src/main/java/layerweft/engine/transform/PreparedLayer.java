@@ -106,6 +106,18 @@ record PreparedLayer(LayerTerms terms, int[] perils, List<EventLaw> events, Even
         return Math.max(terms.deductible(), 0) + end + 4 * cap;
     }
 
+    /**
+     * How much an error of 1 in every joint probability of counts can move the mean annual sum: by Abel summation the largest count
+     * times the mean of one event, peril by peril.
+     */
+    double weightOfCounts() {
+        double weight = 0;
+        for (int i = 0; i < meanCounts.length; i++) {
+            weight += (meanCounts[i] + 12 * Math.sqrt(meanCounts[i]) + 12) * Math.min(moments[i].mean(), events.get(i).cap());
+        }
+        return weight;
+    }
+
     /** Error of the perils' chances to hit or exhaust, over a year. */
     double chanceError() {
         double error = 0;

@@ -114,13 +114,10 @@ final class SplitEvent implements EventLaw {
     private double[] averages(SeverityModel severity, double step, int cells) {
         double q = terms.quotaShare();
         double[] mean = new double[cells];
-        double limited = 0;
         for (int k = 0; k < cells; k++) {
-            double next = severity.limitedMean((k + 1) * step / q);
             double right = severity.survival((k + 1) * step / q);
             double left = severity.survival(k * step / q);
-            mean[k] = Math.min(left, Math.max(right, q * (next - limited) / step));
-            limited = next;
+            mean[k] = left <= right ? left : Math.min(left, Math.max(right, severity.layerMean(k * step / q, (k + 1) * step / q) * q / step));
         }
         return mean;
     }

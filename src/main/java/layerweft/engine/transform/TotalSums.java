@@ -147,6 +147,11 @@ final class TotalSums implements AnnualSums {
     }
 
     @Override
+    public double weightOfErrors() {
+        return end() - layer.terms().deductible();
+    }
+
+    @Override
     public double jointError() {
         return 100 * JOINT_ERROR + layer.cutCounts() + layer.chanceError();
     }
