@@ -1,0 +1,37 @@
+package layerweft.engine.transform;
+
+import layerweft.figures.Bracket;
+
+/** A layer's annual sum A of occurrence losses under one copula, on lattices of any level, with what else is known of it. */
+interface AnnualSums {
+
+    /** A on the lattice of a level. */
+    LatticeSum sum(int level);
+
+    /** Cells of the lattice of a level. */
+    int cells(int level);
+
+    /** Where the lattice ends: D + M, or above all that matters where there is no M. */
+    double end();
+
+    SumFacts facts(LatticeSum finest);
+
+    /**
+     * A range that holds E[Y], from the lattice of a level.
+     *
+     * @param finest the sum on that level
+     */
+    Bracket bracket(int level, LatticeSum finest);
+
+    /** Largest error of joint probabilities of what the copula joins. */
+    double jointError();
+
+    /** Bound on what an error of 1 in the joint probabilities, as {@link #jointError}, would do to E[Y]. */
+    double weightOfErrors();
+
+    /** The year's largest event at a level; NaN where the model leaves it open. */
+    double largestEvent(double level);
+
+    /** Asks for lattices that keep the digits of rare sums; false where they already do. */
+    boolean sharpen();
+}

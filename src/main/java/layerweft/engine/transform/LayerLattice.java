@@ -1,0 +1,245 @@
+package layerweft.engine.transform;
+
+import java.util.ArrayList;
+import java.util.Arrays;
+import java.util.List;
+import java.util.stream.DoubleStream;
+
+/**
+ * What a layer's annual sum needs that does not depend on the copula, level by level of refinement (level k halves the step of level
+ * k − 1): the transforms of the perils' event laws. Made once, used for every copula.
+ */
+final class LayerLattice {
+    /** Cells up to the cap at level 0, at least. */
+    private static final int FIRST_CELLS = 16;
+    /** Cells kept beyond the end, for one-sided slopes there. */
+    private static final int MARGIN = 4;
+    private final List<EventLaw> events;
+    private final double cap;
+    private final double end;
+    private final double firstStep;
+    private final List<Level> levels = new ArrayList<>();
+    private final List<Level> lower = new ArrayList<>();
+    private Level atoms;
+    private double reach = 1.6;
+
+    /**
+     * One lattice with the transforms on it.
+     *
+     * @param wanted cells of the annual sum
+     * @param lost by peril: what a law fused to the lattice lacks of the mean, or the chance that an event's loss is no atom; else null
+     */
+    record Level(double step, int wanted, Spectrum spectrum, double[][][] deficits, double[] lost) {}
+
+    /**
+     * @param events of the perils that can reach the layer, in their order
+     * @param end the annual sum matters up to here
+     * @param terms finite amounts at which the annual terms bend
+     */
+    LayerLattice(List<EventLaw> events, double cap, double end, double[] terms) {
+        this.events = events;
+        this.cap = cap;
+        this.end = end;
+        double[] landmarks = events.stream().flatMapToDouble(e -> DoubleStream.of(e.landmarks())).distinct().toArray();
+        this.firstStep = LatticeStep.of(cap, terms, landmarks, end, FIRST_CELLS);
+    }
+
+    private LayerLattice(LayerLattice whole, EventLaw event) {
+        this.events = List.of(event);
+        this.cap = whole.cap;
+        this.end = whole.end;
+        this.firstStep = whole.firstStep;
+    }
+
+    /** The same lattice for the sum of one peril's events alone. */
+    LayerLattice of(EventLaw event) {
+        return new LayerLattice(this, event);
+    }
+
+    double end() {
+        return end;
+    }
+
+    double step(int level) {
+        return firstStep / (1 << level);
+    }
+
+    /** Cells of the annual sum at a level. */
+    int cells(int level) {
+        return LatticeStep.cells(end, step(level));
+    }
+
+    /** Asks for longer transforms with less tilt: the digits of rare sums far up the lattice need them. */
+    void reachFurther() {
+        if (reach < 4) {
+            reach = 4;
+            levels.clear();
+            lower.clear();
+        }
+    }
+
+    boolean reachesFar() {
+        return reach >= 4;
+    }
+
+    /**
+     * A on the lattice of a level, with mass spread to the lattice points.
+     *
+     * @param atomSurvival from {@link #atomSurvival}
+     */
+    LatticeSum sum(LatentNodes nodes, int level, double[] atomSurvival) {
+        Level at = level(level);
+        double[] mean = survival(nodes, at);
+        double top = mean.length > 0 ? mean[0] : 0;
+        double wrapped = Math.exp(-at.spectrum.tilt() * at.spectrum.length()) * Math.max(0, mean[mean.length - 1]);
+        double rounding = 2e-16 * top * Math.exp(at.spectrum.tilt() * at.wanted);
+        return new LatticeSum(at.step, mean, atoms().step, atomSurvival, wrapped + rounding);
+    }
+
+    /** Cell averages of P(A' &gt; y) for the law of A from event laws below the true ones in increasing convex order. */
+    double[] lowerSum(LatentNodes nodes, int level) {
+        return survival(nodes, lower(level));
+    }
+
+    /** The same for event laws rounded down and up. */
+    double[][] roundedSums(LatentNodes nodes, int level) {
+        double[][] sums = new double[2][];
+        for (int side = 0; side < 2; side++) {
+            int s = side;
+            sums[side] = survival(nodes, make(step(level), e -> e.roundedSurvival(step(level), LatticeStep.cells(cap, step(level)))[s], level));
+        }
+        return sums;
+    }
+
+    /** E[A] less the mean of the sum behind {@link #lowerSum}, for events capped at the cap. */
+    double lostMean(int level, double[] meanCounts) {
+        double lost = 0;
+        for (int i = 0; i < meanCounts.length; i++) {
+            lost += meanCounts[i] * lower(level).lost[i];
+        }
+        return lost;
+    }
+
+    private Level lower(int level) {
+        while (lower.size() <= level) {
+            lower.add(null);
+        }
+        if (lower.get(level) == null) {
+            double step = step(level);
+            int cells = LatticeStep.cells(cap, step);
+            double[] lost = new double[events.size()];
+            for (int i = 0; i < lost.length; i++) {
+                double whole = Arrays.stream(events.get(i).cellSurvival(step, cells)).sum();
+                lost[i] = Math.max(0, step * (whole - Arrays.stream(events.get(i).lowerSurvival(step, cells)).sum()));
+            }
+            Level made = make(step, e -> e.lowerSurvival(step, cells), level);
+            lower.set(level, new Level(step, made.wanted, made.spectrum, made.deficits, lost));
+        }
+        return lower.get(level);
+    }
+
+    private double[] survival(LatentNodes nodes, Level at) {
+        double[][] deficit = JointDeficit.of(nodes, at.deficits);
+        double[] mean = at.spectrum.survival(deficit[0], deficit[1], at.wanted);
+        // rounding may not make a probability negative or rise
+        for (int k = mean.length - 1; k >= 0; k--) {
+            mean[k] = Math.min(1, Math.max(mean[k], 0));
+        }
+        return mean;
+    }
+
+    private Level level(int level) {
+        while (levels.size() <= level) {
+            levels.add(null);
+        }
+        if (levels.get(level) == null) {
+            double step = step(level);
+            int cells = LatticeStep.cells(cap, step);
+            levels.set(level, make(step, e -> e.cellSurvival(step, cells), level));
+        }
+        return levels.get(level);
+    }
+
+    private Level make(double step, java.util.function.Function<EventLaw, double[]> law, int level) {
+        int last = cells(level);
+        int wanted = last + MARGIN;
+        int length = Spectrum.goodLength((int) Math.ceil(reach * wanted));
+        double tilt = reachesFar() ? 14.0 / length : 36.0 / (length + wanted);
+        Spectrum spectrum = new Spectrum(length, tilt);
+        double[][][] deficits = new double[events.size()][][];
+        for (int i = 0; i < deficits.length; i++) {
+            deficits[i] = spectrum.deficit(law.apply(events.get(i)));
+        }
+        return new Level(step, wanted, spectrum, deficits, null);
+    }
+
+    /**
+     * The atoms' own lattice: their event laws, with the rest of each law at infinity. Where all perils have atoms at 0 and at the cap
+     * only, its step is the cap.
+     */
+    private Level atoms() {
+        if (atoms == null) {
+            double step = step(0);
+            int cells = LatticeStep.cells(cap, step);
+            double[][] at = events.stream().map(e -> e.atoms(step, cells)).toArray(double[][]::new);
+            int stride = cells;
+            for (double[] law : at) {
+                for (int k = 1; law != null && k < cells; k++) {
+                    stride = law[k] > 0 ? gcd(stride, k) : stride;
+                }
+            }
+            int places = cells / stride;
+            int wanted = (int) Math.ceil(end / (stride * step)) + 2;
+            int length = Spectrum.goodLength(Math.max(8, 2 * wanted));
+            Spectrum spectrum = new Spectrum(length, 30.0 / length);
+            double[][][] deficits = new double[events.size()][][];
+            double[] never = new double[events.size()];
+            for (int i = 0; i < deficits.length; i++) {
+                double inside = at[i] == null ? 0 : Arrays.stream(at[i], 1, cells).sum();
+                never[i] = Math.max(0, events.get(i).hitChance() - events.get(i).fullChance() - inside);
+                deficits[i] = atomDeficit(spectrum, events.get(i), at[i], places, stride);
+            }
+            atoms = new Level(stride * step, wanted, spectrum, deficits, never);
+        }
+        return atoms;
+    }
+
+    private static int gcd(int a, int b) {
+        return b == 0 ? a : gcd(b, a % b);
+    }
+
+    /** 1 − Σ α_k z^k = (1 − z) Σ_{k &lt; places} U_k z^k + U z^places, U_k = P(o &gt; k or no atom), U = P(no atom). */
+    private static double[][] atomDeficit(Spectrum spectrum, EventLaw event, double[] atoms, int places, int stride) {
+        double[] rest = new double[places];
+        double left = event.hitChance();
+        for (int k = 0; k < places; k++) {
+            rest[k] = left;
+            left -= k + 1 == places ? event.fullChance() : atoms == null ? 0 : atoms[(k + 1) * stride];
+        }
+        double never = Math.max(0, left);
+        double[][] deficit = spectrum.deficit(rest);
+        for (int j = 0; j < spectrum.frequencies(); j++) {
+            double size = Math.exp(-spectrum.tilt() * places) * never;
+            double angle = -2 * Math.PI * ((long) j * places % spectrum.length()) / spectrum.length();
+            deficit[0][j] += size * Math.cos(angle);
+            deficit[1][j] += size * Math.sin(angle);
+        }
+        return deficit;
+    }
+
+    /** P(A &gt; k·(step of the atoms), A an atom), k = 0, 1, … */
+    double[] atomSurvival(LatentNodes nodes) {
+        Level at = atoms();
+        double[][] deficit = JointDeficit.of(nodes, at.deficits);
+        // a year with any loss that is no atom is no atom: U at infinity, taken off before the inverse transform
+        double constant = JointDeficit.at(nodes, at.lost);
+        for (int j = 0; j < deficit[0].length; j++) {
+            deficit[0][j] -= constant;
+        }
+        double[] survival = at.spectrum.survival(deficit[0], deficit[1], at.wanted);
+        for (int k = 0; k < survival.length; k++) {
+            survival[k] = Math.max(0, survival[k]);
+        }
+        return survival;
+    }
+}

@@ -1,0 +1,189 @@
+package layerweft.engine.transform;
+
+import java.util.ArrayList;
+import java.util.Arrays;
+import java.util.HashMap;
+import java.util.List;
+import java.util.Map;
+import java.util.Optional;
+import layerweft.figures.LayerStatistics;
+import layerweft.model.copula.Copula;
+import layerweft.model.portfolio.Dependence;
+import layerweft.model.portfolio.EventLoss;
+import layerweft.model.portfolio.Peril;
+import layerweft.model.portfolio.Portfolio;
+import layerweft.model.treaty.Layer;
+import layerweft.model.treaty.LayerTerms;
+import layerweft.model.treaty.Treaty;
+
+/**
+ * Prices layers of a treaty without noise, by transforms on lattices. What does not depend on the copula is made once and shared by all
+ * engines that {@link #with} returns; these may be used on different threads only one at a time.
+ */
+public final class TransformEngine {
+    private final Treaty treaty;
+    private final Accuracy accuracy;
+    private final Copula copula;
+    private final Shared shared;
+    private final Map<List<Integer>, LatentNodes> nodes = new HashMap<>();
+
+    /** What all copulas share, filled as layers are asked for. */
+    private static final class Shared {
+        private final Map<Integer, CountMargin> margins = new HashMap<>();
+        private final Map<Integer, PreparedLayer> layers = new HashMap<>();
+        private final Map<Integer, List<LayerLattice>> totals = new HashMap<>();
+        private final Map<Integer, Integer> levels = new HashMap<>();
+    }
+
+    public TransformEngine(Treaty treaty, Accuracy accuracy) {
+        this(treaty, accuracy, treaty.portfolio().dependence().copula(), new Shared());
+    }
+
+    private TransformEngine(Treaty treaty, Accuracy accuracy, Copula copula, Shared shared) {
+        this.treaty = treaty;
+        this.accuracy = accuracy;
+        this.copula = copula;
+        this.shared = shared;
+    }
+
+    /** The same treaty under another copula between the perils: quick, because the lattices are kept. */
+    public TransformEngine with(Copula other) {
+        other.requireDimension(treaty.portfolio().perils().size());
+        return new TransformEngine(treaty, accuracy, other, shared);
+    }
+
+    /** Why a layer of the treaty has to be simulated, in plain words; empty where this engine can price it. */
+    public static Optional<String> refusal(Treaty treaty, int layer) {
+        return new TransformEngine(treaty, Accuracy.USUAL).refusal(layer);
+    }
+
+    /** The same for this engine's copula. */
+    public Optional<String> refusal(int j) {
+        Layer layer = treaty.layer(j);
+        if (!layer.inuring().isEmpty()) {
+            return Optional.of("recoveries of other layers inure to it, event by event");
+        }
+        if (layer.proRataTime()) {
+            return Optional.of("its reinstatement premium is pro rata as to time");
+        }
+        Optional<String> parts = partsRefusal(j);
+        if (parts.isPresent()) {
+            return parts;
+        }
+        int[] covered = covered(j);
+        if (!totalsJoined() || covered.length == 1) {
+            CountMargin[] margins = Arrays.stream(covered).mapToObj(this::margin).toArray(CountMargin[]::new);
+            return LatentModel.refusal(copula, covered, margins);
+        }
+        LayerTerms terms = layer.terms();
+        if (terms.occurrenceLimit() < Double.POSITIVE_INFINITY || terms.retention() > 0 || terms.hasFranchise()) {
+            return Optional.of("the copula joins annual totals, and the layer has occurrence terms");
+        }
+        for (int i : covered) {
+            if (!treaty.cover(j).coversWhole(i)) {
+                return Optional.of("the copula joins annual totals, and the layer covers only a part of " + treaty.portfolio().perils().get(i).name());
+            }
+        }
+        return DependentSum.refusal(copula, covered);
+    }
+
+    private Optional<String> partsRefusal(int j) {
+        Portfolio portfolio = treaty.portfolio();
+        for (int i = 0; i < portfolio.perils().size(); i++) {
+            Peril peril = portfolio.perils().get(i);
+            if (treaty.cover(j).covers(i) && peril.eventLoss() instanceof EventLoss.Split split) {
+                int layer = j;
+                int at = i;
+                int[] members = java.util.stream.IntStream.range(0, split.subPerils().size()).filter(k -> treaty.cover(layer).covers(at, k)).toArray();
+                if (members.length > 3) {
+                    return Optional.of("it covers " + members.length + " sub-perils of " + peril.name() + ", and the transform takes at most 3");
+                }
+                Optional<String> reason = DependentSum.refusal(split.copula(), members);
+                if (reason.isPresent()) {
+                    return reason;
+                }
+            }
+        }
+        return Optional.empty();
+    }
+
+    /**
+     * All figures of a layer, at 100 %.
+     *
+     * @throws IllegalArgumentException if the layer is one of those that {@link #refusal(int)} names
+     */
+    public LayerStatistics price(int layer) {
+        return answer(layer).statistics();
+    }
+
+    /** The law of the layer's annual loss, for curves and other figures. */
+    public TransformLaw law(int layer) {
+        AnnualSums sums = sums(layer);
+        LayerAnswer answer = answer(layer, sums);
+        return new TransformLaw(sums, answer.finest(), answer.facts(), treaty.layer(layer).terms());
+    }
+
+    private LayerAnswer answer(int layer) {
+        return answer(layer, sums(layer));
+    }
+
+    private LayerAnswer answer(int layer, AnnualSums sums) {
+        LayerAnswer answer = new LayerAnswer(sums, treaty.layer(layer).terms(), treaty.programme(), accuracy, shared.levels.getOrDefault(layer, 0));
+        shared.levels.merge(layer, answer.level(), Math::max);
+        return answer;
+    }
+
+    private AnnualSums sums(int layer) {
+        refusal(layer).ifPresent(reason -> {
+            throw new IllegalArgumentException("layer \"" + treaty.layer(layer).name() + "\" needs simulation: " + reason);
+        });
+        PreparedLayer prepared = shared.layers.computeIfAbsent(layer, j -> PreparedLayer.of(treaty, j, accuracy));
+        if (totalsJoined() && prepared.perils().length > 1) {
+            return totals(layer, prepared);
+        }
+        return new CountSums(prepared, nodes(prepared.perils()));
+    }
+
+    private boolean totalsJoined() {
+        return treaty.portfolio().dependence().links() == Dependence.Links.ANNUAL_TOTALS;
+    }
+
+    private LatentNodes nodes(int[] perils) {
+        List<Integer> key = Arrays.stream(perils).boxed().toList();
+        LatentNodes known = nodes.get(key);
+        if (known == null) {
+            CountMargin[] margins = Arrays.stream(perils).mapToObj(this::margin).toArray(CountMargin[]::new);
+            known = LatentModel.of(copula, perils, margins, accuracy.ofProbabilities());
+            nodes.put(key, known);
+        }
+        return known;
+    }
+
+    private CountMargin margin(int peril) {
+        return shared.margins.computeIfAbsent(peril, i -> CountMargin.of(treaty.portfolio().perils().get(i).frequency(), accuracy.ofCounts()));
+    }
+
+    private int[] covered(int layer) {
+        return java.util.stream.IntStream.range(0, treaty.portfolio().perils().size()).filter(i -> treaty.cover(layer).covers(i)).toArray();
+    }
+
+    private AnnualSums totals(int layer, PreparedLayer prepared) {
+        List<LayerLattice> lattices = shared.totals.computeIfAbsent(layer, j -> {
+            List<LayerLattice> made = new ArrayList<>();
+            for (EventLaw event : prepared.events()) {
+                made.add(prepared.lattice().of(event));
+            }
+            return made;
+        });
+        LatentNodes[] alone = new LatentNodes[lattices.size()];
+        double[] u = new double[treaty.portfolio().perils().size()];
+        Arrays.fill(u, 1);
+        for (int i = 0; i < alone.length; i++) {
+            int peril = prepared.perils()[i];
+            alone[i] = new LatentNodes(new double[] {1}, new double[][][] {{margin(peril).survival()}}, 0);
+            u[peril] = 1 - JointDeficit.at(alone[i], new double[] {prepared.events().get(i).hitChance()});
+        }
+        double nothing = prepared.terms().deductible() > 0 ? 0 : copula.cdf(u);
+        return new TotalSums(prepared, lattices, alone, copula, nothing);
+    }
+}
