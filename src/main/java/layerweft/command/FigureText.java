@@ -50,6 +50,11 @@ final class FigureText {
         return "1 in " + grouped(years, Math.min(2, Math.max(0, 2 - (int) Math.floor(Math.log10(years)))));
     }
 
+    /** A part that a person has agreed, in percent, with the digits given: 90 %, 99.5 %. */
+    static String plainPercent(double part) {
+        return new BigDecimal(Double.toString(part)).movePointRight(2).stripTrailingZeros().toPlainString() + " %";
+    }
+
     /** The shortest plain decimal that reads back the same. */
     static String plain(double value) {
         BigDecimal decimal = new BigDecimal(Double.toString(value)).stripTrailingZeros();

@@ -58,7 +58,7 @@ final class QuoteText {
         for (int j = 0; j < quote.layers().size(); j++) {
             LayerFigures f = quote.layers().get(j);
             Layer layer = quote.treaty().layer(j);
-            table.row(f.name(), terms(layer.terms()), FigureText.percent(Figure.exact(layer.share())), FigureText.value(f.expectedLoss()),
+            table.row(f.name(), terms(layer.terms()), FigureText.plainPercent(layer.share()), FigureText.value(f.expectedLoss()),
                     FigureText.error(f.expectedLoss()), FigureText.value(f.standardDeviation()), FigureText.error(f.standardDeviation()),
                     FigureText.percent(f.lossOnLine()), FigureText.percentError(f.lossOnLine()), FigureText.oneIn(f.attachmentProbability()),
                     FigureText.oneIn(f.exhaustionProbability()), FigureText.value(f.expectedEvents()), f.engine().label());
@@ -68,8 +68,8 @@ final class QuoteText {
 
     private void premiums() {
         Pricing pricing = quote.treaty().programme().pricing();
-        section("Premium (" + Loadings.inWords(pricing.loading()) + "; brokerage " + FigureText.percent(Figure.exact(pricing.brokerage()))
-                + ", expenses " + FigureText.percent(Figure.exact(pricing.expenses())) + ")");
+        section("Premium (" + Loadings.inWords(pricing.loading()) + "; brokerage " + FigureText.plainPercent(pricing.brokerage())
+                + ", expenses " + FigureText.plainPercent(pricing.expenses()) + ")");
         TextTable table = new TextTable("", "expected + loading", "", "paid-up factor", "", "technical premium", "", "rate on line", "quoted",
                 "rate on line", "quoted/technical", "payback, years");
         for (LayerFigures f : quote.layers()) {
@@ -103,7 +103,7 @@ final class QuoteText {
         section("Recovered once in … years: the year's total, and from the year's largest event");
         List<String> header = new ArrayList<>(List.of(""));
         buyer.returnPeriods().forEach(t -> header.addAll(List.of(FigureText.plain(t), "")));
-        header.addAll(List.of("tail mean " + FigureText.percent(Figure.exact(buyer.tailLevel())), ""));
+        header.addAll(List.of("tail mean " + FigureText.plainPercent(buyer.tailLevel()), ""));
         TextTable table = new TextTable(header.toArray(String[]::new));
         for (LayerFigures f : quote.layers()) {
             table.row(cells(f.name() + ", total", f.aggregate(), f.tailValueAtRisk()));
@@ -116,7 +116,7 @@ final class QuoteText {
         section("The whole programme, losses only");
         List<String> header = new ArrayList<>(List.of("", "mean", "", "std. deviation", ""));
         buyer.returnPeriods().forEach(t -> header.addAll(List.of("1 in " + FigureText.plain(t), "")));
-        header.addAll(List.of("tail mean " + FigureText.percent(Figure.exact(buyer.tailLevel())), ""));
+        header.addAll(List.of("tail mean " + FigureText.plainPercent(buyer.tailLevel()), ""));
         TextTable table = new TextTable(header.toArray(String[]::new));
         position(table, "gross", quote.whole().gross());
         position(table, "ceded", quote.whole().ceded());
@@ -153,9 +153,9 @@ final class QuoteText {
         table.row("cost of cover", FigureText.value(b.costOfCover()), FigureText.error(b.costOfCover()));
         table.row("expected net position", FigureText.value(b.netPosition()), FigureText.error(b.netPosition()));
         table.row("relief of standard deviation", FigureText.value(b.reliefOfStandardDeviation()), FigureText.error(b.reliefOfStandardDeviation()));
-        b.reliefOfValueAtRisk().forEach((level, relief) -> table.row("relief of value at risk " + FigureText.percent(Figure.exact(level)),
+        b.reliefOfValueAtRisk().forEach((level, relief) -> table.row("relief of value at risk " + FigureText.plainPercent(level),
                 FigureText.value(relief), FigureText.error(relief)));
-        table.row("relief of tail mean " + FigureText.percent(Figure.exact(buyer.tailLevel())), FigureText.value(b.reliefOfTailValueAtRisk()),
+        table.row("relief of tail mean " + FigureText.plainPercent(buyer.tailLevel()), FigureText.value(b.reliefOfTailValueAtRisk()),
                 FigureText.error(b.reliefOfTailValueAtRisk()));
         table.row("cost per unit of tail relief", FigureText.value(b.costPerUnitOfTailRelief()), FigureText.error(b.costPerUnitOfTailRelief()));
         text.append(table);
@@ -174,7 +174,7 @@ final class QuoteText {
     private static String terms(LayerTerms t) {
         StringBuilder s = new StringBuilder();
         if (t.quotaShare() < 1) {
-            s.append(FigureText.percent(Figure.exact(t.quotaShare()))).append(" of ");
+            s.append(FigureText.plainPercent(t.quotaShare())).append(" of ");
         }
         s.append(amount(t.occurrenceLimit())).append(t.hasFranchise() ? " franchise " + amount(t.franchise()) : " xs " + amount(t.retention()));
         if (t.deductible() > 0 || t.annualLimit() < Double.POSITIVE_INFINITY) {
