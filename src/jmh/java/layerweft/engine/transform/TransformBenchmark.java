@@ -1,8 +1,7 @@
 package layerweft.engine.transform;
 
-import java.nio.file.Path;
 import java.util.concurrent.TimeUnit;
-import layerweft.file.TreatyReader;
+import layerweft.engine.simulation.FourPerils;
 import layerweft.model.copula.Archimedean;
 import layerweft.model.copula.ArchimedeanFamily;
 import layerweft.model.copula.Copula;
@@ -22,8 +21,7 @@ import org.openjdk.jmh.annotations.State;
 import org.openjdk.jmh.annotations.Warmup;
 
 /**
- * Pricing of a treaty's layers when only the copula changes, on one thread. The treaty is read from the folder given by
- * {@code -Dlayerweft.treaty} (portfolio.json, programme.json).
+ * Pricing of four perils under five layers when only the copula changes, and from nothing, on one thread.
  */
 @State(Scope.Thread)
 @BenchmarkMode(Mode.AverageTime)
@@ -45,8 +43,7 @@ public class TransformBenchmark {
 
     @Setup
     public void read() {
-        Path folder = Path.of(System.getProperty("layerweft.treaty", "src/test/resources/reference/cases/e07-gumbel-3"));
-        treaty = TreatyReader.read(folder.resolve("portfolio.json"), folder.resolve("programme.json"));
+        treaty = FourPerils.treaty();
         engine = new TransformEngine(treaty, Accuracy.USUAL);
         price(engine);
     }
@@ -56,6 +53,16 @@ public class TransformBenchmark {
     public double anotherTau() {
         turn = (turn + 1) % 100;
         return price(engine.with(copula(tau + turn * 1e-5)));
+    }
+
+    /** Five layers for the family at 21 strengths. */
+    @Benchmark
+    public double sweep() {
+        double sum = 0;
+        for (int k = 0; k <= 20; k++) {
+            sum += price(engine.with(copula(Math.max(1e-3, Math.min(0.99, k * 0.05)))));
+        }
+        return sum;
     }
 
     /** All layers from nothing. */

@@ -15,7 +15,7 @@ import layerweft.model.treaty.LayerTerms;
 final class TotalSums implements AnnualSums {
     private static final double JOINT_ERROR = 2e-9;
     /** Cells wanted for the guaranteed range, whose width is of first order here. */
-    private static final int BRACKET_CELLS = 4096;
+    private static final int BRACKET_CELLS = 2048;
     private final PreparedLayer layer;
     private final List<LayerLattice> totals;
     private final LatentNodes[] alone;

@@ -87,7 +87,7 @@ class LatentModelTest {
         LatentNodes nodes = LatentModel.of(copula, first(3), THREE, 1e-12);
         double worst = worst(nodes, copula, THREE);
         assertTrue(worst < 1e-9, copula.label() + " tau " + copula.kendallTau(0, 1) + ": " + worst);
-        assertTrue(worst <= 2 * nodes.error() + 1e-12, "stated " + nodes.error() + " found " + worst);
+        assertTrue(worst <= 3 * nodes.error() + 1e-11, "stated " + nodes.error() + " found " + worst);
     }
 
     @ParameterizedTest

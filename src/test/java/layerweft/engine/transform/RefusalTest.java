@@ -23,6 +23,8 @@ import org.junit.jupiter.api.Test;
 class RefusalTest {
     private static final Layer CAT = Layer.of("cat", OccurrenceTerms.excess(10, 5), AnnualTerms.NONE);
 
+    private static final Layer OTHER = Layer.of("other", OccurrenceTerms.excess(10, 5), AnnualTerms.NONE);
+
     private static List<Peril> perils(int d) {
         return IntStream.range(0, d).mapToObj(i -> Models.peril("peril " + i, new Poisson(1), new Exponential(4))).toList();
     }
@@ -46,7 +48,7 @@ class RefusalTest {
     @Test
     void largeMatricesWithoutAFactorNeedSimulationUnlessTheLayerCoversFewOfThePerils() {
         double[][] rho = {{1, 0.5, 0.1, 0.3}, {0.5, 1, 0.4, 0.2}, {0.1, 0.4, 1, 0.6}, {0.3, 0.2, 0.6, 1}};
-        Treaty treaty = Models.counts(perils(4), Gaussian.ofCorrelation(rho), CAT, CAT.covering("peril 0", "peril 1", "peril 3"));
+        Treaty treaty = Models.counts(perils(4), Gaussian.ofCorrelation(rho), CAT, OTHER.covering("peril 0", "peril 1", "peril 3"));
         assertTrue(reason(treaty, 0).contains("correlation matrix"), reason(treaty, 0));
         assertEquals("none", reason(treaty, 1));
     }
@@ -54,7 +56,7 @@ class RefusalTest {
     @Test
     void joinedTotalsLeaveOccurrenceTermsToSimulationUnlessOnePerilIsCovered() {
         Dependence totals = new Dependence(Dependence.Links.ANNUAL_TOTALS, Archimedean.ofKendallTau(ArchimedeanFamily.GUMBEL, false, 0.3));
-        Treaty treaty = Models.treaty(perils(2), totals, CAT, Models.stopLoss(10, 5), CAT.covering("peril 1"));
+        Treaty treaty = Models.treaty(perils(2), totals, CAT, Models.stopLoss(10, 5), OTHER.covering("peril 1"));
         assertTrue(reason(treaty, 0).contains("annual totals"), reason(treaty, 0));
         assertEquals("none", reason(treaty, 1));
         assertEquals("none", reason(treaty, 2));
