@@ -13,6 +13,8 @@ import layerweft.figures.Figure;
  */
 final class FigureText {
     private static final int SIGNIFICANT = 4;
+    /** Places to which the error of an exact-looking 0 is told. */
+    private static final int PLACES_OF_ZERO = 2;
 
     private FigureText() {}
 
@@ -23,10 +25,10 @@ final class FigureText {
 
     /** The error alone, to the places of the value; empty where the figure is exact. */
     static String error(Figure figure) {
-        if (special(figure) != null || figure.error() == 0) {
+        if (!figure.defined() || figure.infinite() || figure.error() == 0) {
             return "";
         }
-        int places = places(figure);
+        int places = figure.value() == 0 ? Math.min(PLACES_OF_ZERO, places(figure)) : places(figure);
         double unit = Math.pow(10, -places);
         return figure.error() < 0.5 * unit ? "± < " + grouped(unit, places) : "± " + grouped(figure.error(), places);
     }
@@ -68,7 +70,7 @@ final class FigureText {
         if (figure.infinite()) {
             return "∞";
         }
-        return figure.value() == 0 && figure.error() == 0 ? "0" : null;
+        return figure.value() == 0 ? "0" : null;
     }
 
     /** Decimal places: to the first digit of the error, but not beyond the fourth significant digit of the value. */
