@@ -147,7 +147,7 @@ final class FactorNodes {
             }
             double half = degreesOfFreedom / 2;
             double spread = 1 / Math.sqrt(half);
-            double step = Math.min(0.4, 0.6 * spread);
+            double step = Math.min(0.47, 0.7 * spread);
             double low = -Math.max(8 * spread, 24 / half + 1);
             double high = Math.min(8 * spread, Math.log(7 + 60 / half));
             double logConstant = half * Math.log(half) - LogGamma.value(half);

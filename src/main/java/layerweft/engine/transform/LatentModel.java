@@ -139,7 +139,7 @@ final class LatentModel {
             }
             return OrderedNodes.of(margins, falling).nodes(margins);
         }
-        return FactorNodes.of(loadings, degreesOfFreedom, margins).merged(MERGING * error);
+        return FactorNodes.of(loadings, degreesOfFreedom, margins).merged(4 * MERGING * error);
     }
 
     private static LatentNodes mixture(MixtureCopula mixture, int[] perils, CountMargin[] margins, double error) {
