@@ -125,6 +125,14 @@ class AdmissibleFrequenciesTest {
     }
 
     @Test
+    void theLargestEmpiricalCountIsThePossibleOne() {
+        EmpiricalCounts counts = new EmpiricalCounts(List.of(0.3, 0.0, 0.7, 0.0, 0.0));
+        assertEquals(2, counts.largest());
+        assertEquals(2, counts.quantile(1));
+        assertEquals(1, counts.cdf(2));
+    }
+
+    @Test
     void empiricalCountsKeepTheirOwnCopy() {
         List<Double> probabilities = new ArrayList<>(List.of(0.5, 0.5));
         EmpiricalCounts counts = new EmpiricalCounts(probabilities);
