@@ -11,6 +11,14 @@ public record Figure(double value, double error) {
 
     public static final Figure UNDEFINED = new Figure(Double.NaN, 0);
 
+    public static final Figure INFINITE = new Figure(Double.POSITIVE_INFINITY, 0);
+
+    public Figure {
+        if (Double.isNaN(error)) {
+            error = Double.isNaN(value) ? 0 : Double.POSITIVE_INFINITY;
+        }
+    }
+
     public static Figure exact(double value) {
         return new Figure(value, 0);
     }
@@ -23,6 +31,20 @@ public record Figure(double value, double error) {
     /** The figure over a finite divisor; undefined where the divisor is infinite. */
     public Figure over(double divisor) {
         return divisor < Double.POSITIVE_INFINITY ? times(1 / divisor) : UNDEFINED;
+    }
+
+    /** The sum of two figures whose errors may go together: the errors add. */
+    public Figure plus(Figure other) {
+        return new Figure(value + other.value, error + other.error);
+    }
+
+    /** The difference of two figures whose errors may go together: the errors add. */
+    public Figure minus(Figure other) {
+        return new Figure(value - other.value, error + other.error);
+    }
+
+    public boolean infinite() {
+        return Double.isInfinite(value);
     }
 
     public boolean defined() {

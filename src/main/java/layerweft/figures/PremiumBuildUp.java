@@ -12,9 +12,10 @@ import layerweft.model.treaty.Pricing;
  * @param net E[Y] and the loading
  * @param gross net with brokerage and expenses on every premium: what upfront and reinstatement premiums must bring together
  * @param upfront P
+ * @param divisor net/P: what a unit of upfront premium leaves with its reinstatement premium after brokerage and expenses
  * @param slopes how P moves with what it is made of, for error propagation
  */
-public record PremiumBuildUp(double expectedLoss, double net, double gross, double upfront, Slopes slopes) {
+public record PremiumBuildUp(double expectedLoss, double net, double gross, double upfront, double divisor, Slopes slopes) {
 
     /**
      * What a premium is made of, at 100 %. Members that the principle does not use may be NaN.
@@ -61,7 +62,7 @@ public record PremiumBuildUp(double expectedLoss, double net, double gross, doub
         double upfront = net / divisor;
         Slopes slopes = new Slopes(byMean / divisor, bySd / divisor, byTail / divisor, byDistorted / divisor,
                 -upfront * keptOfReinstatements / divisor);
-        return new PremiumBuildUp(in.expectedLoss(), net, upfront * (1 + in.reinstatementFactor()), upfront, slopes);
+        return new PremiumBuildUp(in.expectedLoss(), net, upfront * (1 + in.reinstatementFactor()), upfront, divisor, slopes);
     }
 
     /** A loading of 0 times an infinite figure is no loading. */

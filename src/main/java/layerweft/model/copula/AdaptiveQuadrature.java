@@ -15,7 +15,7 @@ final class AdaptiveQuadrature {
         0.190350578064785409913256402421014, 0.204432940075298892414161999234649, 0.209482141084727828012999174891714};
     private static final double[] GAUSS = {0.129484966168869693270611432679082, 0.279705391489276667901467771423780,
         0.381830050505118944950369775488975, 0.417959183673469387755102040816327};
-    private static final int DEEPEST = 40;
+    private static final int DEEPEST = 18;
 
     private AdaptiveQuadrature() {
     }
@@ -23,8 +23,9 @@ final class AdaptiveQuadrature {
     /**
      * ∫ f over [low, high].
      *
-     * @param absolute error to be reached in each part, in proportion to nothing: a bound of the local disagreement
-     * @param relative alternative bound, relative to the part's own integral
+     * @param absolute bound for the disagreement of the two rules in each part; the stronger rule, whose value counts, is much nearer
+     *     (QUADPACK estimates its error by (200 · disagreement)^1.5)
+     * @param relative alternative bound, relative to the part's own integral; where f is itself a quadrature, it has to be the more exact
      */
     static double integrate(DoubleUnaryOperator f, double low, double high, double absolute, double relative) {
         return high > low ? part(f, low, high, absolute, relative, DEEPEST) : 0;
@@ -44,7 +45,6 @@ final class AdaptiveQuadrature {
             }
         }
         double error = half * Math.abs(kronrod - gauss);
-        // the disagreement is that of the weaker rule; the stronger one is much nearer (QUADPACK: (200 error)^1.5)
         if (depth == 0 || error <= absolute || error <= relative * half * Math.abs(kronrod) || half <= Math.ulp(centre) * 8) {
             return half * kronrod;
         }

@@ -17,7 +17,8 @@ public record Archimedean(ArchimedeanFamily family, double theta, boolean surviv
     public Archimedean {
         double least = family.leastTheta(2);
         new Check().that(theta >= least && theta < Double.POSITIVE_INFINITY && theta > Double.NEGATIVE_INFINITY, "theta", theta,
-                least == Double.NEGATIVE_INFINITY ? "a finite number" : String.format(Locale.ROOT, "a finite number of at least %.0f", least)).orThrow();
+                least == Double.NEGATIVE_INFINITY ? "a finite number"
+                        : String.format(Locale.ROOT, "a finite number of at least %.0f", least)).orThrow();
     }
 
     public static Archimedean ofTheta(ArchimedeanFamily family, boolean survival, double theta) {
@@ -37,7 +38,8 @@ public record Archimedean(ArchimedeanFamily family, double theta, boolean surviv
 
     @Override
     public void requireDimension(int dimension) {
-        new Check().that(theta >= family.leastTheta(dimension), "kendallTau", String.format(Locale.ROOT, "%.6g (theta %.6g)", family.tauOf(theta), theta),
+        new Check().that(theta >= family.leastTheta(dimension), "kendallTau",
+                String.format(Locale.ROOT, "%.6g (theta %.6g)", family.tauOf(theta), theta),
                 TauRange.of(family, dimension) + " for " + dimension + " perils").orThrow();
     }
 
@@ -62,6 +64,9 @@ public record Archimedean(ArchimedeanFamily family, double theta, boolean surviv
     @Override
     public double cdf(double... u) {
         requireDimension(u.length);
+        if (u.length == 1) {
+            return u[0];
+        }
         if (!hasFrailty()) {
             NegativePair pair = new NegativePair(family, -theta);
             return survival ? pair.survival(u[0], u[1]) : pair.cdf(u[0], u[1]);
@@ -103,8 +108,14 @@ public record Archimedean(ArchimedeanFamily family, double theta, boolean surviv
     /** The survival version has the same ρ, and is the slower to integrate. */
     @Override
     public double spearmanRho(int i, int j) {
-        return theta == family.independentTheta() ? 0
-                : family == ArchimedeanFamily.FRANK ? ArchimedeanTau.frankSpearman(theta) : SpearmanRho.of(new Archimedean(family, theta, false));
+        if (theta == family.independentTheta()) {
+            return 0;
+        }
+        return switch (family) {
+            case FRANK -> SpearmanRho.frank(theta);
+            case GUMBEL -> SpearmanRho.gumbel(theta);
+            case CLAYTON, JOE -> SpearmanRho.of(new Archimedean(family, theta, false));
+        };
     }
 
     @Override
@@ -115,6 +126,9 @@ public record Archimedean(ArchimedeanFamily family, double theta, boolean surviv
     @Override
     public ScoreSampler sampler(int dimension) {
         requireDimension(dimension);
+        if (dimension == 1) {
+            return new Independence().sampler(1);
+        }
         boolean[] flipped = new boolean[dimension];
         Arrays.fill(flipped, survival);
         if (hasFrailty()) {

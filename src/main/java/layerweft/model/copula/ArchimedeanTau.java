@@ -37,16 +37,6 @@ final class ArchimedeanTau {
         return Math.signum(tau) * inverse(ArchimedeanTau::frank, 0, Math.abs(tau));
     }
 
-    /** Frank's Spearman ρ = 1 − 12(D₁(θ) − D₂(θ))/θ (Nelsen 2006, exercise 5.9 and section 5.1.2); odd in θ. */
-    static double frankSpearman(double theta) {
-        double size = Math.abs(theta);
-        if (size < 1e-4) {
-            return theta / 6;
-        }
-        double difference = AdaptiveQuadrature.integrate(t -> t == 0 ? 1 : (1 - 2 * t / size) * t / Math.expm1(t), 0, size, 1e-15, 1e-14);
-        return Math.signum(theta) * (1 - 12 * difference / (size * size));
-    }
-
     /**
      * Joe: τ = 1 − (2/θ)·(Ψ(2) − Ψ(x))/(2 − x), x = 2/θ + 1, Ψ the digamma function; where x is next to 2 the quotient is the
      * trigamma function in between.

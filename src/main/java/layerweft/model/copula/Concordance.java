@@ -2,10 +2,10 @@ package layerweft.model.copula;
 
 /**
  * The concordance function Q(C, D) = 4∫∫C dD − 1 of two pair copulas (Kruskal 1958; Nelsen 2006, section 5.1.1); Q(C, C) is Kendall's τ.
- * Symmetric, and linear in each.
+ * Symmetric, and linear in each. Exact to 1e-9 against a Fréchet bound, to 1e-7 against independence; otherwise good to about 5e-4.
  */
 final class Concordance {
-    private static final int CELLS = 96;
+    private static final int CELLS = 48;
 
     private Concordance() {
     }
@@ -13,6 +13,12 @@ final class Concordance {
     static double of(Copula first, Copula second) {
         if (first.equals(second)) {
             return first.kendallTau(0, 1);
+        }
+        if (first instanceof MixtureCopula mixture) {
+            return mixture.mean(component -> of(component, second));
+        }
+        if (second instanceof MixtureCopula) {
+            return of(second, first);
         }
         if (first instanceof Independence) {
             return second.spearmanRho(0, 1) / 3;

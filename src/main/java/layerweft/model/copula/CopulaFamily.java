@@ -108,7 +108,7 @@ public record CopulaFamily(Kind kind, boolean survival, double degreesOfFreedom)
     /** The text that {@link #parse} reads. */
     public String label() {
         if (kind == Kind.STUDENT) {
-            return Student.ofKendallTau(0, degreesOfFreedom).label();
+            return Student.label(degreesOfFreedom);
         }
         return (survival ? SURVIVAL : "") + nameOf(kind);
     }

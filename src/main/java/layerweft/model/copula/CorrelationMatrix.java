@@ -30,7 +30,8 @@ public record CorrelationMatrix(List<List<Double>> rows) implements Correlation 
             checkEntries(rows, check);
         }
         if (check.clean()) {
-            double least = Arrays.stream(new EigenDecomposition(new Array2DRowRealMatrix(toArray(rows))).getRealEigenvalues()).min().orElse(0);
+            EigenDecomposition eigen = new EigenDecomposition(new Array2DRowRealMatrix(toArray(rows)));
+            double least = Arrays.stream(eigen.getRealEigenvalues()).min().orElse(0);
             check.that(least >= -TOLERANCE, "correlation", String.format(Locale.ROOT, "a matrix with the eigenvalue %.6g", least),
                     "a positive semi-definite matrix (no eigenvalue below 0)");
         }

@@ -8,10 +8,11 @@ import java.util.Arrays;
  *
  * <pre>P(X ≤ h, Y ≤ k) = max(F(h) + F(k) − 1, 0) + (1/2π) ∫_{−π/2}^{asin ρ} w((h² − 2hk sin φ + k²)/cos²φ) dφ,</pre>
  *
- * w(x) = e^(−x/2) for the normal, (1 + x/ν)^(−ν/2) for t with any ν &gt; 0. Every term is positive, so small probabilities keep their digits.
+ * w(x) = e^(−x/2) for the normal, (1 + x/ν)^(−ν/2) for t with any ν &gt; 0. Every term is positive, so small probabilities keep their
+ * digits.
  */
 final class EllipticalPair {
-    private static final double[] SPREADS = {0.1, 0.3, 1, 3, 10};
+    private static final double[] SPREADS = {0.2, 2};
 
     private EllipticalPair() {
     }
@@ -43,7 +44,7 @@ final class EllipticalPair {
         double from = -Math.PI / 2;
         for (double to : cuts) {
             if (to > from) {
-                sum += AdaptiveQuadrature.integrate(phi -> weight(h, k, phi, degreesOfFreedom), from, to, 1e-15, 1e-12);
+                sum += AdaptiveQuadrature.integrate(phi -> weight(h, k, phi, degreesOfFreedom), from, to, 1e-15, 1e-11);
                 from = to;
             }
         }

@@ -40,18 +40,22 @@ final class ExponentialSampler extends YearSampler {
         return kind == Kind.COUNTERMONOTONIC && i == 1;
     }
 
+    /** {@inheritDoc} Scores drawn end at 0, on one side; that end itself is at infinity, beyond them. */
     @Override
     public double score(int i, double p, double q) {
-        return turned(i) ? LogScale.minusLog(q, p) : -LogScale.minusLog(p, q);
+        if (turned(i)) {
+            return p == 0 ? Double.NEGATIVE_INFINITY : LogScale.minusLog(q, p);
+        }
+        return q == 0 ? Double.POSITIVE_INFINITY : -LogScale.minusLog(p, q);
     }
 
     @Override
     public double uniform(int i, double score) {
-        return turned(i) ? -Math.expm1(-score) : Math.exp(score);
+        return turned(i) ? Math.max(0, -Math.expm1(-score)) : Math.min(1, Math.exp(score));
     }
 
     @Override
     public double complement(int i, double score) {
-        return turned(i) ? Math.exp(-score) : -Math.expm1(score);
+        return turned(i) ? Math.min(1, Math.exp(-score)) : Math.max(0, -Math.expm1(score));
     }
 }

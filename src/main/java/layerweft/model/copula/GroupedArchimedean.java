@@ -10,8 +10,8 @@ import layerweft.model.Check;
 
 /**
  * A nested Archimedean copula, e.g. C(u_1, C_inner(u_2, u_3)), of one family, with strengths that grow inwards: θ_inner ≥ θ_outer is
- * sufficient in the families here (McNeil 2008, "Sampling nested Archimedean copulas"; Hofert 2011). Two perils have the strength of the innermost group
- * that holds both.
+ * sufficient in the families here (McNeil 2008, "Sampling nested Archimedean copulas"; Hofert 2011). Two perils have the strength of the
+ * innermost group that holds both.
  *
  * @param family of all generators
  * @param survival whether U is replaced by 1 − U

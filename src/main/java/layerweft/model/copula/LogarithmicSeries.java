@@ -1,6 +1,7 @@
 package layerweft.model.copula;
 
 import layerweft.model.random.KeyedStream;
+import org.apache.commons.rng.sampling.distribution.ZigguratSampler;
 
 /**
  * The logarithmic series law P(V = k) = p^k/(kθ), p = 1 − e^−θ, k ≥ 1, by Kemp (1981, "Efficient generation of logarithmically
@@ -11,21 +12,22 @@ import layerweft.model.random.KeyedStream;
 final class LogarithmicSeries implements FrailtySampler {
     private final double theta;
     private final KeyedStream stream;
+    private final ZigguratSampler.Exponential exponential;
 
     LogarithmicSeries(double theta, KeyedStream stream) {
         this.theta = theta;
         this.stream = stream;
+        this.exponential = ZigguratSampler.Exponential.of(stream);
     }
 
     @Override
     public double logSample() {
-        double u = stream.nextOpen();
+        double e = exponential.sample();
         double logMean = theta * stream.nextOpen();
-        double lnU = Math.log(u);
         if (logMean > 40) {
-            return Math.log(-lnU) + logMean;
+            return Math.log(e) + logMean;
         }
-        double logRatio = LogScale.log1mExp(logMean);
-        return lnU > logRatio ? 0 : Math.log1p(Math.floor(lnU / logRatio));
+        double rate = -LogScale.log1mExp(logMean);
+        return e < rate ? 0 : Math.log(1 + Math.floor(e / rate));
     }
 }

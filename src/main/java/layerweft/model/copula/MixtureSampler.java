@@ -3,7 +3,7 @@ package layerweft.model.copula;
 import java.util.List;
 import layerweft.model.random.KeyedStream;
 
-/** Chooses a component for each year; the common scale is the logit ln U − ln(1 − U), exact at both ends. */
+/** Chooses a component by each year's first draw; the common scale is the logit ln U − ln(1 − U), exact at both ends. */
 final class MixtureSampler extends YearSampler {
     private final List<Double> weights;
     private final List<YearSampler> components;

@@ -15,8 +15,12 @@ record NegativePair(ArchimedeanFamily family, double strength) {
         return family == ArchimedeanFamily.CLAYTON ? clayton(u, v) : frank(u, v);
     }
 
+    /** Frank's is its own; Clayton's is u + v − 1 + C(1 − u, 1 − v). */
     double survival(double u, double v) {
-        return Math.max(0, u + v - 1 + cdf(1 - u, 1 - v));
+        if (family == ArchimedeanFamily.FRANK || u == 0 || v == 0) {
+            return cdf(u, v);
+        }
+        return Math.max(0, Math.min(Math.min(u, v), u + v - 1 + cdf(1 - u, 1 - v)));
     }
 
     /** max(u^a + v^a − 1, 0)^(1/a). */

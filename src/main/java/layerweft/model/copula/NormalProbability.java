@@ -58,7 +58,7 @@ interface NormalProbability {
         double sum = 0;
         for (double from = -reach; from < Math.min(end, reach); from += width) {
             sum += AdaptiveQuadrature.integrate(m -> Math.exp(-m * m / 2) * f.applyAsDouble(m), from,
-                    Math.min(from + width, Math.min(end, reach)), 1e-14, 1e-12);
+                    Math.min(from + width, Math.min(end, reach)), 1e-13, 1e-10);
         }
         return sum / Math.sqrt(2 * Math.PI);
     }

@@ -10,12 +10,13 @@ import org.apache.commons.numbers.gamma.LogGamma;
  */
 final class Sibuya implements FrailtySampler {
     private static final double LOG_LARGEST_INTEGER = 36;
-    /** Up to this the survival function is multiplied out; beyond, Γ functions are quicker. */
+    /** Up to this the survival function is kept multiplied out; beyond, Stirling's series holds. */
     private static final int SHORT_PRODUCT = 24;
 
     private final double alpha;
     private final double rest;
     private final double logGammaOfRest;
+    private final double[] shortSurvival = new double[SHORT_PRODUCT + 1];
     private final KeyedStream stream;
 
     /** Parameter outer/inner, given by its two parts (inner ≥ outer) so that 1 − α keeps its digits. */
@@ -24,6 +25,10 @@ final class Sibuya implements FrailtySampler {
         this.rest = (inner - outer) / inner;
         this.logGammaOfRest = rest > 0 ? LogGamma.value(rest) : Double.POSITIVE_INFINITY;
         this.stream = stream;
+        shortSurvival[0] = 1;
+        for (int n = 1; n <= SHORT_PRODUCT; n++) {
+            shortSurvival[n] = shortSurvival[n - 1] * (n - 1 + rest) / n;
+        }
     }
 
     @Override
@@ -38,22 +43,14 @@ final class Sibuya implements FrailtySampler {
             return logG;
         }
         double floor = Math.max(1, Math.floor(Math.exp(logG)));
-        return Math.log(lnU < logSurvival(floor) ? floor + 1 : floor);
+        boolean above = floor <= SHORT_PRODUCT ? u < shortSurvival[(int) floor] : lnU < logGammaRatio(floor) - logGammaOfRest;
+        return Math.log(above ? floor + 1 : floor);
     }
 
-    /** ln P(V &gt; n) = ln Γ(n+1−α) − ln Γ(n+1) − ln Γ(1−α). */
-    private double logSurvival(double n) {
-        if (n <= SHORT_PRODUCT) {
-            double survival = 1;
-            for (int k = 1; k <= n; k++) {
-                survival *= 1 - alpha / k;
-            }
-            return Math.log(survival);
-        }
-        return logGammaRatio(n) - logGammaOfRest;
-    }
-
-    /** ln(Γ(n+1−α)/Γ(n+1)) for n &gt; 24 by Stirling's series for both, the leading terms taken together so that nothing cancels. */
+    /**
+     * ln(Γ(n+1−α)/Γ(n+1)), which with −ln Γ(1−α) is ln P(V &gt; n), for n &gt; 24 by Stirling's series for both, the leading
+     * terms taken together so that nothing cancels.
+     */
     private double logGammaRatio(double n) {
         double z = n + 1;
         double y = z - alpha;

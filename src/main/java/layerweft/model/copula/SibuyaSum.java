@@ -6,8 +6,8 @@ import layerweft.model.random.KeyedStream;
  * Sum of V_0 independent Sibuya(α) variables, the inner frailty of nested Joe copulas.
  *
  * <p>Exact up to {@link CompoundFrailty#MOST_TERMS} terms. Beyond, (1 − x)^n with x = (1 − e^−t)^α is taken as exp(−(n + 0.65)x): a
- * Poisson variable whose mean is (n + 0.65)^(1/α) S, S positive stable. For y = nx the two differ by |y²/2 − 0.65y|e^−y/n, at most 0.13/n, so by less
- * than 1.5e-4 in any conditional probability, and less the larger V_0.
+ * Poisson variable whose mean is (n + 0.65)^(1/α) S, S positive stable. For y = nx the two differ by |y²/2 − 0.65y|e^−y/n, at most
+ * 0.13/n, so by less than 1.5e-4 in any conditional probability, and by less the larger V_0.
  */
 final class SibuyaSum extends CompoundFrailty {
     private final double power;

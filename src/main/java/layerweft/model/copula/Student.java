@@ -29,8 +29,13 @@ public record Student(Correlation correlation, double degreesOfFreedom) implemen
 
     @Override
     public String label() {
-        return degreesOfFreedom == Math.rint(degreesOfFreedom) && degreesOfFreedom < 1e15 ? "student:" + (long) degreesOfFreedom
-                : "student:" + degreesOfFreedom;
+        return label(degreesOfFreedom);
+    }
+
+    /** A whole number of degrees of freedom is written without a fraction. */
+    static String label(double degreesOfFreedom) {
+        boolean whole = degreesOfFreedom == Math.rint(degreesOfFreedom) && degreesOfFreedom < 1e15;
+        return "student:" + (whole ? String.valueOf((long) degreesOfFreedom) : String.valueOf(degreesOfFreedom));
     }
 
     @Override
@@ -86,7 +91,7 @@ public record Student(Correlation correlation, double degreesOfFreedom) implemen
                 }
                 double density = Math.exp(logConstant + half * (s - Math.exp(s)));
                 return density < 1e-18 ? 0 : density * normal.at(scaled);
-            }, from, to, 1e-13, 1e-11);
+            }, from, to, 1e-12, 1e-10);
         }
         return sum;
     }

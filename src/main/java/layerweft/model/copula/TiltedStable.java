@@ -7,9 +7,9 @@ import org.apache.commons.rng.sampling.distribution.ZigguratSampler;
  * The exponentially tilted positive stable law with Laplace transform exp(−v((1 + t)^α − 1)): the law of v^(1/α)S with density
  * multiplied by e^−x.
  *
- * <p>For v ≤ 1 by plain rejection, which accepts with probability e^−v; for larger v by the double rejection of Devroye (2009, "Random variate
- * generation for exponentially and polynomially tilted stable distributions", section 5), whose cost is bounded for all v and α; notation as there, with λ^α = v.
- * Powers 1/α are taken by logarithms. Below α = 1e-6 the law is its limit, gamma with shape vα.
+ * <p>For v ≤ 1 by plain rejection, which accepts with probability e^−v; for larger v by the double rejection of Devroye (2009, "Random
+ * variate generation for exponentially and polynomially tilted stable distributions"), whose cost is bounded for all v and α; notation as
+ * there, with λ^α = v. Powers 1/α are taken by logarithms. Below α = 1e-6 the law is its limit, gamma with shape vα.
  */
 final class TiltedStable {
     private static final double C1 = Math.sqrt(Math.PI / 2);

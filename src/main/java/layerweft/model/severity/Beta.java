@@ -1,14 +1,88 @@
 package layerweft.model.severity;
 
+import layerweft.model.Check;
+import org.apache.commons.numbers.gamma.RegularizedBeta;
+import org.apache.commons.statistics.distribution.BetaDistribution;
+
+/**
+ * A beta distributed damage ratio times the exposed value.
+ *
+ * @param a first parameter of the ratio, above 0
+ * @param b second parameter of the ratio, above 0
+ * @param exposedValue largest loss, above 0, in the portfolio's unit
+ */
 public record Beta(double a, double b, double exposedValue) implements SeverityModel {
-    public double cdf(double x) { throw new UnsupportedOperationException(); }
-    public double survival(double x) { throw new UnsupportedOperationException(); }
-    public double atom(double x) { throw new UnsupportedOperationException(); }
-    public double quantile(double p) { throw new UnsupportedOperationException(); }
-    public double survivalQuantile(double q) { throw new UnsupportedOperationException(); }
-    public double mean() { throw new UnsupportedOperationException(); }
-    public double limitedMean(double x) { throw new UnsupportedOperationException(); }
-    public double limitedSecondMoment(double x) { throw new UnsupportedOperationException(); }
-    public double upperEnd() { throw new UnsupportedOperationException(); }
-    public SeveritySampler sampler() { throw new UnsupportedOperationException(); }
+
+    public Beta {
+        new Check().positive("a", a).positive("b", b).positive("exposedValue", exposedValue).orThrow();
+    }
+
+    @Override
+    public double cdf(double x) {
+        return RegularizedBeta.value(ratio(x), a, b);
+    }
+
+    @Override
+    public double survival(double x) {
+        return RegularizedBeta.complement(ratio(x), a, b);
+    }
+
+    @Override
+    public double atom(double x) {
+        return 0;
+    }
+
+    @Override
+    public double quantile(double p) {
+        return exposedValue * BetaDistribution.of(a, b).inverseCumulativeProbability(p);
+    }
+
+    @Override
+    public double survivalQuantile(double q) {
+        return exposedValue * BetaDistribution.of(a, b).inverseSurvivalProbability(q);
+    }
+
+    @Override
+    public double mean() {
+        return exposedValue * a / (a + b);
+    }
+
+    /** E[X]·I(a + 1, b) + x·P(X &gt; x). */
+    @Override
+    public double limitedMean(double x) {
+        double r = ratio(x);
+        return mean() * RegularizedBeta.value(r, a + 1, b) + r * exposedValue * RegularizedBeta.complement(r, a, b);
+    }
+
+    @Override
+    public double limitedSecondMoment(double x) {
+        double r = ratio(x);
+        double square = exposedValue * exposedValue;
+        return square * (a / (a + b) * (a + 1) / (a + b + 1) * RegularizedBeta.value(r, a + 2, b) + r * r * RegularizedBeta.complement(r, a, b));
+    }
+
+    @Override
+    public double layerMean(double from, double to) {
+        return from < mean() ? limitedMean(to) - limitedMean(from) : stopLoss(from) - stopLoss(to);
+    }
+
+    @Override
+    public double upperEnd() {
+        return exposedValue;
+    }
+
+    @Override
+    public SeveritySampler sampler() {
+        BetaDistribution law = BetaDistribution.of(a, b);
+        return stream -> exposedValue * law.inverseCumulativeProbability(stream.nextOpen());
+    }
+
+    private double ratio(double x) {
+        return Math.min(Math.max(x / exposedValue, 0), 1);
+    }
+
+    private double stopLoss(double d) {
+        double r = ratio(d);
+        return mean() * RegularizedBeta.complement(r, a + 1, b) - r * exposedValue * RegularizedBeta.complement(r, a, b);
+    }
 }

@@ -1,14 +1,88 @@
 package layerweft.model.severity;
 
+import layerweft.model.Check;
+import layerweft.model.random.KeyedStream;
+
+/**
+ * A law cut at the largest possible event loss: min(X, cap), with an atom at the cap.
+ *
+ * @param cap above the smallest loss of the model, else no loss could lie below it
+ */
 public record Capped(SeverityModel model, double cap) implements SeverityModel {
-    public double cdf(double x) { throw new UnsupportedOperationException(); }
-    public double survival(double x) { throw new UnsupportedOperationException(); }
-    public double atom(double x) { throw new UnsupportedOperationException(); }
-    public double quantile(double p) { throw new UnsupportedOperationException(); }
-    public double survivalQuantile(double q) { throw new UnsupportedOperationException(); }
-    public double mean() { throw new UnsupportedOperationException(); }
-    public double limitedMean(double x) { throw new UnsupportedOperationException(); }
-    public double limitedSecondMoment(double x) { throw new UnsupportedOperationException(); }
-    public double upperEnd() { throw new UnsupportedOperationException(); }
-    public SeveritySampler sampler() { throw new UnsupportedOperationException(); }
+
+    public Capped {
+        new Check().positive("cap", cap)
+                .that(!(cap <= model.quantile(0)), "cap", cap, "above " + model.quantile(0) + ", the smallest possible loss").orThrow();
+    }
+
+    @Override
+    public double cdf(double x) {
+        return x < cap ? model.cdf(x) : 1;
+    }
+
+    @Override
+    public double survival(double x) {
+        return x < cap ? model.survival(x) : 0;
+    }
+
+    @Override
+    public double atom(double x) {
+        return x < cap ? model.atom(x) : x == cap ? model.survival(cap) + model.atom(cap) : 0;
+    }
+
+    @Override
+    public double quantile(double p) {
+        return Math.min(model.quantile(p), cap);
+    }
+
+    @Override
+    public double survivalQuantile(double q) {
+        return Math.min(model.survivalQuantile(q), cap);
+    }
+
+    @Override
+    public double mean() {
+        return model.limitedMean(cap);
+    }
+
+    @Override
+    public double limitedMean(double x) {
+        return model.limitedMean(Math.min(x, cap));
+    }
+
+    @Override
+    public double limitedSecondMoment(double x) {
+        return model.limitedSecondMoment(Math.min(x, cap));
+    }
+
+    @Override
+    public double layerMean(double from, double to) {
+        return from >= cap ? 0 : model.layerMean(from, Math.min(to, cap));
+    }
+
+    @Override
+    public double upperEnd() {
+        return Math.min(model.upperEnd(), cap);
+    }
+
+    @Override
+    public SeveritySampler sampler() {
+        return new Sampler(model.sampler(), cap);
+    }
+
+    private record Sampler(SeveritySampler model, double cap) implements SeveritySampler {
+        @Override
+        public double draw(KeyedStream stream) {
+            return Math.min(model.draw(stream), cap);
+        }
+
+        @Override
+        public int fill(KeyedStream stream, long firstSlot, int[] counts, int years, double[] out) {
+            int n = model.fill(stream, firstSlot, counts, years, out);
+            for (int k = 0; k < n; k++) {
+                out[k] = Math.min(out[k], cap);
+            }
+            return n;
+        }
+    }
 }

@@ -1,14 +1,130 @@
 package layerweft.model.severity;
 
+import layerweft.model.Check;
+import layerweft.model.random.KeyedStream;
+import org.apache.commons.rng.sampling.distribution.ZigguratSampler;
+import org.apache.commons.statistics.distribution.NormalDistribution;
+
+/**
+ * Lognormal law: ln X is normal with mean μ and standard deviation σ. E[X] = exp(μ + σ²/2). Limited moments as in Klugman, Panjer
+ * &amp; Willmot, "Loss Models", appendix A.
+ *
+ * @param mu μ, of the logarithm of the amount in the portfolio's unit
+ * @param sigma σ, above 0
+ */
 public record Lognormal(double mu, double sigma) implements SeverityModel {
-    public double cdf(double x) { throw new UnsupportedOperationException(); }
-    public double survival(double x) { throw new UnsupportedOperationException(); }
-    public double atom(double x) { throw new UnsupportedOperationException(); }
-    public double quantile(double p) { throw new UnsupportedOperationException(); }
-    public double survivalQuantile(double q) { throw new UnsupportedOperationException(); }
-    public double mean() { throw new UnsupportedOperationException(); }
-    public double limitedMean(double x) { throw new UnsupportedOperationException(); }
-    public double limitedSecondMoment(double x) { throw new UnsupportedOperationException(); }
-    public double upperEnd() { throw new UnsupportedOperationException(); }
-    public SeveritySampler sampler() { throw new UnsupportedOperationException(); }
+    private static final NormalDistribution NORMAL = NormalDistribution.of(0, 1);
+
+    public Lognormal {
+        new Check().finite("mu", mu).positive("sigma", sigma).orThrow();
+    }
+
+    /**
+     * @param mean E[X], above 0
+     * @param cv coefficient of variation σ(X)/E[X], above 0
+     */
+    public static Lognormal ofMeanAndCv(double mean, double cv) {
+        new Check().positive("mean", mean).positive("cv", cv).orThrow();
+        double sigma = Math.sqrt(Math.log1p(cv * cv));
+        return new Lognormal(Math.log(mean) - sigma * sigma / 2, sigma);
+    }
+
+    @Override
+    public double cdf(double x) {
+        return x <= 0 ? 0 : NORMAL.cumulativeProbability(z(x, 0));
+    }
+
+    @Override
+    public double survival(double x) {
+        return x <= 0 ? 1 : NORMAL.survivalProbability(z(x, 0));
+    }
+
+    @Override
+    public double atom(double x) {
+        return 0;
+    }
+
+    @Override
+    public double quantile(double p) {
+        return Math.exp(mu + sigma * NORMAL.inverseCumulativeProbability(p));
+    }
+
+    @Override
+    public double survivalQuantile(double q) {
+        return Math.exp(mu + sigma * NORMAL.inverseSurvivalProbability(q));
+    }
+
+    @Override
+    public double mean() {
+        return moment(1);
+    }
+
+    @Override
+    public double limitedMean(double x) {
+        return limitedMoment(1, x);
+    }
+
+    @Override
+    public double limitedSecondMoment(double x) {
+        return limitedMoment(2, x);
+    }
+
+    @Override
+    public double layerMean(double from, double to) {
+        if (from <= 0 || z(from, 0) < 0) {
+            return limitedMean(to) - limitedMean(from);
+        }
+        return stopLoss(from) - stopLoss(to);
+    }
+
+    @Override
+    public double upperEnd() {
+        return Double.POSITIVE_INFINITY;
+    }
+
+    @Override
+    public SeveritySampler sampler() {
+        return new Sampler(mu, sigma);
+    }
+
+    /** (ln x − μ − shift·σ²)/σ. */
+    private double z(double x, double shift) {
+        return (Math.log(x) - mu) / sigma - shift * sigma;
+    }
+
+    private double moment(int k) {
+        return Math.exp(k * mu + k * k * sigma * sigma / 2);
+    }
+
+    /** E[min(X, x)^k] = E[X^k]·Φ((ln x − μ − kσ²)/σ) + x^k·P(X &gt; x). */
+    private double limitedMoment(int k, double x) {
+        if (x <= 0) {
+            return 0;
+        }
+        if (x == Double.POSITIVE_INFINITY) {
+            return moment(k);
+        }
+        return moment(k) * NORMAL.cumulativeProbability(z(x, k)) + Math.pow(x, k) * survival(x);
+    }
+
+    /** E[(X − d)+] from tail probabilities, so that it keeps its digits far up. */
+    private double stopLoss(double d) {
+        return d == Double.POSITIVE_INFINITY ? 0 : moment(1) * NORMAL.survivalProbability(z(d, 1)) - d * survival(d);
+    }
+
+    private record Sampler(double mu, double sigma) implements SeveritySampler {
+        @Override
+        public double draw(KeyedStream stream) {
+            return Math.exp(mu + sigma * ZigguratSampler.NormalizedGaussian.of(stream).sample());
+        }
+
+        @Override
+        public int fill(KeyedStream stream, long firstSlot, int[] counts, int years, double[] out) {
+            int n = StandardVariates.normals(stream, firstSlot, counts, years, out);
+            for (int k = 0; k < n; k++) {
+                out[k] = Math.exp(mu + sigma * out[k]);
+            }
+            return n;
+        }
+    }
 }

@@ -33,6 +33,16 @@ public sealed interface SeverityModel permits Lognormal, Pareto, GeneralizedPare
     /** Limited expected value E[min(X, x)] for x ≥ 0; at infinity the mean. */
     double limitedMean(double x);
 
+    /**
+     * E[min(X, to)] − E[min(X, from)] = ∫_from^to P(X &gt; x) dx, the mean of a layer's part of one loss, with its full relative precision
+     * however far up the layer stands; kinds override the difference where it loses digits.
+     *
+     * @param to at least {@code from}, possibly infinite
+     */
+    default double layerMean(double from, double to) {
+        return limitedMean(to) - limitedMean(from);
+    }
+
     /** Second limited moment E[min(X, x)²] for x ≥ 0, in unit²; at infinity the second moment, which may be infinite. */
     double limitedSecondMoment(double x);
 

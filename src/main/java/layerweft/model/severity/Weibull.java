@@ -1,14 +1,95 @@
 package layerweft.model.severity;
 
+import layerweft.model.Check;
+import org.apache.commons.numbers.gamma.RegularizedGamma;
+
+/**
+ * Weibull law: P(X &gt; x) = exp(−(x/scale)^shape). Limited moments as in Klugman, Panjer &amp; Willmot, "Loss Models", appendix A.
+ *
+ * @param shape k, above 0; below 1 the tail is heavier than exponential
+ * @param scale λ, above 0, in the portfolio's unit
+ */
 public record Weibull(double shape, double scale) implements SeverityModel {
-    public double cdf(double x) { throw new UnsupportedOperationException(); }
-    public double survival(double x) { throw new UnsupportedOperationException(); }
-    public double atom(double x) { throw new UnsupportedOperationException(); }
-    public double quantile(double p) { throw new UnsupportedOperationException(); }
-    public double survivalQuantile(double q) { throw new UnsupportedOperationException(); }
-    public double mean() { throw new UnsupportedOperationException(); }
-    public double limitedMean(double x) { throw new UnsupportedOperationException(); }
-    public double limitedSecondMoment(double x) { throw new UnsupportedOperationException(); }
-    public double upperEnd() { throw new UnsupportedOperationException(); }
-    public SeveritySampler sampler() { throw new UnsupportedOperationException(); }
+
+    public Weibull {
+        new Check().positive("shape", shape).positive("scale", scale).orThrow();
+    }
+
+    @Override
+    public double cdf(double x) {
+        return x <= 0 ? 0 : -Math.expm1(-exponent(x));
+    }
+
+    @Override
+    public double survival(double x) {
+        return x <= 0 ? 1 : Math.exp(-exponent(x));
+    }
+
+    @Override
+    public double atom(double x) {
+        return 0;
+    }
+
+    @Override
+    public double quantile(double p) {
+        Probability.check(p);
+        return scale * Math.pow(-Math.log1p(-p), 1 / shape);
+    }
+
+    @Override
+    public double survivalQuantile(double q) {
+        Probability.check(q);
+        return scale * Math.pow(-Math.log(q), 1 / shape);
+    }
+
+    @Override
+    public double mean() {
+        return moment(1);
+    }
+
+    @Override
+    public double limitedMean(double x) {
+        return limitedMoment(1, x);
+    }
+
+    @Override
+    public double limitedSecondMoment(double x) {
+        return limitedMoment(2, x);
+    }
+
+    @Override
+    public double layerMean(double from, double to) {
+        return from < scale ? limitedMean(to) - limitedMean(from) : stopLoss(from) - stopLoss(to);
+    }
+
+    @Override
+    public double upperEnd() {
+        return Double.POSITIVE_INFINITY;
+    }
+
+    @Override
+    public SeveritySampler sampler() {
+        return stream -> survivalQuantile(stream.nextOpen());
+    }
+
+    private double exponent(double x) {
+        return Math.pow(x / scale, shape);
+    }
+
+    /** λ^m·Γ(1 + m/k). */
+    private double moment(int m) {
+        return Math.pow(scale, m) * org.apache.commons.numbers.gamma.Gamma.value(1 + m / shape);
+    }
+
+    /** E[X^m]·P(1 + m/k, (x/λ)^k) + x^m·P(X &gt; x). */
+    private double limitedMoment(int m, double x) {
+        if (x == Double.POSITIVE_INFINITY) {
+            return moment(m);
+        }
+        return x <= 0 ? 0 : moment(m) * RegularizedGamma.P.value(1 + m / shape, exponent(x)) + Math.pow(x, m) * survival(x);
+    }
+
+    private double stopLoss(double d) {
+        return d == Double.POSITIVE_INFINITY ? 0 : moment(1) * RegularizedGamma.Q.value(1 + 1 / shape, exponent(d)) - d * survival(d);
+    }
 }

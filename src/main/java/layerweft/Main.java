@@ -1,0 +1,20 @@
+package layerweft;
+
+import java.io.PrintWriter;
+import layerweft.command.CommandLineProgram;
+import layerweft.command.Demo;
+
+/** Starts the program: with arguments the command line, without any the demo. */
+public final class Main {
+
+    private Main() {}
+
+    public static void main(String[] args) {
+        PrintWriter out = CommandLineProgram.writer(System.out);
+        PrintWriter err = CommandLineProgram.writer(System.err);
+        int status = args.length == 0 ? Demo.show(out, err) : CommandLineProgram.run(args, out, err);
+        out.flush();
+        err.flush();
+        System.exit(status);
+    }
+}

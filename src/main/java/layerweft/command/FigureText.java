@@ -1,0 +1,88 @@
+package layerweft.command;
+
+import java.math.BigDecimal;
+import java.math.RoundingMode;
+import java.text.DecimalFormat;
+import java.text.DecimalFormatSymbols;
+import java.util.Locale;
+import layerweft.figures.Figure;
+
+/**
+ * Numbers as a practitioner reads them: digits follow the error (one significant digit of it, the value to the same place), at most four
+ * significant digits where there is no error to speak of; thousands are grouped.
+ */
+final class FigureText {
+    private static final int SIGNIFICANT = 4;
+
+    private FigureText() {}
+
+    /** The value alone. */
+    static String value(Figure figure) {
+        return special(figure) != null ? special(figure) : grouped(figure.value(), places(figure));
+    }
+
+    /** The error alone, to the places of the value; empty where the figure is exact. */
+    static String error(Figure figure) {
+        if (special(figure) != null || figure.error() == 0) {
+            return "";
+        }
+        int places = places(figure);
+        double unit = Math.pow(10, -places);
+        return figure.error() < 0.5 * unit ? "± < " + grouped(unit, places) : "± " + grouped(figure.error(), places);
+    }
+
+    /** A chance or ratio in percent. */
+    static String percent(Figure figure) {
+        String text = value(figure.times(100));
+        return special(figure) != null ? text : text + " %";
+    }
+
+    static String percentError(Figure figure) {
+        return error(figure.times(100));
+    }
+
+    /** "1 in 83 years" for a chance a year: three significant digits at most. */
+    static String oneIn(Figure chance) {
+        if (!(chance.value() > 0)) {
+            return "never";
+        }
+        double years = 1 / chance.value();
+        return "1 in " + grouped(years, Math.min(2, Math.max(0, 2 - (int) Math.floor(Math.log10(years)))));
+    }
+
+    /** The shortest plain decimal that reads back the same. */
+    static String plain(double value) {
+        BigDecimal decimal = new BigDecimal(Double.toString(value)).stripTrailingZeros();
+        return decimal.scale() < 0 ? decimal.setScale(0).toPlainString() : decimal.toPlainString();
+    }
+
+    private static String special(Figure figure) {
+        if (!figure.defined()) {
+            return "—";
+        }
+        if (figure.infinite()) {
+            return "∞";
+        }
+        return figure.value() == 0 && figure.error() == 0 ? "0" : null;
+    }
+
+    /** Decimal places: to the first digit of the error, but not beyond the fourth significant digit of the value. */
+    private static int places(Figure figure) {
+        double size = Math.max(Math.abs(figure.value()), figure.error());
+        int most = SIGNIFICANT - 1 - (int) Math.floor(Math.log10(size));
+        if (!(figure.error() > 0) || figure.error() == Double.POSITIVE_INFINITY) {
+            return most;
+        }
+        double rounded = new BigDecimal(figure.error()).round(new java.math.MathContext(1, RoundingMode.HALF_UP)).doubleValue();
+        return Math.min(most, -(int) Math.floor(Math.log10(rounded)));
+    }
+
+    private static String grouped(double value, int places) {
+        DecimalFormat format = new DecimalFormat("#,##0", DecimalFormatSymbols.getInstance(Locale.ROOT));
+        format.setMinimumFractionDigits(Math.max(0, places));
+        format.setMaximumFractionDigits(Math.max(0, places));
+        format.setRoundingMode(RoundingMode.HALF_UP);
+        BigDecimal exact = new BigDecimal(value).setScale(Math.max(places, -12), RoundingMode.HALF_UP);
+        return format.format(exact);
+    }
+}

@@ -1,0 +1,26 @@
+package layerweft.engine.simulation;
+
+import layerweft.model.Check;
+
+/**
+ * How much is simulated, and from which seed. The number of threads never changes a result.
+ *
+ * @param years simulated years, from 1 to {@value #MOST_YEARS}
+ * @param seed any number; the same seed gives the same bits
+ * @param threads working threads, from 1 to 1,024
+ */
+public record SimulationSettings(long years, long seed, int threads) {
+
+    /** Beyond this the integer counts of a thread could overflow. */
+    public static final long MOST_YEARS = 2_000_000_000L;
+
+    public SimulationSettings {
+        new Check().that(years >= 1 && years <= MOST_YEARS, "years", years, "from 1 to " + MOST_YEARS)
+                .that(threads >= 1 && threads <= 1024, "threads", threads, "from 1 to 1024").orThrow();
+    }
+
+    /** 1,000,000 years, seed 1, all cores. */
+    public static SimulationSettings usual() {
+        return new SimulationSettings(1_000_000, 1, Math.min(1024, Runtime.getRuntime().availableProcessors()));
+    }
+}
