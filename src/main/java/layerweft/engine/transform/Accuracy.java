@@ -30,6 +30,6 @@ public record Accuracy(double relative, int mostCells) {
 
     /** Counts are cut where this part of their probability is left. */
     double ofCounts() {
-        return relative * 1e-5;
+        return relative * 1e-6;
     }
 }

@@ -26,6 +26,9 @@ interface AnnualSums {
     /** Largest error of joint probabilities of what the copula joins. */
     double jointError();
 
+    /** Bound on what an error of 1 in the joint probabilities, as {@link #jointError}, would do to E[Y]. */
+    double weightOfErrors();
+
     /** The year's largest event at a level; NaN where the model leaves it open. */
     double largestEvent(double level);
 

@@ -10,16 +10,20 @@ final class CountSums implements AnnualSums {
     private final PreparedLayer layer;
     private final LatentNodes nodes;
     private final LayerLattice lattice;
+    private final SumFacts facts;
+    private final double[] atomSurvival;
 
     CountSums(PreparedLayer layer, LatentNodes nodes) {
         this.layer = layer;
         this.nodes = nodes;
         this.lattice = layer.lattice();
+        this.facts = SumFacts.of(layer.moments(), layer.meanCounts(), nodes);
+        this.atomSurvival = lattice.atomSurvival(nodes);
     }
 
     @Override
     public LatticeSum sum(int level) {
-        return lattice.sum(nodes, level);
+        return lattice.sum(nodes, level, atomSurvival);
     }
 
     @Override
@@ -34,12 +38,19 @@ final class CountSums implements AnnualSums {
 
     @Override
     public SumFacts facts(LatticeSum finest) {
-        return SumFacts.of(layer.events(), layer.meanCounts(), nodes);
+        return facts;
     }
 
     @Override
     public double jointError() {
-        return nodes.error() + layer.cutCounts();
+        return nodes.error() + layer.cutCounts() + layer.chanceError();
+    }
+
+    @Override
+    public double weightOfErrors() {
+        boolean limited = layer.terms().annualLimit() < Double.POSITIVE_INFINITY;
+        double depth = limited ? end() - layer.terms().deductible() : layer.terms().deductible();
+        return Math.min(depth, layer.weightOfCounts());
     }
 
     @Override
@@ -59,7 +70,7 @@ final class CountSums implements AnnualSums {
     @Override
     public Bracket bracket(int level, LatticeSum finest) {
         LayerTerms terms = layer.terms();
-        double slack = (SAFETY * jointError() + 2 * finest.noise()) * (end() - terms.deductible()) * Math.max(1, layer.events().size() - 1);
+        double slack = (SAFETY * jointError() * Math.max(1, layer.events().size() - 1) + 2 * finest.noise()) * weightOfErrors();
         if (layer.events().isEmpty()) {
             return new Bracket(0, 0);
         }
@@ -77,11 +88,11 @@ final class CountSums implements AnnualSums {
         double highAtDeductible = terms.deductible() == 0 ? 0 : limited(fused, step, terms.deductible()) + lost;
         double slackBelow = terms.deductible() == 0 ? 0 : slack;
         if (Double.isInfinite(terms.annualLimit())) {
-            double mean = facts(finest).mean();
+            double mean = facts.mean();
             return new Bracket(Math.max(0, mean - highAtDeductible - slackBelow), mean - lowAtDeductible + slackBelow);
         }
         double lowAtEnd = limited(spread, step, end());
-        double highAtEnd = Math.min(limited(fused, step, end()) + lost, facts(finest).mean());
+        double highAtEnd = Math.min(limited(fused, step, end()) + lost, facts.mean());
         return new Bracket(Math.max(0, lowAtEnd - highAtDeductible - slack), highAtEnd - lowAtDeductible + slack);
     }
 

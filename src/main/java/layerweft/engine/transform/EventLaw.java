@@ -15,6 +15,11 @@ interface EventLaw {
     /** P(o = cap). */
     double fullChance();
 
+    /** Error of the two chances and of {@link #survival}. */
+    default double chanceError() {
+        return 0;
+    }
+
     /** E[o] without the cap, infinite where it is. */
     double mean();
 

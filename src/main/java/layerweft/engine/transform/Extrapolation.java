@@ -12,10 +12,9 @@ final class Extrapolation {
     private Extrapolation() {
     }
 
-    /** @param rounding error of a single value that no refinement removes */
-    static Figure of(double coarse, double middle, double fine, double rounding) {
+    static Figure of(double coarse, double middle, double fine) {
         if (fine == middle || !Double.isFinite(coarse + middle + fine)) {
-            return new Figure(fine, fine == middle ? rounding : Double.POSITIVE_INFINITY);
+            return new Figure(fine, fine == middle ? 0 : Double.POSITIVE_INFINITY);
         }
         double first = (4 * middle - coarse) / 3;
         double second = (4 * fine - middle) / 3;
@@ -23,9 +22,9 @@ final class Extrapolation {
         double change = Math.abs(second - first);
         boolean regular = ratio > 2 && ratio < 8 && change < 0.5 * Math.abs(fine - middle);
         if (regular) {
-            return new Figure(second, change + rounding);
+            return new Figure(second, change);
         }
         double spread = Math.max(Math.abs(fine - middle), Math.abs(middle - coarse) / 4);
-        return new Figure(fine, spread + rounding);
+        return new Figure(fine, spread);
     }
 }

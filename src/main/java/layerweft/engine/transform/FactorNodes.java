@@ -73,8 +73,8 @@ final class FactorNodes {
         for (double loading : loadings) {
             sharpest = Math.max(sharpest, Math.abs(loading) / Math.sqrt(Math.max(1 - loading * loading, 1e-12)));
         }
-        // Φ(x) of slope s: its transform dies as e^(−ω²/2s²), the normal density's as e^(−ω²/2); step h aliases ω = 2π/h
-        double step = 0.95 / Math.sqrt(1 + sharpest * sharpest);
+        // at z = iη the normal density and d functions Φ of slope s grow as e^((1 + d s²)η²/2): error e^(−2π²/(h²(1 + d s²)))
+        double step = 0.95 / Math.sqrt(1 + loadings.length * sharpest * sharpest);
         int half = (int) Math.ceil(REACH / step);
         MixingRule mixing = MixingRule.of(degreesOfFreedom);
         int count = (2 * half + 1) * mixing.roots.length;
@@ -147,7 +147,7 @@ final class FactorNodes {
             }
             double half = degreesOfFreedom / 2;
             double spread = 1 / Math.sqrt(half);
-            double step = Math.min(0.5, 0.75 * spread);
+            double step = Math.min(0.4, 0.6 * spread);
             double low = -Math.max(8 * spread, 24 / half + 1);
             double high = Math.min(8 * spread, Math.log(7 + 60 / half));
             double logConstant = half * Math.log(half) - LogGamma.value(half);

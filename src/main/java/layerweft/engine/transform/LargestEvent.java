@@ -24,28 +24,55 @@ final class LargestEvent {
         return x >= most ? 0 : JointDeficit.at(nodes, events.stream().mapToDouble(e -> e.survival(x)).toArray());
     }
 
-    /** inf{x : P(largest ≤ x) ≥ level}, to 1e-12 of its value. */
+    /** inf{x : P(largest ≤ x) ≥ level}, to 1e-11 of its value. */
     double quantile(double level) {
         double tail = (1 - level) * (1 + 1e-12);
-        if (survival(0) <= tail) {
+        double atNothing = survival(0);
+        if (atNothing <= tail) {
             return 0;
         }
-        double high = most;
-        if (Double.isInfinite(most)) {
-            high = 1;
-            while (survival(high) > tail && high < 1e300) {
-                high *= 4;
-            }
-        }
         double low = 0;
-        for (int step = 0; step < 200 && high - low > 1e-12 * high; step++) {
-            double middle = low > 0 && high > 4 * low ? Math.sqrt(low * high) : 0.5 * (low + high);
-            if (survival(middle) > tail) {
-                low = middle;
+        double high = Math.min(most, 1);
+        double above = atNothing;
+        double value = survival(high);
+        while (value > tail && high < most) {
+            low = high;
+            above = value;
+            high = Math.min(most, 4 * high);
+            value = survival(high);
+        }
+        if (high == most && beforeMost() > tail) {
+            return most;
+        }
+        return crossing(low, above, high, value, tail);
+    }
+
+    /** P(largest ≥ most). */
+    private double beforeMost() {
+        return Double.isInfinite(most) ? 0
+                : JointDeficit.at(nodes, events.stream().mapToDouble(e -> e.survival(most * (1 - 1e-12))).toArray());
+    }
+
+    /** Halving and the secant's point by turns, so that neither a jump nor a flat piece holds the search up. */
+    private double crossing(double low, double atLow, double high, double atHigh, double tail) {
+        double a = low;
+        double b = high;
+        double fa = Math.log(atLow / tail);
+        double fb = atHigh > 0 ? Math.log(atHigh / tail) : -40;
+        for (int step = 0; step < 100 && b - a > 1e-11 * b; step++) {
+            double secant = fa - fb > 0 ? a + (b - a) * fa / (fa - fb) : 0.5 * (a + b);
+            // a little towards the far end, so that both ends close in
+            double nudged = step % 3 == 2 ? 0.5 * (a + b) : secant + (secant - 0.5 * (a + b) > 0 ? -1 : 1) * 1e-3 * Math.min(b - secant, secant - a);
+            double value = survival(nudged);
+            double f = value > 0 ? Math.log(value / tail) : -40;
+            if (value > tail) {
+                a = nudged;
+                fa = f;
             } else {
-                high = middle;
+                b = nudged;
+                fb = f;
             }
         }
-        return high;
+        return b;
     }
 }

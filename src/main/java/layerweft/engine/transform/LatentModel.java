@@ -21,6 +21,8 @@ final class LatentModel {
     private static final int CHEAP_DIFFERENCES = 6_000;
     /** A pair without a latent factor may take so many. */
     private static final int MOST_DIFFERENCES = 4_000_000;
+    /** Merging nodes may cost so many times the error wanted of a quadrature: its own error is bounded, not estimated. */
+    private static final double MERGING = 20;
     /**
      * Excess of θ over independence below which a copula is a mean of independence and the one at this excess: the difference is of the
      * order of WEAK², and a frailty law as narrow as a needle is avoided.
@@ -82,7 +84,7 @@ final class LatentModel {
         }
         if (copula instanceof GroupedArchimedean grouped) {
             return perils.length == 2 ? archimedean(grouped.pair(perils[0], perils[1]), margins, error)
-                    : GroupedNodes.of(grouped, perils, margins, error).merged(error);
+                    : GroupedNodes.of(grouped, perils, margins, error).merged(MERGING * error);
         }
         if (copula instanceof Gaussian gaussian) {
             return elliptical(gaussian.correlation(), Double.POSITIVE_INFINITY, perils, margins, error);
@@ -111,7 +113,7 @@ final class LatentModel {
         }
         boolean cheap = margins.length == 2 && DifferencedNodes.cost(margins) <= CHEAP_DIFFERENCES;
         if (cheap || !copula.hasFrailty()) {
-            return DifferencedNodes.of(copula, margins).merged(error);
+            return DifferencedNodes.of(copula, margins).merged(MERGING * error);
         }
         double excess = copula.theta() - copula.family().independentTheta();
         if (excess < 0.999 * WEAK) {
@@ -119,13 +121,13 @@ final class LatentModel {
             int[] all = java.util.stream.IntStream.range(0, margins.length).toArray();
             return mixture(new MixtureCopula(List.of(1 - excess / WEAK, excess / WEAK), List.of(new Independence(), stronger)), all, margins, error);
         }
-        return FrailtyNodes.of(copula.family(), copula.theta(), copula.generator(), copula.survival(), margins, error).merged(error);
+        return FrailtyNodes.of(copula.family(), copula.theta(), copula.generator(), copula.survival(), margins, error).merged(MERGING * error);
     }
 
     private static LatentNodes elliptical(Correlation correlation, double degreesOfFreedom, int[] perils, CountMargin[] margins, double error) {
         double[] loadings = FactorNodes.loadings(correlation, perils);
         if (loadings == null) {
-            return ThreePerilNodes.of(correlation, perils, degreesOfFreedom, margins).merged(error);
+            return ThreePerilNodes.of(correlation, perils, degreesOfFreedom, margins).merged(MERGING * error);
         }
         boolean sure = Arrays.stream(loadings).allMatch(l -> Math.abs(l) > 1 - 1e-9);
         if (sure) {
@@ -135,7 +137,7 @@ final class LatentModel {
             }
             return OrderedNodes.of(margins, falling).nodes(margins);
         }
-        return FactorNodes.of(loadings, degreesOfFreedom, margins).merged(error);
+        return FactorNodes.of(loadings, degreesOfFreedom, margins).merged(MERGING * error);
     }
 
     private static LatentNodes mixture(MixtureCopula mixture, int[] perils, CountMargin[] margins, double error) {

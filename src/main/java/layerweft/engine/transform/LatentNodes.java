@@ -43,9 +43,10 @@ record LatentNodes(double[] weights, double[][][] survival, double error) {
      * peril, the error of any joint probability is a covariance between perils inside the group, at most w·Σ_{i&lt;j} r_i·r_j/4 with r_i
      * the range of peril i's conditional probabilities over the group. Where one peril moves alone nothing is lost at all.
      *
-     * @param budget for the error of each group
+     * @param budget for the error of all groups together: half is shared out by their weights, half evenly
      */
     LatentNodes merged(double budget) {
+        double each = 0.5 * budget / Math.min(size(), 100);
         int[] ends = new int[size()];
         int groups = 0;
         double total = 0;
@@ -55,7 +56,7 @@ record LatentNodes(double[] weights, double[][][] survival, double error) {
             double cost = 0;
             while (end < size()) {
                 double larger = cost(start, end, weight + weights[end]);
-                if (larger > budget) {
+                if (larger > 0.5 * budget * Math.abs(weight + weights[end]) + each) {
                     break;
                 }
                 cost = larger;

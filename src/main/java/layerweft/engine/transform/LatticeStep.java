@@ -27,7 +27,7 @@ final class LatticeStep {
         if (Double.isNaN(step)) {
             step = cap;
         }
-        double wanted = Math.min(cap / cells, Math.max(ceiling / (2.0 * cells), finest));
+        double wanted = Math.min(cap / cells, ceiling / (2.5 * cells));
         return step / Math.max(1, Math.ceil(step / wanted * (1 - SAME)));
     }
 

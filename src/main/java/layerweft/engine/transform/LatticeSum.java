@@ -36,13 +36,30 @@ record LatticeSum(double step, double[] mean, double atomStep, double[] atomSurv
         return c;
     }
 
+    /**
+     * This sum with the second-order error of the lattice taken off its averages, as the sum on a lattice of twice the step shows it:
+     * what point values are read from.
+     */
+    LatticeSum corrected(LatticeSum coarser) {
+        double[] better = mean.clone();
+        for (int c = 0; c < coarser.mean.length && 2 * c + 1 < better.length; c++) {
+            double change = (0.5 * (mean[2 * c] + mean[2 * c + 1]) - coarser.mean[c]) / 3;
+            better[2 * c] += change;
+            better[2 * c + 1] += change;
+        }
+        for (int k = 0; k < better.length; k++) {
+            better[k] = Math.max(0, k == 0 ? better[k] : Math.min(better[k], better[k - 1]));
+        }
+        return new LatticeSum(step, better, atomStep, atomSurvival, noise);
+    }
+
     /** P(A &gt; y) at a point of the lattice, from cells above only (the function bends at the terms). */
     double survivalFromAbove(double y, double[] continuous) {
         int k = (int) Math.rint(y / step);
-        if (!LatticeStep.holds(y, step) || k + 2 >= continuous.length) {
+        if (!LatticeStep.holds(y, step) || k + 3 >= continuous.length) {
             return at(y, continuous) + atomsAbove(y);
         }
-        double value = (11 * continuous[k] - 7 * continuous[k + 1] + 2 * continuous[k + 2]) / 6;
+        double value = (25 * continuous[k] - 23 * continuous[k + 1] + 13 * continuous[k + 2] - 3 * continuous[k + 3]) / 12;
         double most = k > 0 ? continuous[k - 1] : 1;
         return Math.min(most, Math.max(continuous[k], value)) + atomsAbove(y);
     }
@@ -50,10 +67,10 @@ record LatticeSum(double step, double[] mean, double atomStep, double[] atomSurv
     /** P(A ≥ y) at a point of the lattice, from cells below only. */
     double reachesFromBelow(double y, double[] continuous) {
         int k = (int) Math.rint(y / step);
-        if (!LatticeStep.holds(y, step) || k < 3) {
+        if (!LatticeStep.holds(y, step) || k < 4) {
             return at(y, continuous) + atomsAbove(y) + atom(y);
         }
-        double value = (11 * continuous[k - 1] - 7 * continuous[k - 2] + 2 * continuous[k - 3]) / 6;
+        double value = (25 * continuous[k - 1] - 23 * continuous[k - 2] + 13 * continuous[k - 3] - 3 * continuous[k - 4]) / 12;
         double least = k < continuous.length ? continuous[k] : 0;
         return Math.max(least, Math.min(continuous[k - 1], value)) + atomsAbove(y) + atom(y);
     }

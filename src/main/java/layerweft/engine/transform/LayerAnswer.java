@@ -14,8 +14,14 @@ import layerweft.model.treaty.Programme;
 
 /** Refines a layer's lattices until its expected loss is as good as wanted and writes down its figures with their errors. */
 final class LayerAnswer {
-    /** Below this part of P(A &gt; 0) the deductible asks for transforms that keep more digits. */
+    /** Below these parts of P(A &gt; 0) the deductible or the end of the layer asks for transforms that keep more digits. */
     private static final double RARE = 1e-3;
+    /** Errors of figures measured by themselves may be so many times larger than the accuracy: they are stated with much to spare. */
+    private static final double OWN_SIZE = 30;
+    /** Values at risk may have errors so many times the accuracy, of themselves. */
+    private static final double QUANTILES = 1000;
+    private static final int CHEAP_CELLS = 4096;
+    private static final double RARELY_FULL = 3e-6;
     private final AnnualSums sums;
     private final LayerTerms terms;
     private final Programme programme;
@@ -23,7 +29,10 @@ final class LayerAnswer {
     private final LatticeSum[] levels = new LatticeSum[3];
     private int start;
     private SumFacts facts;
-    private Figure[] figures;
+    private Figure[] means;
+    private Figure[] points;
+    /** Errors of the means that a finer lattice makes smaller. */
+    private double[] latticeError;
 
     /** @param start level to begin with, where an earlier answer for this layer ended */
     LayerAnswer(AnnualSums sums, LayerTerms terms, Programme programme, Accuracy accuracy, int start) {
@@ -58,8 +67,7 @@ final class LayerAnswer {
             }
         }
         compute();
-        double wanted = accuracy.relative() * scale();
-        while (figures[0].error() > wanted && 2L * sums.cells(start + 2) <= accuracy.mostCells()) {
+        while (!good() && 2L * sums.cells(start + 2) <= accuracy.mostCells()) {
             start++;
             levels[0] = levels[1];
             levels[1] = levels[2];
@@ -68,10 +76,28 @@ final class LayerAnswer {
         }
     }
 
+    /** Whether the lattice's part of the errors is small: of the limit for the expected loss, and, while that is cheap, of each figure itself. */
+    private boolean good() {
+        if (latticeError[0] > accuracy.relative() * scale()) {
+            return false;
+        }
+        double part = OWN_SIZE * accuracy.relative();
+        boolean cheap = 2L * sums.cells(start + 2) <= CHEAP_CELLS;
+        for (int k = 2; cheap && k < points.length; k++) {
+            if (points[k].error() > QUANTILES * accuracy.relative() * points[k].value() + 1e-5 * levels[2].step()) {
+                return false;
+            }
+        }
+        return !cheap || latticeError[0] <= part * Math.abs(means[0].value()) && latticeError[1] <= part * means[1].value()
+                && points[0].error() <= part * points[0].value() + floor() && points[1].error() <= 2 * part * points[1].value() + floor();
+    }
+
     private boolean rare() {
         double[] mean = levels[2].mean();
         int at = Math.min(mean.length - 1, (int) (terms.deductible() / levels[2].step()));
-        return terms.deductible() > 0 && mean.length > 0 && mean[at] < RARE * mean[0];
+        int last = Math.min(mean.length, sums.cells(start + 2)) - 1;
+        return terms.deductible() > 0 && mean[at] < RARE * mean[0]
+                || terms.annualLimit() < Double.POSITIVE_INFINITY && mean[last] < RARELY_FULL * mean[0];
     }
 
     /** What errors are measured by: L, M where there is no L, the expected loss where there is neither. */
@@ -83,19 +109,40 @@ final class LayerAnswer {
     private void compute() {
         facts = sums.facts(levels[2]);
         Loading loading = programme.pricing().loading();
-        List<Double> asked = programme.buyer().levels();
         double[][] rows = new double[3][];
         for (int k = 0; k < 3; k++) {
-            rows[k] = new LevelFigures(levels[k], terms, facts, sums.end()).row(loading, asked, programme.buyer().tailLevel());
+            rows[k] = figures(levels[k]).means(loading, programme.buyer().tailLevel());
         }
-        figures = new Figure[rows[0].length];
-        double depth = sums.end() - terms.deductible();
-        double probability = sums.jointError() + levels[2].noise();
-        for (int f = 0; f < figures.length; f++) {
-            boolean isProbability = f == 2 || f == 3;
-            double floor = isProbability ? probability : f >= 8 ? levels[2].step() * 1e-3 : probability * depth;
-            figures[f] = Extrapolation.of(rows[0][f], rows[1][f], rows[2][f], floor);
+        means = new Figure[rows[0].length];
+        latticeError = new double[means.length];
+        double floor = floor() * sums.weightOfErrors();
+        for (int f = 0; f < means.length; f++) {
+            Figure figure = Extrapolation.of(rows[0][f], rows[1][f], rows[2][f]);
+            latticeError[f] = figure.error();
+            means[f] = new Figure(figure.value(), figure.error() + (f == 0 ? floor : Math.max(floor, floor() * (sums.end() - terms.deductible()))));
         }
+        points = points();
+    }
+
+    /** Error of probabilities that no lattice removes. */
+    private double floor() {
+        return sums.jointError() + levels[2].noise();
+    }
+
+    private LevelFigures figures(LatticeSum sum) {
+        return new LevelFigures(sum, terms, facts, sums.end());
+    }
+
+    /** Point values of the two finest lattices, each corrected by the one below it. */
+    private Figure[] points() {
+        double[] fine = figures(levels[2].corrected(levels[1])).points(programme.buyer().levels());
+        double[] coarse = figures(levels[1].corrected(levels[0])).points(programme.buyer().levels());
+        Figure[] points = new Figure[fine.length];
+        double probability = floor();
+        for (int f = 0; f < fine.length; f++) {
+            points[f] = new Figure(fine[f], Math.abs(fine[f] - coarse[f]) + (f < 2 ? probability : 1e-6 * levels[2].step()));
+        }
+        return points;
     }
 
     LayerStatistics statistics() {
@@ -103,31 +150,31 @@ final class LayerAnswer {
         SortedMap<Double, Figure> valueAtRisk = new TreeMap<>();
         SortedMap<Double, Figure> occurrence = new TreeMap<>();
         for (int k = 0; k < asked.size(); k++) {
-            Figure v = figures[8 + k];
+            Figure v = points[2 + k];
             valueAtRisk.put(asked.get(k), new Figure(Math.min(Math.max(0, v.value()), terms.annualLimit()), v.error()));
             double largest = sums.largestEvent(asked.get(k));
             occurrence.put(asked.get(k), Double.isNaN(largest) ? Figure.UNDEFINED : new Figure(largest, 1e-12 * largest));
         }
-        Figure mean = positive(figures[0]);
+        Figure mean = positive(means[0]);
         Bracket bracket = Double.isInfinite(mean.value()) ? null : sums.bracket(start + 2, levels[2]);
-        PremiumBuildUp premium = PremiumBuildUp.of(programme.pricing(), new PremiumBuildUp.Inputs(mean.value(), figures[1].value(),
-                figures[6].value(), figures[5].value(), figures[4].value()));
+        PremiumBuildUp premium = PremiumBuildUp.of(programme.pricing(), new PremiumBuildUp.Inputs(mean.value(), means[1].value(),
+                means[4].value(), means[3].value(), means[2].value()));
         double premiumError = error(premium.slopes());
-        return new LayerStatistics(Engine.TRANSFORM, mean, bracket, positive(figures[1]), probability(figures[2]),
-                probability(figures[3]), Figure.exact(facts.expectedEvents()), positive(figures[4]),
+        return new LayerStatistics(Engine.TRANSFORM, mean, bracket, positive(means[1]), probability(points[0]),
+                probability(points[1]), Figure.exact(facts.expectedEvents()), positive(means[2]),
                 new Figure(premium.net(), netError(premium, premiumError)), new Figure(premium.upfront(), premiumError), valueAtRisk,
-                positive(figures[7]), occurrence);
+                positive(means[5]), occurrence);
     }
 
     private double error(PremiumBuildUp.Slopes slopes) {
-        return part(slopes.byExpectedLoss(), figures[0]) + part(slopes.byStandardDeviation(), figures[1]) + part(slopes.byTail(), figures[6])
-                + part(slopes.byDistorted(), figures[5]) + part(slopes.byReinstatementFactor(), figures[4]);
+        return part(slopes.byExpectedLoss(), means[0]) + part(slopes.byStandardDeviation(), means[1]) + part(slopes.byTail(), means[4])
+                + part(slopes.byDistorted(), means[3]) + part(slopes.byReinstatementFactor(), means[2]);
     }
 
     /** The net premium is the upfront one without the divisor, and does not move with the reinstatement factor. */
     private double netError(PremiumBuildUp premium, double upfrontError) {
         double divisor = premium.upfront() == 0 ? 1 : premium.net() / premium.upfront();
-        return Math.max(0, upfrontError - part(premium.slopes().byReinstatementFactor(), figures[4])) * divisor;
+        return Math.max(0, upfrontError - part(premium.slopes().byReinstatementFactor(), means[2])) * divisor;
     }
 
     private static double part(double slope, Figure figure) {

@@ -82,15 +82,18 @@ final class LayerLattice {
         return reach >= 4;
     }
 
-    /** A on the lattice of a level, with mass spread to the lattice points. */
-    LatticeSum sum(LatentNodes nodes, int level) {
+    /**
+     * A on the lattice of a level, with mass spread to the lattice points.
+     *
+     * @param atomSurvival from {@link #atomSurvival}
+     */
+    LatticeSum sum(LatentNodes nodes, int level, double[] atomSurvival) {
         Level at = level(level);
         double[] mean = survival(nodes, at);
         double top = mean.length > 0 ? mean[0] : 0;
         double wrapped = Math.exp(-at.spectrum.tilt() * at.spectrum.length()) * Math.max(0, mean[mean.length - 1]);
         double rounding = 2e-16 * top * Math.exp(at.spectrum.tilt() * at.wanted);
-        double[] atomic = atomSurvival(nodes);
-        return new LatticeSum(at.step, mean, atoms().step, atomic, wrapped + rounding);
+        return new LatticeSum(at.step, mean, atoms().step, atomSurvival, wrapped + rounding);
     }
 
     /** Cell averages of P(A' &gt; y) for the law of A from event laws below the true ones in increasing convex order. */
@@ -224,7 +227,8 @@ final class LayerLattice {
         return deficit;
     }
 
-    private double[] atomSurvival(LatentNodes nodes) {
+    /** P(A &gt; k·(step of the atoms), A an atom), k = 0, 1, … */
+    double[] atomSurvival(LatentNodes nodes) {
         Level at = atoms();
         double[][] deficit = JointDeficit.of(nodes, at.deficits);
         // a year with any loss that is no atom is no atom: U at infinity, taken off before the inverse transform

@@ -171,19 +171,19 @@ final class LevelFigures {
         return quantile + Math.max(0, mean - below) / (1 - level);
     }
 
-    /** All figures in a row, in the order in which {@link LayerAnswer} reads them. */
-    double[] row(Loading loading, List<Double> levels, double tailLevel) {
-        double[] row = new double[8 + levels.size()];
-        row[0] = expectedLoss();
-        row[1] = standardDeviation();
-        row[2] = attachment();
-        row[3] = exhaustion();
-        row[4] = reinstatementFactor();
-        row[5] = distorted(loading);
-        row[6] = loading instanceof Loading.CostOfCapital capital ? tailValueAtRisk(capital.level()) : Double.NaN;
-        row[7] = tailValueAtRisk(tailLevel);
+    /** Figures that are extrapolated from lattice to lattice, in the order in which {@link LayerAnswer} reads them. */
+    double[] means(Loading loading, double tailLevel) {
+        return new double[] {expectedLoss(), standardDeviation(), reinstatementFactor(), distorted(loading),
+            loading instanceof Loading.CostOfCapital capital ? tailValueAtRisk(capital.level()) : Double.NaN, tailValueAtRisk(tailLevel)};
+    }
+
+    /** Figures read at a point of the law: attachment, exhaustion, and the values at risk. */
+    double[] points(List<Double> levels) {
+        double[] row = new double[2 + levels.size()];
+        row[0] = attachment();
+        row[1] = exhaustion();
         for (int k = 0; k < levels.size(); k++) {
-            row[8 + k] = valueAtRisk(levels.get(k));
+            row[2 + k] = valueAtRisk(levels.get(k));
         }
         return row;
     }

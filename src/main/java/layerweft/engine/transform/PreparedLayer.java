@@ -14,12 +14,17 @@ import layerweft.model.treaty.Treaty;
  *
  * @param perils indices in the portfolio of the perils that can reach the layer, rising
  * @param events their event laws
+ * @param moments of these laws
  * @param meanCounts E[N_i]
  * @param cutCounts probability left out where counts are cut
  * @param splitEvents whether any peril's event is a sum of parts
  */
-record PreparedLayer(LayerTerms terms, int[] perils, List<EventLaw> events, double[] meanCounts, double cutCounts, boolean splitEvents,
-        LayerLattice lattice) {
+record PreparedLayer(LayerTerms terms, int[] perils, List<EventLaw> events, EventMoments[] moments, double[] meanCounts, double cutCounts,
+        boolean splitEvents, LayerLattice lattice) {
+
+    /** P(o &gt; 0), E[o] and E[o²] of one event. */
+    record EventMoments(double hitChance, double mean, double secondMoment) {}
+
 
     static PreparedLayer of(Treaty treaty, int layer, Accuracy accuracy) {
         LayerTerms terms = treaty.layer(layer).terms();
@@ -45,8 +50,9 @@ record PreparedLayer(LayerTerms terms, int[] perils, List<EventLaw> events, doub
         double reach = Double.isInfinite(end) ? openEnd(treaty, perils, events, terms, top) : end;
         double[] bends = DoubleStream.of(terms.deductible(), end).filter(x -> x > 0 && x < Double.POSITIVE_INFINITY).toArray();
         LayerLattice lattice = new LayerLattice(events, top, reach, bends);
+        EventMoments[] moments = events.stream().map(e -> new EventMoments(e.hitChance(), e.mean(), e.secondMoment())).toArray(EventMoments[]::new);
         double cut = accuracy.ofCounts() * perils.size();
-        return new PreparedLayer(terms, perils.stream().mapToInt(Integer::intValue).toArray(), events, means, cut, split, lattice);
+        return new PreparedLayer(terms, perils.stream().mapToInt(Integer::intValue).toArray(), events, moments, means, cut, split, lattice);
     }
 
     private static EventLaw event(Treaty treaty, int layer, int i, LayerTerms terms, double cap) {
@@ -98,5 +104,26 @@ record PreparedLayer(LayerTerms terms, int[] perils, List<EventLaw> events, doub
             end += frequency.mean() * mean + 12 * Math.sqrt(Math.max(0, variance));
         }
         return Math.max(terms.deductible(), 0) + end + 4 * cap;
+    }
+
+    /**
+     * How much an error of 1 in every joint probability of counts can move the mean annual sum: by Abel summation the largest count
+     * times the mean of one event, peril by peril.
+     */
+    double weightOfCounts() {
+        double weight = 0;
+        for (int i = 0; i < meanCounts.length; i++) {
+            weight += (meanCounts[i] + 12 * Math.sqrt(meanCounts[i]) + 12) * Math.min(moments[i].mean(), events.get(i).cap());
+        }
+        return weight;
+    }
+
+    /** Error of the perils' chances to hit or exhaust, over a year. */
+    double chanceError() {
+        double error = 0;
+        for (int i = 0; i < meanCounts.length; i++) {
+            error += meanCounts[i] * events.get(i).chanceError();
+        }
+        return error;
     }
 }

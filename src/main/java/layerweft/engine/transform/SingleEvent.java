@@ -10,11 +10,6 @@ import layerweft.model.treaty.LayerTerms;
 record SingleEvent(SeverityModel severity, LayerTerms terms, double cap) implements EventLaw {
     /** Relative slack for amounts that should meet in exact arithmetic: an atom at R + L must fill the layer. */
     private static final double SLACK = 1e-13;
-    /** A difference of limited means that keeps fewer digits than this is replaced by quadrature of the survival function. */
-    private static final double DIGITS = 1e-12;
-    /** Gauss–Legendre on [0, 1], four points. */
-    private static final double[] POINTS = {0.06943184420297371, 0.33000947820757187, 0.6699905217924281, 0.9305681557970263};
-    private static final double[] WEIGHTS = {0.17392742256872693, 0.32607257743127307, 0.32607257743127307, 0.17392742256872693};
 
     /** The ground-up loss at which o passes x. */
     private double groundUp(double x) {
@@ -43,11 +38,7 @@ record SingleEvent(SeverityModel severity, LayerTerms terms, double cap) impleme
 
     @Override
     public double mean() {
-        double q = terms.quotaShare();
-        double start = groundUp(0);
-        double end = groundUp(terms.occurrenceLimit());
-        double paidAtOnce = terms.hasFranchise() ? Math.min(terms.franchise(), terms.occurrenceLimit()) * hitChance() : 0;
-        return paidAtOnce + q * (severity.limitedMean(end) - severity.limitedMean(start));
+        return layerMean(0, terms.occurrenceLimit());
     }
 
     /** E[(min(s, b) − a)²; s &gt; a] = E[min(s, b)²] − E[min(s, a)²] − 2a(E[min(s, b)] − E[min(s, a)]); a franchise pays from 0: + 2aE + a²P. */
@@ -61,7 +52,7 @@ record SingleEvent(SeverityModel severity, LayerTerms terms, double cap) impleme
             return high;
         }
         double squares = high - severity.limitedSecondMoment(start);
-        double means = severity.limitedMean(end) - severity.limitedMean(start);
+        double means = severity.layerMean(start, end);
         if (!terms.hasFranchise()) {
             return Math.max(0, q * q * (squares - 2 * start * means));
         }
@@ -78,52 +69,25 @@ record SingleEvent(SeverityModel severity, LayerTerms terms, double cap) impleme
     @Override
     public double[] cellSurvival(double step, int cells) {
         double[] mean = new double[cells];
-        double q = terms.quotaShare();
-        double right = survival(0);
-        double limitedRight = severity.limitedMean(groundUp(0));
+        double right = hitChance();
         for (int k = 0; k < cells; k++) {
             double left = right;
-            double limitedLeft = limitedRight;
             double a = k * step;
             double b = k + 1 == cells ? cap : (k + 1) * step;
             right = survival(b);
-            limitedRight = severity.limitedMean(groundUp(b));
-            boolean plain = !terms.hasFranchise() || a >= terms.franchise();
-            double high = left;
-            if (high <= 0) {
-                mean[k] = 0;
-            } else if (right >= high) {
-                mean[k] = high;
-            } else if (plain && 4e-16 * q * limitedRight <= DIGITS * (b - a) * high) {
-                mean[k] = Math.min(high, Math.max(right, q * (limitedRight - limitedLeft) / (b - a)));
-            } else {
-                mean[k] = average(a, b, high, right, 0);
-            }
+            mean[k] = left <= right ? left : Math.min(left, Math.max(right, layerMean(a, b) / (b - a)));
         }
         return mean;
     }
 
-    /** Mean of P(o &gt; x) over [a, b] by halving until the four-point rule settles; at a jump the halves close in on it. */
-    private double average(double a, double b, double left, double right, int depth) {
-        if (left - right <= 1e-14 * left) {
-            return 0.5 * (left + right);
+    /** ∫_a^b P(o &gt; x) dx; below a franchise the probability stands still. */
+    private double layerMean(double a, double b) {
+        double q = terms.quotaShare();
+        if (!terms.hasFranchise() || a >= terms.franchise()) {
+            return q * severity.layerMean(groundUp(a), groundUp(b));
         }
-        double whole = rule(a, b);
-        double middle = 0.5 * (a + b);
-        double halves = 0.5 * (rule(a, middle) + rule(middle, b));
-        if (depth == 40 || Math.abs(whole - halves) <= 1e-13 * halves) {
-            return halves;
-        }
-        double centre = survival(middle);
-        return 0.5 * (average(a, middle, left, centre, depth + 1) + average(middle, b, centre, right, depth + 1));
-    }
-
-    private double rule(double a, double b) {
-        double sum = 0;
-        for (int j = 0; j < POINTS.length; j++) {
-            sum += WEIGHTS[j] * survival(a + (b - a) * POINTS[j]);
-        }
-        return sum;
+        double middle = Math.min(b, terms.franchise());
+        return (middle - a) * hitChance() + (b > middle ? q * severity.layerMean(groundUp(middle), groundUp(b)) : 0);
     }
 
     @Override

@@ -27,6 +27,7 @@ final class SplitEvent implements EventLaw {
     private final Map<Double, double[]> sums = new HashMap<>();
     private final double hit;
     private final double full;
+    private double chanceError;
 
     private SplitEvent(EventLoss.Split loss, int[] members, LayerTerms terms, double cap) {
         this.parts = loss.subPerils();
@@ -92,6 +93,7 @@ final class SplitEvent implements EventLaw {
         int cells = REFERENCE_CELLS;
         double coarse = at(sum(amount / cells, cells + 3), cells);
         double fine = at(sum(amount / (2 * cells), 2 * cells + 3), 2 * cells);
+        chanceError = Math.max(chanceError, Math.abs(fine - coarse) / 3 + JOINT_ERROR);
         return Math.max(0, Math.min(1, (4 * fine - coarse) / 3));
     }
 
@@ -112,13 +114,10 @@ final class SplitEvent implements EventLaw {
     private double[] averages(SeverityModel severity, double step, int cells) {
         double q = terms.quotaShare();
         double[] mean = new double[cells];
-        double limited = 0;
         for (int k = 0; k < cells; k++) {
-            double next = severity.limitedMean((k + 1) * step / q);
             double right = severity.survival((k + 1) * step / q);
             double left = severity.survival(k * step / q);
-            mean[k] = Math.min(left, Math.max(right, q * (next - limited) / step));
-            limited = next;
+            mean[k] = left <= right ? left : Math.min(left, Math.max(right, severity.layerMean(k * step / q, (k + 1) * step / q) * q / step));
         }
         return mean;
     }
@@ -170,6 +169,11 @@ final class SplitEvent implements EventLaw {
     @Override
     public double fullChance() {
         return full;
+    }
+
+    @Override
+    public double chanceError() {
+        return chanceError;
     }
 
     @Override

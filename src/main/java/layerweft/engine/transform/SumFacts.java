@@ -1,7 +1,5 @@
 package layerweft.engine.transform;
 
-import java.util.List;
-
 /**
  * What is known of a layer's annual sum A of occurrence losses without any lattice of A.
  *
@@ -17,18 +15,18 @@ record SumFacts(double lossChance, double mean, double secondMoment, double expe
      *
      * @param means E[N_i]
      */
-    static SumFacts of(List<EventLaw> events, double[] means, LatentNodes nodes) {
-        int d = events.size();
+    static SumFacts of(PreparedLayer.EventMoments[] events, double[] means, LatentNodes nodes) {
+        int d = events.length;
         double mean = 0;
         double second = 0;
         double expectedEvents = 0;
         double[] hits = new double[d];
         double[] losses = new double[d];
         for (int i = 0; i < d; i++) {
-            hits[i] = events.get(i).hitChance();
-            losses[i] = events.get(i).mean();
+            hits[i] = events[i].hitChance();
+            losses[i] = events[i].mean();
             mean += means[i] * losses[i];
-            second += means[i] * events.get(i).secondMoment();
+            second += means[i] * events[i].secondMoment();
             expectedEvents += means[i] * hits[i];
         }
         if (Double.isInfinite(second) || Double.isInfinite(mean)) {

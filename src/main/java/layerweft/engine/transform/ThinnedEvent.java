@@ -21,6 +21,11 @@ record ThinnedEvent(EventLaw law, double chance) implements EventLaw {
     }
 
     @Override
+    public double chanceError() {
+        return chance * law.chanceError();
+    }
+
+    @Override
     public double mean() {
         return chance * law.mean();
     }

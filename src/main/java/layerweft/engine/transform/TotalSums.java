@@ -43,12 +43,12 @@ final class TotalSums implements AnnualSums {
 
     private LatticeSum make(int level) {
         if (totals.isEmpty()) {
-            return layer.lattice().sum(new LatentNodes(new double[] {1}, new double[0][][], 0), level);
+            return new LatticeSum(layer.lattice().step(level), new double[cells(level) + 4], 2 * end(), new double[] {0}, 0);
         }
         CountMargin[] margins = new CountMargin[totals.size()];
         double noise = 0;
         for (int i = 0; i < margins.length; i++) {
-            LatticeSum total = totals.get(i).sum(alone[i], level);
+            LatticeSum total = totals.get(i).sum(alone[i], level, new double[] {0});
             noise += total.noise();
             margins[i] = margin(total.mean());
         }
@@ -79,10 +79,10 @@ final class TotalSums implements AnnualSums {
         double mean = 0;
         double expectedEvents = 0;
         for (int i = 0; i < layer.events().size(); i++) {
-            mean += layer.meanCounts()[i] * layer.events().get(i).mean();
-            expectedEvents += layer.meanCounts()[i] * layer.events().get(i).hitChance();
+            mean += layer.meanCounts()[i] * layer.moments()[i].mean();
+            expectedEvents += layer.meanCounts()[i] * layer.moments()[i].hitChance();
         }
-        double second = layer.events().stream().anyMatch(e -> Double.isInfinite(e.secondMoment())) ? Double.POSITIVE_INFINITY
+        double second = Arrays.stream(layer.moments()).anyMatch(e -> Double.isInfinite(e.secondMoment())) ? Double.POSITIVE_INFINITY
                 : finest.pieces(0, end()).secondMoment();
         return new SumFacts(1 - nothing, mean, second, expectedEvents);
     }
@@ -109,7 +109,7 @@ final class TotalSums implements AnnualSums {
         double step = layer.lattice().step(fine);
         for (int i = 0; i < low.length; i++) {
             LayerLattice lattice = totals.get(i);
-            LatticeSum spread = lattice.sum(alone[i], fine);
+            LatticeSum spread = lattice.sum(alone[i], fine, new double[] {0});
             double[] fused = lattice.lowerSum(alone[i], fine);
             double lost = lattice.lostMean(fine, new double[] {layer.meanCounts()[i]}) + spread.noise() * end() + layer.cutCounts() * end();
             int n = fused.length;
@@ -147,8 +147,13 @@ final class TotalSums implements AnnualSums {
     }
 
     @Override
+    public double weightOfErrors() {
+        return end() - layer.terms().deductible();
+    }
+
+    @Override
     public double jointError() {
-        return 100 * JOINT_ERROR + layer.cutCounts();
+        return 100 * JOINT_ERROR + layer.cutCounts() + layer.chanceError();
     }
 
     /** The copula says nothing of how a year's total comes about. */
