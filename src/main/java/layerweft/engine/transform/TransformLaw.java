@@ -32,6 +32,20 @@ public final class TransformLaw {
         return end - terms.deductible();
     }
 
+    /** Rising amounts from 0 to {@link #largest()} between which {@link #averages()} are known. */
+    public double[] bounds() {
+        double[] bounds = sum.pieces(terms.deductible(), end).bounds();
+        for (int k = 0; k < bounds.length; k++) {
+            bounds[k] -= terms.deductible();
+        }
+        return bounds;
+    }
+
+    /** Averages of P(Y &gt; y) between neighbouring {@link #bounds()}, for the law whose mass is spread, mean by mean, to the lattice. */
+    public double[] averages() {
+        return sum.pieces(terms.deductible(), end).average();
+    }
+
     /** E[Y]. */
     public double mean() {
         return figures.expectedLoss();
