@@ -21,22 +21,37 @@ import layerweft.model.treaty.Treaty;
 
 /** One layer taken apart: its occurrence terms on each of its perils alone, and on all of them independent of each other. */
 final class AloneLayers {
+    /** Laws are not extrapolated: a lattice as fine as 8,192 cells. */
+    private static final Accuracy OF_LAWS = new Accuracy(1e-12, 1 << 13);
+    private static final Accuracy OF_VALUES = Accuracy.of(1e-7);
     private final Portfolio portfolio;
     private final Treaty original;
     private final Layer layer;
-    private final Accuracy accuracy;
     private final List<List<String>> covered = new ArrayList<>();
 
-    AloneLayers(Treaty treaty, int layer, Accuracy accuracy) {
+    AloneLayers(Treaty treaty, int layer) {
         this.original = treaty;
         this.portfolio = treaty.portfolio().with(Dependence.NONE);
         this.layer = treaty.layer(layer);
-        this.accuracy = accuracy;
         for (int i = 0; i < portfolio.perils().size(); i++) {
-            if (treaty.cover(layer).covers(i)) {
+            if (treaty.cover(layer).covers(i) && reaches(i, treaty, layer)) {
                 covered.add(names(treaty, layer, i));
             }
         }
+    }
+
+    /** Whether events of a peril that happen at all can be large enough. */
+    private boolean reaches(int i, Treaty treaty, int j) {
+        Peril peril = portfolio.perils().get(i);
+        double largest = 0;
+        if (peril.eventLoss() instanceof EventLoss.Single single) {
+            largest = single.severity().upperEnd();
+        } else if (peril.eventLoss() instanceof EventLoss.Split split) {
+            for (int k = 0; k < split.subPerils().size(); k++) {
+                largest += treaty.cover(j).covers(i, k) ? split.subPerils().get(k).severity().upperEnd() : 0;
+            }
+        }
+        return peril.frequency().mean() > 0 && layer.terms().occurrenceLoss(largest) > 0;
     }
 
     private static List<String> names(Treaty treaty, int layer, int i) {
@@ -49,19 +64,19 @@ final class AloneLayers {
                 .mapToObj(k -> peril.name() + "/" + split.subPerils().get(k).name()).toList();
     }
 
-    /** Number of perils covered. */
+    /** Number of covered perils that can reach the layer. */
     int perils() {
         return covered.size();
     }
 
     /** Why the laws of the A_i are not known; empty where they are. */
     Optional<String> refusal() {
-        return TransformEngine.refusal(treaty(List.of(whole())), 0);
+        return covered.isEmpty() ? Optional.empty() : TransformEngine.refusal(treaty(List.of(whole())), 0);
     }
 
     /** E of the layer for independent A_i. */
     Figure independent() {
-        return new TransformEngine(treaty(List.of(whole())), Accuracy.of(1e-7)).price(0).expectedLoss();
+        return new TransformEngine(treaty(List.of(whole())), OF_VALUES).price(0).expectedLoss();
     }
 
     private Layer whole() {
@@ -69,14 +84,16 @@ final class AloneLayers {
         return with("whole", covered.stream().flatMap(List::stream).toList(), new AnnualTerms(terms.deductible(), terms.annualLimit()));
     }
 
-    /** The laws of min(A_i, cap). */
-    List<Margin> margins(double cap) {
+    /** The laws of min(A_i, cap): on the finest lattice, and on that of twice the step. */
+    Margin[][] margins(double cap) {
         List<Layer> layers = each(new AnnualTerms(0, cap));
-        TransformEngine engine = new TransformEngine(treaty(layers), accuracy);
-        List<Margin> margins = new ArrayList<>();
+        TransformEngine engine = new TransformEngine(treaty(layers), OF_LAWS);
+        Margin[][] margins = new Margin[2][layers.size()];
         for (int i = 0; i < layers.size(); i++) {
             TransformLaw law = engine.law(i);
-            margins.add(Margin.of(law.bounds(), law.averages()));
+            TransformLaw coarser = law.coarser();
+            margins[0][i] = Margin.of(law.bounds(), law.averages());
+            margins[1][i] = Margin.of(coarser.bounds(), coarser.averages());
         }
         return margins;
     }
@@ -84,7 +101,7 @@ final class AloneLayers {
     /** ΣE[(A_i − y)+]. */
     Figure beyond(double y) {
         List<Layer> layers = each(new AnnualTerms(y, Double.POSITIVE_INFINITY));
-        TransformEngine engine = new TransformEngine(treaty(layers), Accuracy.of(1e-7));
+        TransformEngine engine = new TransformEngine(treaty(layers), OF_VALUES);
         Figure sum = Figure.exact(0);
         for (int i = 0; i < layers.size(); i++) {
             sum = sum.plus(engine.price(i).expectedLoss());

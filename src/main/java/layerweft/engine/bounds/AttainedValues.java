@@ -12,6 +12,7 @@ import java.util.List;
 final class AttainedValues {
     private static final int SLICES = 2048;
     private static final int STARTS_KEPT = 2;
+    private static final int EXCHANGES = 200_000;
     private final Margin[] margins;
     private final AnnualLayer layer;
     private final double width;
@@ -46,30 +47,33 @@ final class AttainedValues {
         List<Start> starts = new ArrayList<>();
         Rearrangement matrix = new Rearrangement(columns);
         for (int block : blocks()) {
-            arrange(matrix, block, sign);
+            arrange(matrix, block, sign, 6);
             starts.add(new Start(block, sign * matrix.mean(layer)));
         }
         starts.sort(Comparator.comparingDouble(Start::value).reversed());
         double best = Double.NEGATIVE_INFINITY;
         for (Start start : starts.subList(0, Math.min(STARTS_KEPT, starts.size()))) {
-            arrange(matrix, start.block, sign);
+            arrange(matrix, start.block, sign, 40);
             matrix.improve(layer, sign, 20);
+            matrix.exchange(layer, sign, EXCHANGES);
             best = Math.max(best, sign * expectation(matrix, sign));
         }
         return sign * best;
     }
 
+    /** Sizes of the upper block that are tried. */
     private static int[] blocks() {
-        return java.util.stream.IntStream.of(Rearrangement.splits(SLICES)).filter(k -> k == 0 || k >= 8).toArray();
+        return new int[] {0, SLICES / 256, SLICES / 128, SLICES / 64, SLICES / 32, SLICES / 16, SLICES / 11, SLICES / 8, SLICES * 3 / 16, SLICES / 4,
+            SLICES * 3 / 8, SLICES / 2, SLICES * 3 / 4, SLICES};
     }
 
     /** Upper block flattened and the rest alongside to raise the mean; upper block alongside and the rest flattened to lower it. */
-    private static void arrange(Rearrangement matrix, int block, int sign) {
+    private static void arrange(Rearrangement matrix, int block, int sign, int sweeps) {
         matrix.alongside();
         if (sign > 0) {
-            matrix.flatten(0, block);
+            matrix.flatten(0, block, sweeps);
         } else {
-            matrix.flatten(block, SLICES);
+            matrix.flatten(block, SLICES, sweeps);
         }
     }
 

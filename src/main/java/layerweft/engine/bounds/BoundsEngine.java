@@ -1,8 +1,6 @@
 package layerweft.engine.bounds;
 
-import java.util.List;
 import java.util.Optional;
-import layerweft.engine.transform.Accuracy;
 import layerweft.figures.Figure;
 import layerweft.model.treaty.Layer;
 import layerweft.model.treaty.LayerTerms;
@@ -13,10 +11,6 @@ import layerweft.model.treaty.Treaty;
  * the portfolio says of dependence between perils is not used; the copula of sub-perils inside an event is.
  */
 public final class BoundsEngine {
-    /** Errors of a millionth of the limit and less, where the lattice has so many cells. */
-    private static final Accuracy FINE = new Accuracy(1e-9, 1 << 13);
-    /** The same with half the cells: what the values change by is their error. */
-    private static final Accuracy HALF = new Accuracy(1e-9, 1 << 12);
     private final Treaty treaty;
 
     public BoundsEngine(Treaty treaty) {
@@ -28,7 +22,7 @@ public final class BoundsEngine {
         if (!treaty.layer(layer).inuring().isEmpty()) {
             return Optional.of("recoveries of other layers inure to it, event by event");
         }
-        return new AloneLayers(treaty, layer, FINE).refusal();
+        return new AloneLayers(treaty, layer).refusal();
     }
 
     /**
@@ -40,7 +34,10 @@ public final class BoundsEngine {
         refusal(j).ifPresent(reason -> {
             throw new IllegalArgumentException("layer \"" + treaty.layer(j).name() + "\" has no bounds: " + reason);
         });
-        AloneLayers alone = new AloneLayers(treaty, j, FINE);
+        AloneLayers alone = new AloneLayers(treaty, j);
+        if (alone.perils() == 0) {
+            return LayerRange.free(0, 0);
+        }
         Figure independent = alone.independent();
         LayerTerms terms = treaty.layer(j).terms();
         if (!terms.hasAnnualTerms() || alone.perils() == 1 || independent.infinite()) {
@@ -48,18 +45,9 @@ public final class BoundsEngine {
         }
         AnnualLayer layer = new AnnualLayer(terms.deductible(), terms.annualLimit());
         Figure beyond = layer.limited() ? Figure.exact(0) : alone.beyond(terms.deductible());
-        Margin[] margins = reaching(alone.margins(layer.cap()));
-        if (margins.length < 2) {
-            return LayerRange.free(independent.value(), independent.error());
-        }
-        Margin[] coarse = reaching(new AloneLayers(treaty, j, HALF).margins(layer.cap()));
-        double error = Math.abs(ParallelRun.comonotone(margins, layer) - ParallelRun.comonotone(coarse, layer)) + independent.error();
-        return SumRange.of(margins, layer, independent.value() - beyond.value(), error).plus(beyond.value(), beyond.error());
-    }
-
-    /** Margins without those perils that never reach the layer. */
-    private static Margin[] reaching(List<Margin> margins) {
-        return margins.stream().filter(m -> m.largest() > 0).toArray(Margin[]::new);
+        Margin[][] margins = alone.margins(layer.cap());
+        double error = Math.abs(ParallelRun.comonotone(margins[0], layer) - ParallelRun.comonotone(margins[1], layer)) + independent.error();
+        return SumRange.of(margins[0], layer, independent.value() - beyond.value(), error).plus(beyond.value(), beyond.error());
     }
 
     /** The same for a layer as it is placed. */

@@ -1,6 +1,7 @@
 package layerweft.engine.bounds;
 
 import java.util.Arrays;
+import layerweft.model.random.KeyedStream;
 
 /**
  * The rearrangement algorithm (Puccetti &amp; Rüschendorf 2012, "Computation of sharp bounds on the distribution of a function of dependent
@@ -12,8 +13,8 @@ import java.util.Arrays;
  * the other way round: where a layer has a deductible and a limit, its loss is convex in small and concave in large sums.
  */
 final class Rearrangement {
-    private static final int MOST_SWEEPS = 60;
     private static final double STILL = 1e-7;
+    private static final long SEED = 1;
     private final double[][] columns;
     private final int[][] place;
     private final double[] sum;
@@ -46,9 +47,9 @@ final class Rearrangement {
     }
 
     /** Flattens the sums of rows {@code from} to {@code to} − 1, which hold the same ranks in every column. */
-    void flatten(int from, int to) {
+    void flatten(int from, int to, int mostSweeps) {
         double spread = spread(from, to);
-        for (int sweep = 0; sweep < MOST_SWEEPS && to - from > 1; sweep++) {
+        for (int sweep = 0; sweep < mostSweeps && to - from > 1; sweep++) {
             for (int i = 0; i < columns.length; i++) {
                 without(i, from, to);
                 ranked.falling(rest, from, to, order);
@@ -137,6 +138,28 @@ final class Rearrangement {
         }
         sizes[n++] = rows;
         return Arrays.copyOf(sizes, n);
+    }
+
+    /**
+     * Exchanges the ranks of one peril between two rows drawn at random, wherever the mean of the layer's losses does not get worse: what the
+     * ordering of whole columns cannot reach, above all with few and heavy atoms.
+     */
+    void exchange(AnnualLayer layer, int sign, int trials) {
+        KeyedStream random = new KeyedStream(SEED);
+        for (int trial = 0; trial < trials; trial++) {
+            int i = random.nextInt(columns.length);
+            int a = random.nextInt(rows);
+            int b = random.nextInt(rows);
+            double shift = columns[i][place[i][b]] - columns[i][place[i][a]];
+            double gain = layer.loss(sum[a] + shift) + layer.loss(sum[b] - shift) - layer.loss(sum[a]) - layer.loss(sum[b]);
+            if (sign * gain >= 0 && shift != 0) {
+                int rank = place[i][a];
+                place[i][a] = place[i][b];
+                place[i][b] = rank;
+                sum[a] += shift;
+                sum[b] -= shift;
+            }
+        }
     }
 
     private void without(int i, int from, int to) {

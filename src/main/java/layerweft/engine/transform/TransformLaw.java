@@ -13,13 +13,26 @@ public final class TransformLaw {
     private final LevelFigures figures;
     private final AnnualSums sums;
     private final double end;
+    private final SumFacts facts;
+    private final LatticeSum before;
 
-    TransformLaw(AnnualSums sums, LatticeSum sum, SumFacts facts, LayerTerms terms) {
+    /** @param before the sum on the lattice of twice the step, null where it is not kept */
+    TransformLaw(AnnualSums sums, LatticeSum sum, LatticeSum before, SumFacts facts, LayerTerms terms) {
         this.sums = sums;
+        this.facts = facts;
+        this.before = before;
         this.sum = sum;
         this.terms = terms;
         this.end = sums.end();
         this.figures = new LevelFigures(sum, terms, facts, end);
+    }
+
+    /** The same law on the lattice of twice the step: what a figure changes by shows its error. Only the finest law has a coarser one. */
+    public TransformLaw coarser() {
+        if (before == null) {
+            throw new IllegalStateException("only one coarser lattice is kept");
+        }
+        return new TransformLaw(sums, before, null, facts, terms);
     }
 
     /** Distance of the points of the lattice, in money. */
