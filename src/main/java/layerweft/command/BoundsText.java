@@ -22,13 +22,13 @@ final class BoundsText {
             if (r == null) {
                 table.row(answer.name(), "—", "—", "—", "—", "—", "—", "—");
             } else {
-                table.row(answer.name(), value(r.lowest(), r), value(r.attainedLow(), r), value(r.independent(), r), value(r.comonotone(), r),
-                        value(r.attainedHigh(), r), value(r.highest(), r), FigureText.error(new Figure(r.independent(), r.error())));
+                table.row(answer.name(), value(r.lowest(), r), value(r.attainedLow(), r), value(r.independent(), r),
+                        value(r.comonotone(), r), value(r.attainedHigh(), r), value(r.highest(), r), FigureText.error(new Figure(r.independent(), r.error())));
             }
         }
         text.append(table).append('\n');
-        text.append("Lowest and highest are proven: no dependence passes them; an attained value is reached by a dependence that was found, so the "
-                + "true extreme lies between the two.\n");
+        text.append("Lowest and highest are proven: no dependence passes them; an attained value is reached by a dependence that was found, "
+                + "so the true extreme lies between the two.\n");
         for (Bounds.Answer answer : bounds.layers()) {
             if (answer.note() != null) {
                 text.append("* ").append(answer.name()).append(": ").append(answer.range() == null ? "no bounds, because " : "").append(answer.note())

@@ -24,9 +24,13 @@ class BoundsCommandTest {
         return out.toString();
     }
 
+    private static JsonNode layers(String programme) throws IOException {
+        return new ObjectMapper().readTree(run("bounds", COAST, programme, "--format", "json")).get("layers");
+    }
+
     @Test
     void jsonHoldsSixValuesForEachLayer() throws IOException {
-        JsonNode layers = new ObjectMapper().readTree(run("bounds", COAST, "treaties/harrow-coast-two-layers.json", "--format", "json")).get("layers");
+        JsonNode layers = layers("treaties/harrow-coast-two-layers.json");
         assertEquals(3, layers.size());
         for (JsonNode layer : layers) {
             double before = 0;
@@ -40,7 +44,7 @@ class BoundsCommandTest {
 
     @Test
     void layersWithInuringHaveNoBoundsAndAReason() throws IOException {
-        JsonNode layers = new ObjectMapper().readTree(run("bounds", COAST, "treaties/harrow-coast-inuring.json", "--format", "json")).get("layers");
+        JsonNode layers = layers("treaties/harrow-coast-inuring.json");
         JsonNode cat = layers.get(1);
         VALUES.forEach(name -> assertTrue(cat.get(name).isNull(), name));
         assertTrue(cat.get("reason").asText().contains("inure"));

@@ -63,8 +63,8 @@ final class AttainedValues {
 
     /** Sizes of the upper block that are tried. */
     private static int[] blocks() {
-        return new int[] {0, SLICES / 256, SLICES / 128, SLICES / 64, SLICES / 32, SLICES / 16, SLICES / 11, SLICES / 8, SLICES * 3 / 16, SLICES / 4,
-            SLICES * 3 / 8, SLICES / 2, SLICES * 3 / 4, SLICES};
+        return new int[] {0, SLICES / 256, SLICES / 128, SLICES / 64, SLICES / 32, SLICES / 16, SLICES / 11, SLICES / 8, SLICES * 3 / 16,
+            SLICES / 4, SLICES * 3 / 8, SLICES / 2, SLICES * 3 / 4, SLICES};
     }
 
     /** Upper block flattened and the rest alongside to raise the mean; upper block alongside and the rest flattened to lower it. */

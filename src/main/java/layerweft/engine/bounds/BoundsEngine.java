@@ -47,7 +47,9 @@ public final class BoundsEngine {
         Figure beyond = layer.limited() ? Figure.exact(0) : alone.beyond(terms.deductible());
         Margin[][] margins = alone.margins(layer.cap());
         double error = Math.abs(ParallelRun.comonotone(margins[0], layer) - ParallelRun.comonotone(margins[1], layer)) + independent.error();
-        return SumRange.of(margins[0], layer, independent.value() - beyond.value(), error).plus(beyond.value(), beyond.error());
+        // rounding may leave a trace below 0
+        double below = Math.max(0, independent.value() - beyond.value());
+        return SumRange.of(margins[0], layer, below, error).plus(beyond.value(), beyond.error());
     }
 
     /** The same for a layer as it is placed. */

@@ -101,20 +101,16 @@ final class Margin {
         return low;
     }
 
-    /** The law of min(max(A − from, 0), most). */
-    Margin layer(double from, double most) {
-        double[] moved = new double[values.length];
-        double[] tail = new double[values.length];
-        int n = 0;
-        for (int k = 0; k < values.length; k++) {
-            double value = Math.min(Math.max(values[k] - from, 0), most);
-            if (n > 0 && moved[n - 1] == value) {
-                n--;
-            }
-            moved[n] = value;
-            tail[n++] = above[k];
+    /** The law of top − A, top at least the largest value. */
+    Margin mirrored(double top) {
+        int n = values.length;
+        double[] turned = new double[n];
+        double[] tail = new double[n];
+        for (int k = 0; k < n; k++) {
+            turned[k] = top - values[n - 1 - k];
+            tail[k] = k == n - 1 ? 0 : 1 - above[n - 2 - k];
         }
-        return of(Arrays.copyOf(moved, n), Arrays.copyOf(tail, n));
+        return of(turned, tail);
     }
 
     /** Means of A over n parts of [0, width], each of the same chance, from the largest values down. */

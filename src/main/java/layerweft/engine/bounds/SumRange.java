@@ -10,7 +10,6 @@ final class SumRange {
      * @param independent the value for independent margins
      */
     static LayerRange of(Margin[] margins, AnnualLayer layer, double independent, double error) {
-        DualBounds dual = new DualBounds(margins, layer);
         AttainedValues found = new AttainedValues(margins, layer);
         double comonotone = ParallelRun.comonotone(margins, layer);
         double low = Math.min(Math.min(independent, comonotone), found.low());
@@ -25,8 +24,8 @@ final class SumRange {
         boolean sharpLow = concave || (convex && margins.length == 2);
         boolean sharpHigh = convex || (concave && margins.length == 2);
         // where a bound is known to be sharp the law that reaches it is among those tried
-        double lowest = sharpLow ? low : Math.min(low, dual.lowest());
-        double highest = sharpHigh ? high : Math.max(high, dual.highest());
+        double lowest = sharpLow ? low : Math.min(low, new LowerDual(margins, layer).bound());
+        double highest = sharpHigh ? high : Math.max(high, new UpperDual(margins, layer).bound());
         return new LayerRange(lowest, low, independent, comonotone, high, highest, error, false);
     }
 }

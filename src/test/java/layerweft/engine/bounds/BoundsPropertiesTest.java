@@ -112,7 +112,8 @@ class BoundsPropertiesTest {
 
     @Test
     void comonotoneStopLossIsTheSumOfStopLossesAtEqualQuantiles() {
-        Margin[] margins = {Margin.of(new double[] {0, 8, 20}, new double[] {0.6, 0.25, 0}), Margin.of(new double[] {1, 5, 30}, new double[] {0.5, 0.25, 0})};
+        Margin[] margins = {Margin.of(new double[] {0, 8, 20}, new double[] {0.6, 0.25, 0}),
+            Margin.of(new double[] {1, 5, 30}, new double[] {0.5, 0.25, 0})};
         // at the quantile 0.75 the split of D = 13 is 8 and 5
         double parts = margins[0].mean() - margins[0].limited(8) + margins[1].mean() - margins[1].limited(5);
         assertEquals(parts, ParallelRun.comonotone(margins, new AnnualLayer(13, Double.POSITIVE_INFINITY)), 1e-14);
@@ -144,8 +145,9 @@ class BoundsPropertiesTest {
         Peril light = peril("light", new Poisson(1), new Exponential(2));
         Layer open = Layer.of("open", OccurrenceTerms.NONE, new AnnualTerms(5, Double.POSITIVE_INFINITY));
         Layer closed = Layer.of("closed", OccurrenceTerms.NONE, new AnnualTerms(5, 10));
-        assertEquals(Double.POSITIVE_INFINITY, new BoundsEngine(new Treaty(portfolio(List.of(heavy, light)), programme(open))).range(0).lowest());
-        LayerRange limited = new BoundsEngine(new Treaty(portfolio(List.of(heavy, light)), programme(closed))).range(0);
+        Portfolio both = portfolio(List.of(heavy, light));
+        assertEquals(Double.POSITIVE_INFINITY, new BoundsEngine(new Treaty(both, programme(open))).range(0).lowest());
+        LayerRange limited = new BoundsEngine(new Treaty(both, programme(closed))).range(0);
         assertTrue(limited.lowest() > 0 && limited.highest() < 10, limited::toString);
     }
 

@@ -6,7 +6,6 @@ import com.fasterxml.jackson.databind.JsonNode;
 import com.fasterxml.jackson.databind.ObjectMapper;
 import java.io.IOException;
 import java.util.ArrayList;
-import java.util.Iterator;
 import java.util.List;
 import java.util.Map;
 import java.util.stream.Stream;
@@ -30,8 +29,7 @@ class BoundsReferenceTest {
         BoundsEngine engine = new BoundsEngine(treaty);
         List<String> off = new ArrayList<>();
         JsonNode expected = new ObjectMapper().readTree(reference.folder().resolve("expected.json").toFile());
-        for (Iterator<Map.Entry<String, JsonNode>> fields = expected.fields(); fields.hasNext();) {
-            Map.Entry<String, JsonNode> field = fields.next();
+        for (Map.Entry<String, JsonNode> field : expected.properties()) {
             String[] path = field.getKey().split("/");
             double got = value(engine.range(treaty.programme().indexOf(path[1])), path[2]);
             JsonNode e = field.getValue();

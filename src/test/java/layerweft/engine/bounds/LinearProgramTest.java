@@ -7,6 +7,7 @@ import java.util.ArrayList;
 import java.util.Arrays;
 import java.util.List;
 import java.util.stream.IntStream;
+import layerweft.model.random.KeyedStream;
 import org.apache.commons.math3.optim.MaxIter;
 import org.apache.commons.math3.optim.linear.LinearConstraint;
 import org.apache.commons.math3.optim.linear.LinearConstraintSet;
@@ -17,8 +18,6 @@ import org.apache.commons.math3.optim.linear.SimplexSolver;
 import org.apache.commons.math3.optim.nonlinear.scalar.GoalType;
 import org.junit.jupiter.params.ParameterizedTest;
 import org.junit.jupiter.params.provider.MethodSource;
-import org.apache.commons.rng.UniformRandomProvider;
-import layerweft.model.random.KeyedStream;
 
 /** Small discrete margins: the exact extremes over all joint laws, by linear programming, lie between what is attained and what is proven. */
 class LinearProgramTest {
@@ -31,7 +30,7 @@ class LinearProgramTest {
     @ParameterizedTest
     @MethodSource("seeds")
     void exactExtremesLieBetweenAttainedAndProven(int seed) {
-        UniformRandomProvider random = new KeyedStream(seed);
+        KeyedStream random = new KeyedStream(seed);
         int d = 2 + seed % 2;
         double[][] values = new double[d][];
         double[][] chances = new double[d][];
@@ -50,7 +49,8 @@ class LinearProgramTest {
         double lowest = extreme(values, chances, layer, GoalType.MINIMIZE);
         double highest = extreme(values, chances, layer, GoalType.MAXIMIZE);
         LayerRange range = SumRange.of(margins, layer, independent(values, chances, layer), 0);
-        String what = "seed " + seed + ": " + Arrays.deepToString(values) + Arrays.deepToString(chances) + layer + range + " exact " + lowest + " to " + highest;
+        String what = "seed " + seed + ": " + Arrays.deepToString(values) + Arrays.deepToString(chances) + layer + range + " exact " + lowest
+                + " to " + highest;
         double slack = 1e-9 * (1 + highest);
         assertTrue(range.lowest() <= lowest + slack && lowest <= range.attainedLow() + slack, what);
         assertTrue(range.attainedHigh() <= highest + slack && highest <= range.highest() + slack, what);
@@ -100,8 +100,8 @@ class LinearProgramTest {
                 constraints.add(new LinearConstraint(row, Relationship.EQ, chances[i][k]));
             }
         }
-        return new SimplexSolver().optimize(new MaxIter(10_000), new LinearObjectiveFunction(losses, 0), new LinearConstraintSet(constraints), goal,
-                new NonNegativeConstraint(true)).getValue();
+        return new SimplexSolver().optimize(new MaxIter(10_000), new LinearObjectiveFunction(losses, 0), new LinearConstraintSet(constraints),
+                goal, new NonNegativeConstraint(true)).getValue();
     }
 
     private static List<int[]> joint(double[][] values) {

@@ -45,9 +45,11 @@ class MarginTest {
     }
 
     @Test
-    void layerOfAMarginGathersWhatItPays() {
-        Margin layer = margin.layer(10, 20);
-        assertEquals(2, layer.atoms());
-        assertEquals(0.2 * 20, layer.mean(), 1e-15);
+    void mirroredLawsHaveTheSameChances() {
+        Margin mirrored = margin.mirrored(50);
+        assertEquals(50 - margin.mean(), mirrored.mean(), 1e-14);
+        assertEquals(0.8, mirrored.above(0), 1e-15);
+        assertEquals(10, mirrored.value(0));
+        assertEquals(50, mirrored.largest());
     }
 }

@@ -73,7 +73,7 @@ class ParallelRunTest {
     }
 
     static JsonNode published(String id) throws IOException {
-        JsonNode tree = new ObjectMapper().readTree(ParallelRunTest.class.getResource("/reference/published-checks.json"));
+        JsonNode tree = new ObjectMapper().readTree(ParallelRunTest.class.getResourceAsStream("/reference/published-checks.json"));
         return tree.findParents("id").stream().filter(n -> n.get("id").asText().equals(id)).findFirst().orElseThrow();
     }
 }

@@ -36,7 +36,7 @@ class RearrangementTest {
     @TestFactory
     List<DynamicTest> reachesWorstValuesAtRisk() throws IOException {
         List<DynamicTest> tests = new ArrayList<>();
-        for (JsonNode c : new ObjectMapper().readTree(getClass().getResource("/reference/worst-var.json")).get("cases")) {
+        for (JsonNode c : new ObjectMapper().readTree(getClass().getResourceAsStream("/reference/worst-var.json")).get("cases")) {
             tests.add(DynamicTest.dynamicTest(c.toString(), () -> {
                 double worst = c.get("worstValueAtRisk").doubleValue();
                 double found = worstValueAtRisk(c.get("perils").intValue(), c.get("alpha").doubleValue(), c.get("level").doubleValue());

@@ -3,23 +3,23 @@ package layerweft.engine.bounds;
 import java.util.Arrays;
 
 /**
- * Proven bounds of a layer's expected loss over all joint laws: where functions g_i satisfy Σ g_i(a_i) ≥ f(Σ a_i) everywhere, Σ E[g_i(A_i)]
- * is an upper bound of E[f(ΣA_i)], and likewise below (the dual of the transport problem; for the distribution function of a sum see
- * Embrechts &amp; Puccetti 2006, "Bounds for functions of dependent risks", Finance Stoch. 10). Here f(s) = min((s − D)+, M).
+ * A proven upper bound of a layer's expected loss over all joint laws: where functions g_i satisfy Σ g_i(a_i) ≥ f(Σ a_i) everywhere,
+ * Σ E[g_i(A_i)] bounds E[f(ΣA_i)] (the dual of the transport problem; for the distribution function of a sum see Embrechts &amp; Puccetti
+ * 2006, "Bounds for functions of dependent risks", Finance Stoch. 10). Here f(s) = min((s − D)+, M).
  */
-final class DualBounds {
+final class UpperDual {
     private static final int WIDTHS = 24;
     private static final int CELLS = 96;
     private final Margin[] margins;
     private final AnnualLayer layer;
 
-    DualBounds(Margin[] margins, AnnualLayer layer) {
+    UpperDual(Margin[] margins, AnnualLayer layer) {
         this.margins = margins;
         this.layer = layer;
     }
 
-    /** An upper bound. */
-    double highest() {
+    /** The smallest bound found. */
+    double bound() {
         if (!layer.limited()) {
             // sharp: Dhaene, Denuit, Goovaerts, Kaas & Vyncke 2002, Insurance: Mathematics and Economics 31
             return ParallelRun.comonotone(margins, layer);
@@ -31,12 +31,19 @@ final class DualBounds {
         for (int k = 0; k <= (d > 0 ? WIDTHS : 0); k++) {
             best = Math.min(best, ramps(d * k / WIDTHS));
         }
-        return best;
+        return Math.min(best, mirrored());
+    }
+
+    /** M less a lower bound of what the layer lacks of M: a layer of the same kind, on the sum of what each A_i lacks of D + M. */
+    private double mirrored() {
+        double end = layer.end();
+        Margin[] lacking = Arrays.stream(margins).map(m -> m.mirrored(end)).toArray(Margin[]::new);
+        return layer.limit() - new LowerDual(lacking, new AnnualLayer((margins.length - 1) * end, layer.limit())).bound();
     }
 
     /**
-     * The smallest bound by ramps g_i(a) = M·min((a − κ_i)+, w)/w with Σκ_i = κ ≤ D and w = D + M − κ: a single a_i beyond its ramp gives M,
-     * otherwise Σ g_i ≥ (M/w)(s − κ)+, which is f(s) or more up to s = D + M and M or more beyond.
+     * The smallest bound by ramps g_i(a) = M·min((a − κ_i)+, w)/w with Σκ_i = κ ≤ D and w = D + M − κ: a single a_i beyond its ramp
+     * gives M, otherwise Σ g_i ≥ (M/w)(s − κ)+, which is f(s) or more up to s = D + M and M or more beyond.
      */
     private double ramps(double kappa) {
         double w = layer.end() - kappa;
@@ -114,39 +121,5 @@ final class DualBounds {
             }
         }
         return Arrays.stream(cost).sum();
-    }
-
-    /** A lower bound. */
-    double lowest() {
-        double best = Math.max(0, excesses());
-        double sum = Arrays.stream(margins).mapToDouble(Margin::mean).sum();
-        double reach = Arrays.stream(margins).mapToDouble(Margin::largest).sum();
-        if (!layer.limited()) {
-            return Math.max(best, sum - layer.deductible());
-        }
-        for (int k = 0; k <= WIDTHS && reach > layer.end(); k++) {
-            best = Math.max(best, chord(layer.end() + (reach - layer.end()) * k * k / (WIDTHS * WIDTHS)));
-        }
-        return Math.max(best, chord(layer.end()));
-    }
-
-    /**
-     * f(s) ≥ M·(min(s, W) − D)/(W − D) for W ≥ D + M, a concave function of s, of which the comonotone sum has the smallest mean.
-     */
-    private double chord(double w) {
-        double limited = ParallelRun.comonotone(margins, new AnnualLayer(0, w));
-        return layer.limit() * (limited - layer.deductible()) / (w - layer.deductible());
-    }
-
-    /**
-     * f(s) ≥ min(Σ(a_i − D)+, M), because (a + b − D)+ ≥ (a − D)+ + (b − D)+ for a, b, D ≥ 0; of that concave function of the excesses their
-     * comonotone sum has the smallest mean.
-     */
-    private double excesses() {
-        Margin[] excess = new Margin[margins.length];
-        for (int i = 0; i < excess.length; i++) {
-            excess[i] = margins[i].layer(layer.deductible(), layer.limit());
-        }
-        return ParallelRun.comonotone(excess, new AnnualLayer(0, layer.limit()));
     }
 }
