@@ -132,7 +132,7 @@ public record Burr(double alpha, double gamma, double theta) implements Severity
 
     /** ∫ m·u^(m−1)·P(X &gt; u) du; the logarithm of P falls by at most some 10 over the length given as scale. */
     private double integral(int m, double from, double to) {
-        return LogQuadrature.integral(u -> m == 1 ? survival(u) : 2 * (u * survival(u)), from, to,
+        return LogQuadrature.integral(this::survival, m, from, to,
                 2 / gamma / Math.max(1, Math.min(alpha / 5, 6)));
     }
 

@@ -70,7 +70,7 @@ public record GeneralizedPareto(double threshold, double scale, double shape) im
         }
         double y = exponent(x);
         if (y < FEW_DIGITS) {
-            return threshold * threshold + LogQuadrature.integral(u -> 2 * u * survival(u), threshold, x, 1);
+            return threshold * threshold + LogQuadrature.integral(this::survival, 2, threshold, x, 1);
         }
         double first = ExponentialIntegral.of(1 - shape, y);
         double second = Math.abs(shape) < NEARLY_EXPONENTIAL

@@ -69,7 +69,7 @@ public record InverseGaussian(double mean, double shape) implements SeverityMode
             return 0;
         }
         double value = firstBelow(x) + x * survival(x);
-        return value > FEW_DIGITS * mean ? value : LogQuadrature.integral(this::survival, 0, x, 1);
+        return value > FEW_DIGITS * mean ? value : LogQuadrature.integral(this::survival, 1, 0, x, 1);
     }
 
     /** E[X²; X ≤ x] + x²·P(X &gt; x), the first by parts from the law's differential equation: μ²(F + E[X; X ≤ x]/λ) − 2μ²x²f(x)/λ. */
@@ -87,7 +87,7 @@ public record InverseGaussian(double mean, double shape) implements SeverityMode
         double below = mean * mean * (cdf(x) + firstBelow(x) / shape - 2 * atX / shape);
         double value = below + x * (x * survival(x));
         return value > FEW_DIGITS * mean * mean * Math.max(1, mean / shape) ? value
-                : LogQuadrature.integral(u -> 2 * (u * survival(u)), 0, x, 1);
+                : LogQuadrature.integral(this::survival, 2, 0, x, 1);
     }
 
     @Override
@@ -97,7 +97,7 @@ public record InverseGaussian(double mean, double shape) implements SeverityMode
             return limitedMean(to) - limitedMean(start);
         }
         double end = to == Double.POSITIVE_INFINITY ? Math.max(2 * start, survivalQuantile(Double.MIN_NORMAL)) : to;
-        return LogQuadrature.integral(this::survival, start, end, Math.min(1, Math.sqrt(mean / shape)));
+        return LogQuadrature.integral(this::survival, 1, start, end, Math.min(1, Math.sqrt(mean / shape)));
     }
 
     @Override

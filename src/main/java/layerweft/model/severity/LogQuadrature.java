@@ -4,11 +4,11 @@ import java.util.function.DoubleUnaryOperator;
 import org.apache.commons.math3.analysis.integration.gauss.GaussIntegrator;
 import org.apache.commons.math3.analysis.integration.gauss.GaussIntegratorFactory;
 
-/** Composite Gauss–Legendre quadrature in the logarithm of the amount: for survival functions of power-law kind, smooth on that scale. */
+/** Integrals of survival functions by Gauss–Legendre panels in the logarithm of the amount, from the top down: for laws smooth on that scale. */
 final class LogQuadrature {
     private static final int NODES = 20;
-    /** Logarithm of the multiple of the upper end below which nothing is left of an integrand that is bounded at 0. */
-    private static final double LN_LEAST = Math.log(1e-18);
+    /** Part of an integral below which nothing is left of it. */
+    private static final double LEAST = 1e-17;
     private static final double[] POINTS = new double[NODES];
     private static final double[] WEIGHTS = new double[NODES];
 
@@ -23,26 +23,39 @@ final class LogQuadrature {
     private LogQuadrature() {}
 
     /**
-     * ∫_from^to f(x) dx for f bounded at 0.
+     * ∫_from^to m·x^(m−1)·P(X &gt; x) dx, between the limited moments of order m.
      *
+     * @param survival P(X &gt; x)
+     * @param m order of the moment, 1 or 2
      * @param from at least 0
      * @param to above {@code from}, finite
-     * @param scale length in ln x over which f may change its course
+     * @param scale length in ln x over which the survival function may change its course
      */
-    static double integral(DoubleUnaryOperator f, double from, double to, double scale) {
-        double high = Math.log(to);
-        double low = Math.max(Math.log(from), high + LN_LEAST);
-        int panels = (int) Math.max(1, Math.ceil((high - low) / Math.min(1, scale)));
-        double width = (high - low) / panels;
+    static double integral(DoubleUnaryOperator survival, int m, double from, double to, double scale) {
+        double length = to < 2 * from ? Math.log1p((to - from) / from) : Math.log(to) - Math.log(from);
+        double panels = Math.max(1, Math.ceil(length / Math.min(1, scale)));
+        double width = from > 0 ? length / panels : Math.min(1, scale);
         double sum = 0;
-        for (int p = 0; p < panels; p++) {
-            double middle = low + (p + 0.5) * width;
-            for (int k = 0; k < NODES; k++) {
-                double x = Math.min(to, Math.exp(middle + 0.5 * width * POINTS[k]));
-                sum += WEIGHTS[k] * x * f.applyAsDouble(x);
+        for (int p = 1; p <= panels; p++) {
+            sum += panel(survival, m, to, (p - 0.5) * width, width);
+            // a survival function is at most 1, so what is still to come is at most start^m
+            double start = to * Math.exp(-p * width);
+            double rest = m == 1 ? start : start * start;
+            if (p < panels && !(rest > LEAST * sum)) {
+                return sum + (rest - (m == 1 ? from : from * from)) * survival.applyAsDouble(start);
             }
         }
-        double start = Math.exp(low);
-        return 0.5 * width * sum + (start > from ? (start - from) * f.applyAsDouble(start) : 0);
+        return sum;
+    }
+
+    /** The panel whose middle lies a length in ln x below the end. */
+    private static double panel(DoubleUnaryOperator survival, int m, double to, double middle, double width) {
+        double sum = 0;
+        for (int k = 0; k < NODES; k++) {
+            double x = to * Math.exp(-middle + 0.5 * width * POINTS[k]);
+            double f = x * survival.applyAsDouble(x);
+            sum += WEIGHTS[k] * (m == 1 ? f : 2 * (x * f));
+        }
+        return 0.5 * width * sum;
     }
 }

@@ -1,6 +1,5 @@
 package layerweft.model.severity;
 
-import java.util.function.DoubleUnaryOperator;
 import layerweft.model.Check;
 
 /**
@@ -85,7 +84,7 @@ public record Mbbefd(double b, double g, double exposedValue) implements Severit
         double lnB = Math.log(b);
         double a = (1 - g * b) / (1 - b);
         if (Math.abs(lnB) < NEAR_LIMIT || Math.abs(a) * survival(start) < NEAR_LIMIT) {
-            return integral(this::survival, start, end);
+            return integral(1, start, end);
         }
         double growth = Math.log1p((rise(end) - rise(start)) / (1 + rise(start)));
         return exposedValue * ((end - start) / exposedValue + growth / lnB) / a;
@@ -93,7 +92,7 @@ public record Mbbefd(double b, double g, double exposedValue) implements Severit
 
     @Override
     public double limitedSecondMoment(double x) {
-        return integral(u -> 2 * u * survival(u), 0, Math.min(Math.max(x, 0), exposedValue));
+        return integral(2, 0, Math.min(Math.max(x, 0), exposedValue));
     }
 
     @Override
@@ -106,8 +105,8 @@ public record Mbbefd(double b, double g, double exposedValue) implements Severit
         return stream -> () -> survivalQuantile(stream.nextOpen());
     }
 
-    private double integral(DoubleUnaryOperator f, double from, double to) {
-        return to <= from ? 0 : LogQuadrature.integral(f, from, to, 1 / (1 + 0.2 * Math.abs(Math.log(b))));
+    private double integral(int m, double from, double to) {
+        return to <= from ? 0 : LogQuadrature.integral(this::survival, m, from, to, 1 / (1 + 0.2 * Math.abs(Math.log(b))));
     }
 
     /** (g − 1)·h(x/exposedValue). */

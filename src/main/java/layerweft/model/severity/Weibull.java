@@ -91,7 +91,7 @@ public record Weibull(double shape, double scale) implements SeverityModel {
             return 0;
         }
         if (moment == Double.POSITIVE_INFINITY) {
-            return LogQuadrature.integral(u -> m == 1 ? survival(u) : 2 * (u * survival(u)), 0, x, 1);
+            return LogQuadrature.integral(this::survival, m, 0, x, 1);
         }
         double beyond = m == 1 ? x * survival(x) : x * (x * survival(x));
         return moment * RegularizedGamma.P.value(1 + m / shape, exponent(x)) + beyond;

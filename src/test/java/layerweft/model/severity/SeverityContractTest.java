@@ -8,7 +8,10 @@ import static org.junit.jupiter.api.Assertions.assertTrue;
 
 import java.util.Arrays;
 import java.util.List;
+import java.util.Set;
 import java.util.function.DoubleUnaryOperator;
+import java.util.stream.Collectors;
+import org.junit.jupiter.api.Test;
 import org.junit.jupiter.params.ParameterizedTest;
 import org.junit.jupiter.params.provider.MethodSource;
 
@@ -19,6 +22,11 @@ class SeverityContractTest {
 
     static List<SeverityModel> models() {
         return SeverityExamples.all();
+    }
+
+    @Test
+    void theExamplesAreOfEveryKind() {
+        assertEquals(Set.of(SeverityModel.class.getPermittedSubclasses()), models().stream().map(Object::getClass).collect(Collectors.toSet()));
     }
 
     @ParameterizedTest
@@ -136,9 +144,11 @@ class SeverityContractTest {
         assertTrue(model.mean() > 0);
         double second = model.limitedSecondMoment(INFINITY);
         assertTrue(second >= Math.pow(model.mean(), 2) * (1 - 1e-10), () -> "second moment " + second + ", mean " + model.mean());
-        double far = Double.MAX_VALUE;
-        assertTrue(model.limitedMean(far) <= model.mean() * (1 + 1e-12), () -> "far off " + model.limitedMean(far));
-        assertTrue(model.limitedSecondMoment(far) <= second * (1 + 1e-12), () -> "far off " + model.limitedSecondMoment(far));
+        for (double far : new double[]{1e30, 1e100, 1e300, Double.MAX_VALUE}) {
+            assertLimit(model.mean(), model.limitedMean(far), far * model.survival(far), "limited mean at " + far);
+            assertLimit(model.mean(), model.layerMean(0, far), far * model.survival(far), "layer up to " + far);
+            assertLimit(second, model.limitedSecondMoment(far), far * (far * model.survival(far)), "limited second moment at " + far);
+        }
         if (model.upperEnd() < INFINITY) {
             assertEquals(model.mean(), model.limitedMean(model.upperEnd()), 1e-13 * model.mean());
             assertEquals(second, model.limitedSecondMoment(2 * model.upperEnd()), 1e-13 * second);
@@ -189,6 +199,12 @@ class SeverityContractTest {
                 assertTrue(value >= 0, "function " + k + " at " + x + ": " + value);
             }
         }
+    }
+
+    /** At most the moment, and nearly all of it where the last piece is negligible. */
+    private static void assertLimit(double moment, double limited, double last, String what) {
+        assertTrue(limited <= moment * (1 + 1e-12), () -> what + ": " + limited + " of " + moment);
+        assertTrue(moment == INFINITY || last > 1e-15 * moment || limited >= moment * (1 - 1e-10), () -> what + ": " + limited + " of " + moment);
     }
 
     private static double wider(double x) {

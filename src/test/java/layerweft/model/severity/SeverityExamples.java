@@ -30,7 +30,7 @@ final class SeverityExamples {
                 new GeneralizedPareto(1, 3, 0.5), new GeneralizedPareto(1, 3, -1e-7), new GeneralizedPareto(0, 3, -1),
                 new GeneralizedPareto(0, 3, -2.5),
                 new Gamma(0.7, 6), new Gamma(4, 5), new Gamma(0.05, 100), new Gamma(400, 0.1), Gamma.ofMeanAndCv(20, 1.5),
-                new Weibull(0.6, 8), new Weibull(2.5, 8), new Weibull(0.15, 1), new Weibull(20, 100), new Weibull(1, 7),
+                new Weibull(0.6, 8), new Weibull(2.5, 8), new Weibull(0.15, 1), new Weibull(20, 100), new Weibull(1, 7), new Weibull(0.01, 1),
                 new Burr(1.3, 1.7, 12), new Burr(0.5, 1.8, 12), new Burr(20, 0.8, 50), new Burr(0.05, 30, 10), new Burr(1, 1, 7),
                 new Burr(1, 2, 7), new Burr(0.3, 0.5, 3), new Burr(50, 3, 10), new Burr(0.6, 1.7, 12), new Burr(0.02, 8, 1),
                 new Loglogistic(2.2, 7), new Loglogistic(0.9, 7), new Loglogistic(1, 7), new Loglogistic(8, 1000),

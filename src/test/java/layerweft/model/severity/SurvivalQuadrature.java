@@ -6,7 +6,10 @@ import java.util.stream.Stream;
 import org.apache.commons.math3.analysis.integration.gauss.GaussIntegrator;
 import org.apache.commons.math3.analysis.integration.gauss.GaussIntegratorFactory;
 
-/** ∫ S(x) dx and ∫ 2x·S(x) dx by Gauss–Legendre rules between the kinks and the quantiles of a law: short, slow and independent of its formulas. */
+/**
+ * ∫ S(x) dx and ∫ 2x·S(x) dx by Gauss–Legendre rules between the kinks and the quantiles of a law: slow, and independent of its formulas
+ * for moments.
+ */
 final class SurvivalQuadrature {
     private static final int NODES = 24;
     private static final GaussIntegrator RULE = new GaussIntegratorFactory().legendre(NODES);
@@ -34,13 +37,17 @@ final class SurvivalQuadrature {
         return sum;
     }
 
-    /** Kinks, quantiles at probabilities that halve towards both tails, amounts that halve the way to the end, and steps of a third of an amount at most, so that each piece is smooth. */
+    /**
+     * Kinks, quantiles at probabilities that halve towards both tails, amounts that halve the way to the end, and steps of a third of an
+     * amount at most, so that each piece is smooth.
+     */
     private static double[] cuts(SeverityModel model, double from, double to) {
         DoubleStream low = DoubleStream.iterate(0.5, p -> p > 1e-18, p -> p / 2).map(model::quantile);
         DoubleStream high = DoubleStream.iterate(0.5, q -> q > 1e-30, q -> q / 2).map(model::survivalQuantile);
         DoubleStream top = DoubleStream.iterate(0.5, r -> r > 1e-16, r -> r / 2).map(r -> model.upperEnd() * (1 - r));
         DoubleStream inner = Stream.of(low, high, top, SeverityExamples.kinks(model)).flatMapToDouble(s -> s);
-        double[] coarse = DoubleStream.concat(DoubleStream.of(from, to), inner.filter(x -> x > Math.max(from, LEAST * to) && x < to)).sorted().distinct().toArray();
+        DoubleStream between = inner.filter(x -> x > Math.max(from, LEAST * to) && x < to);
+        double[] coarse = DoubleStream.concat(DoubleStream.of(from, to), between).sorted().distinct().toArray();
         DoubleStream fine = Arrays.stream(coarse);
         for (int k = 1; k < coarse.length; k++) {
             double a = Math.max(coarse[k - 1], LEAST * coarse[k]);
