@@ -28,17 +28,18 @@ final class CopulaPricing {
     private final Treaty treaty;
     private final SimulationSettings settings;
     private final RunControl control;
+    private final TransformEngine prepared;
 
     CopulaPricing(Treaty treaty, SimulationSettings settings, RunControl control) {
         this.treaty = treaty;
         this.settings = settings;
         this.control = control;
+        this.prepared = new TransformEngine(treaty, Accuracy.USUAL);
     }
 
     /** Why the layer has to be simulated under at least one of the copulas; empty where the transform can price it under all. */
     Optional<String> refusal(int layer, List<Copula> copulas) {
-        TransformEngine engine = new TransformEngine(treaty, Accuracy.USUAL);
-        return copulas.stream().map(copula -> engine.with(copula).refusal(layer)).flatMap(Optional::stream).findFirst();
+        return copulas.stream().map(copula -> prepared.with(copula).refusal(layer)).flatMap(Optional::stream).findFirst();
     }
 
     /**
@@ -53,9 +54,9 @@ final class CopulaPricing {
             int first = from;
             int end = Math.min(copulas.size(), from + SHARE);
             tasks.add(() -> {
-                TransformEngine prepared = new TransformEngine(treaty, Accuracy.USUAL);
+                TransformEngine ownEngine = new TransformEngine(treaty, Accuracy.USUAL);
                 for (int k = first; k < end; k++) {
-                    TransformEngine engine = prepared.with(copulas.get(k));
+                    TransformEngine engine = ownEngine.with(copulas.get(k));
                     for (int j : layers) {
                         stopIfAsked();
                         out[k][j] = figures(j, engine.price(j));
@@ -65,6 +66,28 @@ final class CopulaPricing {
             });
         }
         return tasks;
+    }
+
+    /**
+     * Figures of the wanted layers under a copula, by the transform where it can price them and by simulation elsewhere, on the calling
+     * thread. For studies that ask for one copula after the other: the transform's preparation is kept.
+     *
+     * @param layers positions; the figures come in their order
+     */
+    List<LayerFigures> price(Copula copula, List<Integer> layers) {
+        TransformEngine engine = prepared.with(copula);
+        List<LayerFigures> simulated = null;
+        List<LayerFigures> figures = new ArrayList<>();
+        for (int j : layers) {
+            stopIfAsked();
+            if (engine.refusal(j).isEmpty()) {
+                figures.add(figures(j, engine.price(j)));
+            } else {
+                simulated = simulated == null ? simulate(copula, settings.years()) : simulated;
+                figures.add(simulated.get(j));
+            }
+        }
+        return figures;
     }
 
     /** All layers under a copula, simulated with the same random numbers for every copula. */
