@@ -63,6 +63,11 @@ final class FigureText {
         return decimal.scale() < 0 ? decimal.setScale(0).toPlainString() : decimal.toPlainString();
     }
 
+    /** An agreed amount with the digits given, thousands grouped: 12,500 or 0.75. */
+    static String groupedPlain(double value) {
+        return grouped(value, new BigDecimal(plain(value)).scale());
+    }
+
     private static String special(Figure figure) {
         if (!figure.defined()) {
             return "—";

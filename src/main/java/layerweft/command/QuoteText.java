@@ -9,6 +9,7 @@ import layerweft.figures.Engine;
 import layerweft.figures.Figure;
 import layerweft.figures.LayerFigures;
 import layerweft.figures.PositionStatistics;
+import layerweft.figures.ReturnPeriods;
 import layerweft.model.portfolio.Portfolio;
 import layerweft.model.treaty.Buyer;
 import layerweft.model.treaty.Layer;
@@ -127,8 +128,8 @@ final class QuoteText {
     private void position(TextTable table, String side, PositionStatistics p) {
         String[] moments = {FigureText.value(p.mean()), FigureText.error(p.mean()), FigureText.value(p.standardDeviation()),
             FigureText.error(p.standardDeviation())};
-        table.row(cells(side + ", year", layerweft.figures.ReturnPeriods.of(p.valueAtRisk(), buyer), p.tailValueAtRisk(), moments));
-        table.row(cells(side + ", largest event", layerweft.figures.ReturnPeriods.of(p.occurrenceValueAtRisk(), buyer), null, "", "", "", ""));
+        table.row(cells(side + ", year", ReturnPeriods.of(p.valueAtRisk(), buyer), p.tailValueAtRisk(), moments));
+        table.row(cells(side + ", largest event", ReturnPeriods.of(p.occurrenceValueAtRisk(), buyer), null, "", "", "", ""));
     }
 
     private static String[] cells(String name, SortedMap<Double, Figure> curve, Figure tail, String... before) {
@@ -171,20 +172,24 @@ final class QuoteText {
         line("* A price supports qualified judgement; it does not replace it, and it defers to local regulation and licensed practice.");
     }
 
+    /** E.g. "90 % of 60 xs 40, 180 a year"; "60 xs 120 a year" for a stop loss. */
     private static String terms(LayerTerms t) {
-        StringBuilder s = new StringBuilder();
-        if (t.quotaShare() < 1) {
-            s.append(FigureText.plainPercent(t.quotaShare())).append(" of ");
+        List<String> parts = new ArrayList<>();
+        boolean each = t.occurrenceLimit() < Double.POSITIVE_INFINITY || t.retention() > 0 || t.hasFranchise();
+        String share = t.quotaShare() < 1 ? FigureText.plainPercent(t.quotaShare()) + " of " : "";
+        if (t.hasFranchise()) {
+            parts.add(amount(t.occurrenceLimit()) + " franchise " + amount(t.franchise()));
+        } else if (each) {
+            parts.add(amount(t.occurrenceLimit()) + (t.retention() > 0 ? " xs " + amount(t.retention()) : " each"));
         }
-        s.append(amount(t.occurrenceLimit())).append(t.hasFranchise() ? " franchise " + amount(t.franchise()) : " xs " + amount(t.retention()));
-        if (t.deductible() > 0 || t.annualLimit() < Double.POSITIVE_INFINITY) {
-            s.append(", year ").append(amount(t.annualLimit())).append(" xs ").append(amount(t.deductible()));
+        if (t.hasAnnualTerms()) {
+            parts.add(amount(t.annualLimit()) + (t.deductible() > 0 ? " xs " + amount(t.deductible()) : "") + " a year");
         }
-        return s.toString();
+        return share + (parts.isEmpty() ? "all losses" : String.join(", ", parts));
     }
 
     private static String amount(double value) {
-        return Double.isInfinite(value) ? "∞" : FigureText.plain(value);
+        return Double.isInfinite(value) ? "∞" : FigureText.groupedPlain(value);
     }
 
     private String money() {

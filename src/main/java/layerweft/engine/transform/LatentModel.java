@@ -129,7 +129,7 @@ final class LatentModel {
     private static LatentNodes elliptical(Correlation correlation, double degreesOfFreedom, int[] perils, CountMargin[] margins, double error) {
         double[] loadings = FactorNodes.loadings(correlation, perils);
         if (loadings == null) {
-            return ThreePerilNodes.of(correlation, perils, degreesOfFreedom, margins).merged(MERGING * error);
+            return ThreePerilNodes.of(correlation, perils, degreesOfFreedom, margins, error).merged(MERGING * error);
         }
         boolean sure = Arrays.stream(loadings).allMatch(l -> Math.abs(l) > 1 - 1e-9);
         if (sure) {
@@ -139,7 +139,7 @@ final class LatentModel {
             }
             return OrderedNodes.of(margins, falling).nodes(margins);
         }
-        return FactorNodes.of(loadings, degreesOfFreedom, margins).merged(MERGING * error);
+        return FactorNodes.of(loadings, degreesOfFreedom, margins, error).merged(4 * MERGING * error);
     }
 
     private static LatentNodes mixture(MixtureCopula mixture, int[] perils, CountMargin[] margins, double error) {
