@@ -1,0 +1,39 @@
+package layerweft.command;
+
+import layerweft.figures.Figure;
+import layerweft.model.portfolio.Portfolio;
+import layerweft.study.FigureKind;
+
+/** Figures of a study in the unit that they are measured in. */
+final class FigureKindText {
+
+    private FigureKindText() {}
+
+    static String value(FigureKind kind, Figure figure) {
+        return kind.measured() == FigureKind.Measured.AS_PART ? FigureText.percent(figure) : FigureText.value(figure);
+    }
+
+    static String error(FigureKind kind, Figure figure) {
+        return kind.measured() == FigureKind.Measured.AS_PART ? FigureText.percentError(figure) : FigureText.error(figure);
+    }
+
+    /** With a sign, so that it reads as a change. */
+    static String change(FigureKind kind, Figure change) {
+        String text = value(kind, change);
+        return change.value() > 0 && !change.infinite() ? "+" + text : text;
+    }
+
+    /** A change relative to what it was, in percent with a sign. */
+    static String lift(Figure lift) {
+        return lift.defined() ? String.format(java.util.Locale.ROOT, "%+.1f %%", 100 * lift.value() + 0.0) : "—";
+    }
+
+    /** The figure's words with its unit. */
+    static String title(FigureKind kind, Portfolio portfolio) {
+        return switch (kind.measured()) {
+            case IN_MONEY -> (kind.words() + ", " + portfolio.currency() + " " + portfolio.unit()).strip();
+            case AS_PART -> kind.words() + ", %";
+            case PLAINLY -> kind.words();
+        };
+    }
+}
