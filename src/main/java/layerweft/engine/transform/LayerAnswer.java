@@ -53,6 +53,11 @@ final class LayerAnswer {
         return levels[2];
     }
 
+    /** The sum on the lattice of twice the finest step. */
+    LatticeSum coarser() {
+        return levels[1];
+    }
+
     SumFacts facts() {
         return facts;
     }

@@ -120,7 +120,7 @@ public final class TransformEngine {
     public TransformLaw law(int layer) {
         AnnualSums sums = sums(layer);
         LayerAnswer answer = answer(layer, sums);
-        return new TransformLaw(sums, answer.finest(), answer.facts(), treaty.layer(layer).terms());
+        return new TransformLaw(sums, answer.finest(), answer.coarser(), answer.facts(), treaty.layer(layer).terms());
     }
 
     private LayerAnswer answer(int layer) {

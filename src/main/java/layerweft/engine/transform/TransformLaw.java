@@ -13,13 +13,26 @@ public final class TransformLaw {
     private final LevelFigures figures;
     private final AnnualSums sums;
     private final double end;
+    private final SumFacts facts;
+    private final LatticeSum before;
 
-    TransformLaw(AnnualSums sums, LatticeSum sum, SumFacts facts, LayerTerms terms) {
+    /** @param before the sum on the lattice of twice the step, null where it is not kept */
+    TransformLaw(AnnualSums sums, LatticeSum sum, LatticeSum before, SumFacts facts, LayerTerms terms) {
         this.sums = sums;
+        this.facts = facts;
+        this.before = before;
         this.sum = sum;
         this.terms = terms;
         this.end = sums.end();
         this.figures = new LevelFigures(sum, terms, facts, end);
+    }
+
+    /** The same law on the lattice of twice the step: what a figure changes by shows its error. Only the finest law has a coarser one. */
+    public TransformLaw coarser() {
+        if (before == null) {
+            throw new IllegalStateException("only one coarser lattice is kept");
+        }
+        return new TransformLaw(sums, before, null, facts, terms);
     }
 
     /** Distance of the points of the lattice, in money. */
@@ -30,6 +43,20 @@ public final class TransformLaw {
     /** The largest loss that the lattice knows: M, or an amount that is passed with a negligible chance where there is no M. */
     public double largest() {
         return end - terms.deductible();
+    }
+
+    /** Rising amounts from 0 to {@link #largest()} between which {@link #averages()} are known. */
+    public double[] bounds() {
+        double[] bounds = sum.pieces(terms.deductible(), end).bounds();
+        for (int k = 0; k < bounds.length; k++) {
+            bounds[k] -= terms.deductible();
+        }
+        return bounds;
+    }
+
+    /** Averages of P(Y &gt; y) between neighbouring {@link #bounds()}, for the law whose mass is spread, mean by mean, to the lattice. */
+    public double[] averages() {
+        return sum.pieces(terms.deductible(), end).average();
     }
 
     /** E[Y]. */

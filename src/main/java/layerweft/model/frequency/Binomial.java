@@ -36,12 +36,12 @@ public record Binomial(int trials, double chance) implements FrequencyModel {
 
     @Override
     public double cdf(int n) {
-        return law().cumulativeProbability(n);
+        return LowerTail.holds(this, n) ? LowerTail.cdf(this, n) : law().cumulativeProbability(n);
     }
 
     @Override
     public double survival(int n) {
-        return law().survivalProbability(n);
+        return LowerTail.holds(this, n) ? 1 - LowerTail.cdf(this, n) : law().survivalProbability(n);
     }
 
     @Override

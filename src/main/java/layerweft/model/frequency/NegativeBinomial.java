@@ -55,6 +55,9 @@ public record NegativeBinomial(double mean, double varianceToMean) implements Fr
         if (n < 0) {
             return 0;
         }
+        if (LowerTail.holds(this, n)) {
+            return LowerTail.cdf(this, n);
+        }
         return nearPoisson() ? RegularizedBeta.complement(failure(), n + 1.0, size()) : RegularizedBeta.value(success(), size(), n + 1.0);
     }
 
@@ -62,6 +65,9 @@ public record NegativeBinomial(double mean, double varianceToMean) implements Fr
     public double survival(int n) {
         if (n < 0) {
             return 1;
+        }
+        if (LowerTail.holds(this, n)) {
+            return 1 - LowerTail.cdf(this, n);
         }
         return nearPoisson() ? RegularizedBeta.value(failure(), n + 1.0, size()) : RegularizedBeta.complement(success(), size(), n + 1.0);
     }
