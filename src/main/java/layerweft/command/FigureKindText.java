@@ -1,5 +1,6 @@
 package layerweft.command;
 
+import java.util.Locale;
 import layerweft.figures.Figure;
 import layerweft.model.portfolio.Portfolio;
 import layerweft.study.FigureKind;
@@ -26,13 +27,18 @@ final class FigureKindText {
 
     /** A change relative to what it was, in percent with a sign. */
     static String lift(Figure lift) {
-        return lift.defined() ? String.format(java.util.Locale.ROOT, "%+.1f %%", 100 * lift.value() + 0.0) : "—";
+        return lift.defined() ? String.format(Locale.ROOT, "%+.1f %%", 100 * lift.value() + 0.0) : "—";
     }
 
     /** The figure's words, with the currency where it is money. */
     static String title(FigureKind kind, Portfolio portfolio) {
         boolean money = kind.measured() == FigureKind.Measured.IN_MONEY;
         return money ? (kind.words() + ", " + portfolio.currency() + " " + portfolio.unit()).strip() : kind.words();
+    }
+
+    /** At the beginning of a sentence. */
+    static String capital(String words) {
+        return words.substring(0, 1).toUpperCase(Locale.ROOT) + words.substring(1);
     }
 
     /** The title of an axis whose numbers stand alone. */

@@ -36,10 +36,13 @@ final class SweepText {
         Portfolio portfolio = sweep.treaty().portfolio();
         line(portfolio.name() + ": " + sweep.treaty().programme().name());
         String linked = portfolio.dependence().links() == Dependence.Links.COUNTS ? "Annual counts" : "Annual totals";
-        line(FigureKindText.title(kind, portfolio) + ". " + linked + " of the perils joined by each family at the same Kendall's τ.");
-        if (sweep.simulated()) {
+        line(FigureKindText.capital(FigureKindText.title(kind, portfolio)) + ". " + linked + " of the perils joined by each family at the same Kendall's τ.");
+        if (sweep.layers().stream().anyMatch(layer -> !layer.refusals().isEmpty())) {
             line(String.format(Locale.ROOT, "Simulated layers: %,d years, seed %d, the same random numbers at every point.",
                     sweep.settings().years(), sweep.settings().seed()));
+        }
+        if (sweep.request().check() > 0) {
+            line(String.format(Locale.ROOT, "Beside each point: %,d simulated years, seed %d.", sweep.request().check(), sweep.settings().seed()));
         }
         for (LayerSweep layer : sweep.layers()) {
             if (layer.still().isEmpty() && !hardly(layer)) {
@@ -57,7 +60,7 @@ final class SweepText {
         line("Independent " + FigureKindText.value(kind, kind.of(layer.independent())) + ", comonotonic "
                 + FigureKindText.value(kind, layer.comonotoneValue()) + " (" + FigureKindText.lift(layer.comonotoneLift()) + ").");
         Comparator<SweepPoint> bySlope = Comparator.comparingDouble(p -> Math.abs(p.slope().value()));
-        layer.points().stream().filter(p -> p.slope().defined()).max(bySlope).ifPresent(p -> line("Steepest with " + p.family().label()
+        layer.points().stream().filter(p -> Math.abs(p.slope().value()) > p.slope().error()).max(bySlope).ifPresent(p -> line("Steepest with " + p.family().label()
                 + " at τ " + FigureText.plain(p.kendallTau()) + ": " + FigureKindText.change(kind, p.slope().times(0.1)) + " for 0.1 of τ."));
         layer.spreads().stream().filter(s -> s.width().defined()).max(Comparator.comparingDouble(s -> s.width().value()))
                 .filter(s -> s.width().value() > 0 && sweep.request().families().size() > 1)
@@ -107,23 +110,29 @@ final class SweepText {
         return layer.points().stream().map(SweepPoint::value).max(Comparator.comparingDouble(Figure::error)).orElseThrow();
     }
 
-    /** Whether all points and both ends are within {@value #HARDLY} of each other, so that a table would show the same number everywhere. */
+    /**
+     * Whether all points and both ends are within {@value #HARDLY} of each other, so that a table would show the same number everywhere, or
+     * within what a simulation cannot tell from noise.
+     */
     private boolean hardly(LayerSweep layer) {
         DoubleSummaryStatistics values = DoubleStream.concat(layer.points().stream().mapToDouble(p -> p.value().value()),
                 DoubleStream.of(kind.of(layer.independent()).value(), layer.comonotoneValue().value())).summaryStatistics();
-        return values.getMax() - values.getMin() <= HARDLY * Math.abs(values.getMax());
+        double range = values.getMax() - values.getMin();
+        return range <= HARDLY * Math.abs(values.getMax()) || !layer.refusals().isEmpty() && range <= 2 * largestError(layer).error();
     }
 
     private void resting() {
         text.append('\n');
         for (LayerSweep layer : sweep.layers()) {
             if (layer.still().isEmpty() && hardly(layer)) {
+                Figure largest = largestError(layer);
                 line(layer.name() + " hardly depends on the copula: " + kind.words() + " "
-                        + FigureKindText.value(kind, kind.of(layer.independent())) + " at every point, to within "
-                        + FigureText.plainPercent(HARDLY) + ".");
+                        + FigureKindText.value(kind, kind.of(layer.independent())) + " when independent, elsewhere the same to within "
+                        + (layer.refusals().isEmpty() ? FigureText.plainPercent(HARDLY)
+                                : "the errors of the simulation (" + FigureKindText.error(kind, largest) + ")") + ".");
             }
             layer.still().ifPresent(reason -> line(layer.name() + " does not depend on the copula: " + reason + ". "
-                    + kind.words() + " " + FigureKindText.value(kind, kind.of(layer.independent())) + "."));
+                    + FigureKindText.capital(kind.words()) + " " + FigureKindText.value(kind, kind.of(layer.independent())) + "."));
         }
     }
 

@@ -10,7 +10,8 @@ import layerweft.figures.Figure;
  * @param subject the peril it is about; empty for the dependence between all
  * @param step what was changed, in words
  * @param value the figure after the step
- * @param change the figure after less before
+ * @param change the figure after less before; its error adds those of both, which for simulations with the same random numbers is more than
+ *     it is
  * @param reach how far the assumption as a whole can move the figure, where that has ends
  * @param perStandardError the change for one standard error of the assumption, where its evidence is known
  */

@@ -145,7 +145,7 @@ final class SweepRun {
         Figure ceiling = request.figure().of(comonotone);
         List<String> refusals = curves.stream().map(curve -> curve.refusals.get(j)).filter(r -> r != null).distinct().toList();
         return new LayerSweep(treaty.layer(j).name(), reason, refusals, independent, comonotone, ceiling,
-                reason.isPresent() ? Figure.exact(0) : lift(ceiling, request.figure().of(independent)), points);
+                reason.isPresent() ? rest(ceiling) : lift(ceiling, request.figure().of(independent)), points);
     }
 
     private LayerFigures end(int e, int j, boolean simulated) {
@@ -160,10 +160,15 @@ final class SweepRun {
         boolean unmoved = DependenceReach.none(treaty, j, kind).isPresent();
         boolean meanUnmoved = DependenceReach.none(treaty, j, FigureKind.EXPECTED_LOSS).isPresent();
         return new SweepPoint(curve.family, tau, figures,
-                meanUnmoved ? Figure.exact(0) : lift(figures.expectedLoss(), independent.expectedLoss()), value,
-                unmoved ? Figure.exact(0) : lift(value, kind.of(independent)),
-                unmoved ? Figure.exact(0) : curve.slope(tau, j, kind),
+                meanUnmoved ? rest(figures.expectedLoss()) : lift(figures.expectedLoss(), independent.expectedLoss()), value,
+                unmoved ? rest(value) : lift(value, kind.of(independent)),
+                unmoved ? rest(value) : curve.slope(tau, j, kind),
                 request.check() > 0 ? curve.check.get(tau).get(j) : null);
+    }
+
+    /** The lift and the slope of a figure that cannot move. */
+    private static Figure rest(Figure value) {
+        return Double.isFinite(value.value()) ? Figure.exact(0) : Figure.UNDEFINED;
     }
 
     /** φ/φ_0 − 1; the errors are added as if they went together, which for simulations with the same random numbers is more than they are. */

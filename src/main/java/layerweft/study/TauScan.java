@@ -21,6 +21,8 @@ import org.apache.commons.math3.optim.univariate.UnivariateObjectiveFunction;
 final class TauScan {
     private static final double STEP = 0.05;
     private static final int MOST_STEPS = 60;
+    /** Between grid points a difference may fall so many times as much as from one to the next. */
+    private static final double SUDDEN = 4;
 
     private final DoubleFunction<Figure> difference;
     private final double tolerance;
@@ -82,7 +84,10 @@ final class TauScan {
         for (int k = 1; k < grid.size() - 1; k++) {
             int sign = sign(at(grid.get(k)));
             double here = sign * at(grid.get(k)).value();
-            if (sign != 0 && here < sign * at(grid.get(k - 1)).value() && here < sign * at(grid.get(k + 1)).value()) {
+            double left = sign * at(grid.get(k - 1)).value();
+            double right = sign * at(grid.get(k + 1)).value();
+            // a curve that turns gently far from 0 does not come down to it between grid points
+            if (sign != 0 && here < left && here < right && here < SUDDEN * (Math.max(left, right) - here)) {
                 new BrentOptimizer(tolerance, tolerance).optimize(new UnivariateObjectiveFunction(tau -> sign * at(tau).value()),
                         GoalType.MINIMIZE, new SearchInterval(grid.get(k - 1), grid.get(k + 1), grid.get(k)), new MaxEval(MOST_STEPS));
             }
