@@ -28,7 +28,7 @@ final class BreakEvenText {
         } else {
             found.answers().forEach(a -> text.append(a.family().label()).append(": ").append(inWords(found, a)).append(".\n"));
         }
-        return text.append("Cost of risk is not compared: the law of the net position with its reinstatement premiums is not known to the transform.\n")
+        return text.append("Cost of risk is not compared: neither engine gives the law of the net position with its reinstatement premiums.\n")
                 .toString();
     }
 

@@ -1,7 +1,9 @@
 package layerweft.study;
 
 import java.util.ArrayList;
+import java.util.HashMap;
 import java.util.List;
+import java.util.Map;
 import java.util.Optional;
 import java.util.concurrent.Callable;
 import java.util.concurrent.CancellationException;
@@ -29,6 +31,7 @@ final class CopulaPricing {
     private final SimulationSettings settings;
     private final RunControl control;
     private final TransformEngine prepared;
+    private final Map<Integer, LayerFigures> resting = new HashMap<>();
 
     CopulaPricing(Treaty treaty, SimulationSettings settings, RunControl control) {
         this.treaty = treaty;
@@ -70,24 +73,28 @@ final class CopulaPricing {
 
     /**
      * Figures of the wanted layers under a copula, by the transform where it can price them and by simulation elsewhere, on the calling
-     * thread. For studies that ask for one copula after the other: the transform's preparation is kept.
+     * thread. For studies that ask for one copula after the other: the transform's preparation is kept, and so are layers that no copula moves.
      *
      * @param layers positions; the figures come in their order
      */
     List<LayerFigures> price(Copula copula, List<Integer> layers) {
+        List<Integer> moving = layers.stream().filter(j -> !resting.containsKey(j)).toList();
+        Map<Integer, LayerFigures> priced = new HashMap<>(resting);
         TransformEngine engine = prepared.with(copula);
         List<LayerFigures> simulated = null;
-        List<LayerFigures> figures = new ArrayList<>();
-        for (int j : layers) {
+        for (int j : moving) {
             stopIfAsked();
             if (engine.refusal(j).isEmpty()) {
-                figures.add(figures(j, engine.price(j)));
+                priced.put(j, figures(j, engine.price(j)));
             } else {
                 simulated = simulated == null ? simulate(copula, settings.years()) : simulated;
-                figures.add(simulated.get(j));
+                priced.put(j, simulated.get(j));
+            }
+            if (DependenceReach.none(treaty, j).isPresent()) {
+                resting.put(j, priced.get(j));
             }
         }
-        return figures;
+        return layers.stream().map(priced::get).toList();
     }
 
     /** All layers under a copula, simulated with the same random numbers for every copula. */
