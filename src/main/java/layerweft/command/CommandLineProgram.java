@@ -6,6 +6,7 @@ import java.util.concurrent.CancellationException;
 import layerweft.file.FaultyFileException;
 import layerweft.model.Finding;
 import layerweft.model.InadmissibleException;
+import layerweft.study.EngineRefusedException;
 import picocli.CommandLine;
 import picocli.CommandLine.Command;
 import picocli.CommandLine.Model.CommandSpec;
@@ -68,7 +69,7 @@ public final class CommandLineProgram implements Runnable {
             }
             return WRONG;
         }
-        if (e instanceof RunFailedException) {
+        if (e instanceof RunFailedException || e instanceof EngineRefusedException) {
             err.println(e.getMessage());
             return WRONG;
         }

@@ -13,6 +13,8 @@ import layerweft.figures.Figure;
  */
 final class FigureText {
     private static final int SIGNIFICANT = 4;
+    /** Places to which the error of an exact-looking 0 is told. */
+    private static final int PLACES_OF_ZERO = 2;
 
     private FigureText() {}
 
@@ -23,10 +25,10 @@ final class FigureText {
 
     /** The error alone, to the places of the value; empty where the figure is exact. */
     static String error(Figure figure) {
-        if (special(figure) != null || figure.error() == 0) {
+        if (!figure.defined() || figure.infinite() || figure.error() == 0) {
             return "";
         }
-        int places = places(figure);
+        int places = figure.value() == 0 ? Math.min(PLACES_OF_ZERO, places(figure)) : places(figure);
         double unit = Math.pow(10, -places);
         return figure.error() < 0.5 * unit ? "± < " + grouped(unit, places) : "± " + grouped(figure.error(), places);
     }
@@ -50,10 +52,20 @@ final class FigureText {
         return "1 in " + grouped(years, Math.min(2, Math.max(0, 2 - (int) Math.floor(Math.log10(years)))));
     }
 
+    /** A part that a person has agreed, in percent, with the digits given: 90 %, 99.5 %. */
+    static String plainPercent(double part) {
+        return new BigDecimal(Double.toString(part)).movePointRight(2).stripTrailingZeros().toPlainString() + " %";
+    }
+
     /** The shortest plain decimal that reads back the same. */
     static String plain(double value) {
         BigDecimal decimal = new BigDecimal(Double.toString(value)).stripTrailingZeros();
         return decimal.scale() < 0 ? decimal.setScale(0).toPlainString() : decimal.toPlainString();
+    }
+
+    /** An agreed amount with the digits given, thousands grouped: 12,500 or 0.75. */
+    static String groupedPlain(double value) {
+        return grouped(value, new BigDecimal(plain(value)).scale());
     }
 
     private static String special(Figure figure) {
@@ -63,7 +75,7 @@ final class FigureText {
         if (figure.infinite()) {
             return "∞";
         }
-        return figure.value() == 0 && figure.error() == 0 ? "0" : null;
+        return figure.value() == 0 ? "0" : null;
     }
 
     /** Decimal places: to the first digit of the error, but not beyond the fourth significant digit of the value. */

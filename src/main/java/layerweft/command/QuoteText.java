@@ -9,6 +9,7 @@ import layerweft.figures.Engine;
 import layerweft.figures.Figure;
 import layerweft.figures.LayerFigures;
 import layerweft.figures.PositionStatistics;
+import layerweft.figures.ReturnPeriods;
 import layerweft.model.portfolio.Portfolio;
 import layerweft.model.treaty.Buyer;
 import layerweft.model.treaty.Layer;
@@ -58,7 +59,7 @@ final class QuoteText {
         for (int j = 0; j < quote.layers().size(); j++) {
             LayerFigures f = quote.layers().get(j);
             Layer layer = quote.treaty().layer(j);
-            table.row(f.name(), terms(layer.terms()), FigureText.percent(Figure.exact(layer.share())), FigureText.value(f.expectedLoss()),
+            table.row(f.name(), terms(layer.terms()), FigureText.plainPercent(layer.share()), FigureText.value(f.expectedLoss()),
                     FigureText.error(f.expectedLoss()), FigureText.value(f.standardDeviation()), FigureText.error(f.standardDeviation()),
                     FigureText.percent(f.lossOnLine()), FigureText.percentError(f.lossOnLine()), FigureText.oneIn(f.attachmentProbability()),
                     FigureText.oneIn(f.exhaustionProbability()), FigureText.value(f.expectedEvents()), f.engine().label());
@@ -68,8 +69,8 @@ final class QuoteText {
 
     private void premiums() {
         Pricing pricing = quote.treaty().programme().pricing();
-        section("Premium (" + Loadings.inWords(pricing.loading()) + "; brokerage " + FigureText.percent(Figure.exact(pricing.brokerage()))
-                + ", expenses " + FigureText.percent(Figure.exact(pricing.expenses())) + ")");
+        section("Premium (" + Loadings.inWords(pricing.loading()) + "; brokerage " + FigureText.plainPercent(pricing.brokerage())
+                + ", expenses " + FigureText.plainPercent(pricing.expenses()) + ")");
         TextTable table = new TextTable("", "expected + loading", "", "paid-up factor", "", "technical premium", "", "rate on line", "quoted",
                 "rate on line", "quoted/technical", "payback, years");
         for (LayerFigures f : quote.layers()) {
@@ -103,7 +104,7 @@ final class QuoteText {
         section("Recovered once in … years: the year's total, and from the year's largest event");
         List<String> header = new ArrayList<>(List.of(""));
         buyer.returnPeriods().forEach(t -> header.addAll(List.of(FigureText.plain(t), "")));
-        header.addAll(List.of("tail mean " + FigureText.percent(Figure.exact(buyer.tailLevel())), ""));
+        header.addAll(List.of("tail mean " + FigureText.plainPercent(buyer.tailLevel()), ""));
         TextTable table = new TextTable(header.toArray(String[]::new));
         for (LayerFigures f : quote.layers()) {
             table.row(cells(f.name() + ", total", f.aggregate(), f.tailValueAtRisk()));
@@ -116,7 +117,7 @@ final class QuoteText {
         section("The whole programme, losses only");
         List<String> header = new ArrayList<>(List.of("", "mean", "", "std. deviation", ""));
         buyer.returnPeriods().forEach(t -> header.addAll(List.of("1 in " + FigureText.plain(t), "")));
-        header.addAll(List.of("tail mean " + FigureText.percent(Figure.exact(buyer.tailLevel())), ""));
+        header.addAll(List.of("tail mean " + FigureText.plainPercent(buyer.tailLevel()), ""));
         TextTable table = new TextTable(header.toArray(String[]::new));
         position(table, "gross", quote.whole().gross());
         position(table, "ceded", quote.whole().ceded());
@@ -127,8 +128,8 @@ final class QuoteText {
     private void position(TextTable table, String side, PositionStatistics p) {
         String[] moments = {FigureText.value(p.mean()), FigureText.error(p.mean()), FigureText.value(p.standardDeviation()),
             FigureText.error(p.standardDeviation())};
-        table.row(cells(side + ", year", layerweft.figures.ReturnPeriods.of(p.valueAtRisk(), buyer), p.tailValueAtRisk(), moments));
-        table.row(cells(side + ", largest event", layerweft.figures.ReturnPeriods.of(p.occurrenceValueAtRisk(), buyer), null, "", "", "", ""));
+        table.row(cells(side + ", year", ReturnPeriods.of(p.valueAtRisk(), buyer), p.tailValueAtRisk(), moments));
+        table.row(cells(side + ", largest event", ReturnPeriods.of(p.occurrenceValueAtRisk(), buyer), null, "", "", "", ""));
     }
 
     private static String[] cells(String name, SortedMap<Double, Figure> curve, Figure tail, String... before) {
@@ -153,9 +154,9 @@ final class QuoteText {
         table.row("cost of cover", FigureText.value(b.costOfCover()), FigureText.error(b.costOfCover()));
         table.row("expected net position", FigureText.value(b.netPosition()), FigureText.error(b.netPosition()));
         table.row("relief of standard deviation", FigureText.value(b.reliefOfStandardDeviation()), FigureText.error(b.reliefOfStandardDeviation()));
-        b.reliefOfValueAtRisk().forEach((level, relief) -> table.row("relief of value at risk " + FigureText.percent(Figure.exact(level)),
+        b.reliefOfValueAtRisk().forEach((level, relief) -> table.row("relief of value at risk " + FigureText.plainPercent(level),
                 FigureText.value(relief), FigureText.error(relief)));
-        table.row("relief of tail mean " + FigureText.percent(Figure.exact(buyer.tailLevel())), FigureText.value(b.reliefOfTailValueAtRisk()),
+        table.row("relief of tail mean " + FigureText.plainPercent(buyer.tailLevel()), FigureText.value(b.reliefOfTailValueAtRisk()),
                 FigureText.error(b.reliefOfTailValueAtRisk()));
         table.row("cost per unit of tail relief", FigureText.value(b.costPerUnitOfTailRelief()), FigureText.error(b.costPerUnitOfTailRelief()));
         text.append(table);
@@ -171,20 +172,24 @@ final class QuoteText {
         line("* A price supports qualified judgement; it does not replace it, and it defers to local regulation and licensed practice.");
     }
 
+    /** E.g. "90 % of 60 xs 40, 180 a year"; "60 xs 120 a year" for a stop loss. */
     private static String terms(LayerTerms t) {
-        StringBuilder s = new StringBuilder();
-        if (t.quotaShare() < 1) {
-            s.append(FigureText.percent(Figure.exact(t.quotaShare()))).append(" of ");
+        List<String> parts = new ArrayList<>();
+        boolean each = t.occurrenceLimit() < Double.POSITIVE_INFINITY || t.retention() > 0 || t.hasFranchise();
+        String share = t.quotaShare() < 1 ? FigureText.plainPercent(t.quotaShare()) + " of " : "";
+        if (t.hasFranchise()) {
+            parts.add(amount(t.occurrenceLimit()) + " franchise " + amount(t.franchise()));
+        } else if (each) {
+            parts.add(amount(t.occurrenceLimit()) + (t.retention() > 0 ? " xs " + amount(t.retention()) : " each"));
         }
-        s.append(amount(t.occurrenceLimit())).append(t.hasFranchise() ? " franchise " + amount(t.franchise()) : " xs " + amount(t.retention()));
-        if (t.deductible() > 0 || t.annualLimit() < Double.POSITIVE_INFINITY) {
-            s.append(", year ").append(amount(t.annualLimit())).append(" xs ").append(amount(t.deductible()));
+        if (t.hasAnnualTerms()) {
+            parts.add(amount(t.annualLimit()) + (t.deductible() > 0 ? " xs " + amount(t.deductible()) : "") + " a year");
         }
-        return s.toString();
+        return share + (parts.isEmpty() ? "all losses" : String.join(", ", parts));
     }
 
     private static String amount(double value) {
-        return Double.isInfinite(value) ? "∞" : FigureText.plain(value);
+        return Double.isInfinite(value) ? "∞" : FigureText.groupedPlain(value);
     }
 
     private String money() {

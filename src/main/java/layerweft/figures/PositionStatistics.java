@@ -15,4 +15,9 @@ public record PositionStatistics(
         Figure standardDeviation,
         SortedMap<Double, Figure> valueAtRisk,
         Figure tailValueAtRisk,
-        SortedMap<Double, Figure> occurrenceValueAtRisk) {}
+        SortedMap<Double, Figure> occurrenceValueAtRisk) {
+
+    PositionStatistics withMean(Figure other) {
+        return new PositionStatistics(other, standardDeviation, valueAtRisk, tailValueAtRisk, occurrenceValueAtRisk);
+    }
+}

@@ -2,6 +2,7 @@ package layerweft.study;
 
 import java.util.ArrayList;
 import java.util.List;
+import java.util.Optional;
 import layerweft.model.copula.Independence;
 import layerweft.model.treaty.Layer;
 import layerweft.model.treaty.LayerTerms;
@@ -12,8 +13,10 @@ final class LayerNotes {
 
     private LayerNotes() {}
 
-    static List<String> of(Treaty treaty, int j) {
+    /** @param refusal why the layer is simulated although the transform was welcome */
+    static List<String> of(Treaty treaty, int j, Optional<String> refusal) {
         List<String> notes = new ArrayList<>();
+        refusal.ifPresent(reason -> notes.add("simulated, because " + reason));
         Layer layer = treaty.layer(j);
         LayerTerms terms = layer.terms();
         boolean copula = treaty.portfolio().perils().size() > 1 && !(treaty.portfolio().dependence().copula() instanceof Independence);

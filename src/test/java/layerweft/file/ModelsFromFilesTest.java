@@ -104,7 +104,7 @@ class ModelsFromFilesTest {
 
     static Stream<Arguments> frequencies() {
         return Stream.of(
-                Arguments.of("'model': 'poisson', 'mean': 0", new Poisson(0)),
+                Arguments.of("'model': 'poisson', 'mean': 1.8", new Poisson(1.8)),
                 Arguments.of("'model': 'negativeBinomial', 'mean': 2, 'varianceToMean': 1.5", new NegativeBinomial(2, 1.5)),
                 Arguments.of("'model': 'binomial', 'trials': 4, 'chance': 0.5", new Binomial(4, 0.5)),
                 Arguments.of("'model': 'empirical', 'probabilities': [0.5, 0.25, 0.25]", new EmpiricalCounts(List.of(0.5, 0.25, 0.25))));

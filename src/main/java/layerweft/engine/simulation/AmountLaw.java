@@ -110,13 +110,13 @@ final class AmountLaw {
     }
 
     /**
-     * Standard error of the quantile at a level, from the spread of the quantiles at the ends of the level's own 68 % interval
-     * (order statistics; no density need be estimated, and at an atom it is 0).
+     * Standard error of the quantile at a level: a quarter of the distance of the quantiles at the ends of the level's own 95 % interval
+     * (order statistics; no density need be estimated, and well inside an atom it is 0).
      */
     double quantileError(double level) {
-        double s = Math.sqrt(level * (1 - level) / years);
+        double s = 2 * Math.sqrt(level * (1 - level) / years);
         double from = quantile(Math.max(0, level - s));
         double to = quantile(Math.min(1, level + s));
-        return to == from ? 0 : 0.5 * (to - from);
+        return to == from ? 0 : 0.25 * (to - from);
     }
 }

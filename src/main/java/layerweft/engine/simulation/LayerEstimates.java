@@ -57,10 +57,10 @@ final class LayerEstimates {
         double factorSlope = controlSlope(sums.ra / n - factorMean * sums.a / n);
         double off = controlled() ? sums.a / n - known.mean() : 0;
         Figure expected = infiniteMean ? Figure.INFINITE
-                : new Figure(mean - meanSlope * off, error(residual(variance, meanSlope, sums.ya / n - mean * sums.a / n)));
+                : new Figure(mean - meanSlope * off, error(residual(variance, meanSlope, sums.ya / n - mean * sums.a / n)) + unseen(meanSlope));
         double factorVariance = Math.max(0, sums.rr / n - factorMean * factorMean);
         Figure factor = new Figure(Math.max(0, factorMean - factorSlope * off),
-                error(residual(factorVariance, factorSlope, sums.ra / n - factorMean * sums.a / n)));
+                error(residual(factorVariance, factorSlope, sums.ra / n - factorMean * sums.a / n)) + unseen(factorSlope));
         Figure deviation = infiniteDeviation ? Figure.INFINITE
                 : new Figure(sd, sd == 0 ? 0 : error(variance(y -> (y - mean) * (y - mean)) / (4 * variance)));
 
@@ -68,7 +68,7 @@ final class LayerEstimates {
         Figure tail = infiniteMean ? Figure.INFINITE : tailMean(buyer.tailLevel());
         PremiumParts premium = premium(expected, deviation, factor, meanSlope, factorSlope);
         return new LayerStatistics(Engine.SIMULATION, expected, null, deviation,
-                probability(sums.attached), probability(sums.exhausted), events(), factor, premium.net, premium.upfront, atRisk, tail,
+                probability(sums.attached), limited ? probability(sums.exhausted) : Figure.exact(0), events(), factor, premium.net, premium.upfront, atRisk, tail,
                 quantiles(largestLaw));
     }
 
@@ -104,7 +104,19 @@ final class LayerEstimates {
 
     private Figure probability(long count) {
         double p = (double) count / sums.years;
-        return new Figure(p, error(p * (1 - p)));
+        return new Figure(p, error(Math.max(p * (1 - p), 1.0 / sums.years)));
+    }
+
+    /**
+     * What the control variate cannot correct: years beyond the annual limit are rare, and in a sample without any Y and A go together as if
+     * there were no limit. One such year more or less, by a further full limit, is always within the error.
+     */
+    private double unseen(double slope) {
+        if (slope == 0 || !terms.hasAnnualTerms()) {
+            return 0;
+        }
+        double largest = sumLaw.cells() == 0 ? 0 : sumLaw.point(sumLaw.cells() - 1);
+        return Math.abs(slope) * Math.min(terms.occurrenceLimit(), largest) / sums.years;
     }
 
     private Figure events() {
@@ -162,11 +174,11 @@ final class LayerEstimates {
             upfront[k] = part + (timed ? 0 : s.byReinstatementFactor() * terms.reinstatementFactor(y));
         }
         double control = s.byExpectedLoss() * meanSlope;
-        double netError = error(residualVariance(net, control * build.divisor()));
+        double netError = error(residualVariance(net, control * build.divisor())) + unseen(control * build.divisor());
         // pro rata as to time the factor is no function of A: its error is added in full, which is never too little
         double upfrontError = timed
                 ? error(residualVariance(upfront, control)) + Math.abs(s.byReinstatementFactor()) * factor.error()
-                : error(residualVariance(upfront, control + s.byReinstatementFactor() * factorSlope));
+                : error(residualVariance(upfront, control + s.byReinstatementFactor() * factorSlope)) + unseen(control);
         return new PremiumParts(new Figure(build.net(), netError), new Figure(build.upfront(), upfrontError));
     }
 

@@ -11,9 +11,6 @@ import layerweft.model.severity.SeveritySampler;
 
 /** Draws the losses of one peril's events. Immutable; the workspace is passed in. */
 final class PerilDraw {
-    /** Slots kept apart for the events of one year in the streams of sub-peril scores. */
-    private static final int EVENT_BITS = 24;
-
     private final SeveritySampler single;
     private final SubPeril[] subPerils;
     private final ScoreSampler scores;
@@ -51,28 +48,18 @@ final class PerilDraw {
 
     /** Event by event: sizes joined by the sub-perils' copula, occurrence independent of them and of each other. */
     private void split(long key, int years, PerilYears work) {
-        KeyedStream sizes = new KeyedStream(KeyedStream.key(key, 0));
+        // scores first, then turned into losses in place
+        scores.fill(new KeyedStream(KeyedStream.key(key, 0)), 0, work.counts, years, work.parts);
         KeyedStream occurrence = new KeyedStream(KeyedStream.key(key, 1));
-        int most = 0;
+        int e = 0;
         for (int y = 0; y < years; y++) {
-            most = Math.max(most, work.counts[y]);
-        }
-        double[][] drawn = new double[subPerils.length][Math.max(most, 1)];
-        int first = 0;
-        for (int y = 0; y < years; y++) {
-            int n = work.counts[y];
-            if (n == 0) {
-                continue;
-            }
-            scores.draw(sizes, (long) y << EVENT_BITS, n, drawn);
             occurrence.seek(y);
-            for (int j = 0; j < n; j++) {
+            for (int j = work.counts[y]; j > 0; j--, e++) {
                 for (int k = 0; k < subPerils.length; k++) {
                     boolean occurs = occurrence.nextDouble() < subPerils[k].chance();
-                    work.parts[k][first + j] = occurs ? loss(k, drawn[k][j]) : 0;
+                    work.parts[k][e] = occurs ? loss(k, work.parts[k][e]) : 0;
                 }
             }
-            first += n;
         }
     }
 

@@ -15,8 +15,6 @@ import org.apache.commons.statistics.distribution.TDistribution;
  * exponentially.
  */
 final class FactorNodes {
-    private static final double REACH = 6.6;
-
     private FactorNodes() {
     }
 
@@ -66,17 +64,21 @@ final class FactorNodes {
         return loadings;
     }
 
-    /** @param degreesOfFreedom ν, infinite for the normal copula */
-    static LatentNodes of(double[] loadings, double degreesOfFreedom, CountMargin[] margins) {
+    /**
+     * @param degreesOfFreedom ν, infinite for the normal copula
+     * @param error wanted of joint probabilities
+     */
+    static LatentNodes of(double[] loadings, double degreesOfFreedom, CountMargin[] margins, double error) {
+        double digits = Math.log(3 / error);
         double[][] scores = scores(degreesOfFreedom, margins);
         double sharpest = 0;
         for (double loading : loadings) {
             sharpest = Math.max(sharpest, Math.abs(loading) / Math.sqrt(Math.max(1 - loading * loading, 1e-12)));
         }
         // at z = iη the normal density and d functions Φ of slope s grow as e^((1 + d s²)η²/2): error e^(−2π²/(h²(1 + d s²)))
-        double step = 0.95 / Math.sqrt(1 + loadings.length * sharpest * sharpest);
-        int half = (int) Math.ceil(REACH / step);
-        MixingRule mixing = MixingRule.of(degreesOfFreedom);
+        double step = Math.PI * Math.sqrt(2 / digits) / Math.sqrt(1 + loadings.length * sharpest * sharpest);
+        int half = (int) Math.ceil(Math.sqrt(2 * digits) / step);
+        MixingRule mixing = MixingRule.of(degreesOfFreedom, error);
         int count = (2 * half + 1) * mixing.roots.length;
         double[] weights = new double[count];
         double[][][] survival = new double[margins.length][count][];
@@ -141,13 +143,14 @@ final class FactorNodes {
     /** The trapezoidal rule over s = ln w, w = χ²_ν/ν, whose density is proportional to exp(ν(s − e^s)/2). */
     record MixingRule(double[] roots, double[] weights) {
 
-        static MixingRule of(double degreesOfFreedom) {
+        /** @param error wanted of a mean; the steps were found by trial, the error falls exponentially in their inverse */
+        static MixingRule of(double degreesOfFreedom, double error) {
             if (Double.isInfinite(degreesOfFreedom)) {
                 return new MixingRule(new double[] {1}, new double[] {1});
             }
             double half = degreesOfFreedom / 2;
             double spread = 1 / Math.sqrt(half);
-            double step = Math.min(0.4, 0.6 * spread);
+            double step = Math.min(8.7, 13 * spread) / Math.log(3 / error);
             double low = -Math.max(8 * spread, 24 / half + 1);
             double high = Math.min(8 * spread, Math.log(7 + 60 / half));
             double logConstant = half * Math.log(half) - LogGamma.value(half);

@@ -11,6 +11,8 @@ final class FrailtyNodes {
     /** exp(−e^x): 1 within 1e-13 below, under 1e-16 above. */
     private static final double FLAT_BELOW = -30;
     private static final double FLAT_ABOVE = 3.62;
+    /** The error is measured at some of the joint probabilities, and is oscillating: others may be larger. */
+    private static final double SAFETY = 4;
 
     private FrailtyNodes() {
     }
@@ -25,7 +27,7 @@ final class FrailtyNodes {
                 conditional[i][k] = conditional(logInverse[i], rule.logs()[k], survival);
             }
         }
-        return new LatentNodes(rule.weights(), conditional, measured(generator, rule, logInverse));
+        return new LatentNodes(rule.weights(), conditional, SAFETY * measured(generator, rule, logInverse));
     }
 
     /** The rule that {@link #of} takes its nodes from. */

@@ -15,6 +15,8 @@ import org.apache.commons.numbers.gamma.LogGamma;
  * @param weights w_k, sum 1
  */
 record FrailtyRule(double[] logs, double[] weights) {
+    /** The step for an error of 1e-9, for which grids of narrow laws are tuned. */
+    private static final double USUAL_STEP = 0.4525;
 
     /**
      * @param low nothing changes below: ln V there counts as {@code low}
@@ -23,32 +25,33 @@ record FrailtyRule(double[] logs, double[] weights) {
      */
     static FrailtyRule of(ArchimedeanFamily family, double theta, double low, double high, double error) {
         double step = Math.PI * Math.PI / Math.log(3 / error);
+        double denser = USUAL_STEP / step;
         return switch (family) {
-            case CLAYTON -> clayton(1 / theta, low, high, step);
-            case GUMBEL -> gumbel(1 / theta, low, high, step);
-            case FRANK -> IntegerFrailty.logSeries(theta).rule(low, high, step);
-            case JOE -> IntegerFrailty.sibuya(1 / theta).rule(low, high, step);
+            case CLAYTON -> clayton(1 / theta, low, high, step, denser);
+            case GUMBEL -> gumbel(1 / theta, low, high, step, denser);
+            case FRANK -> IntegerFrailty.logSeries(theta).rule(low, high, step, denser);
+            case JOE -> IntegerFrailty.sibuya(1 / theta).rule(low, high, step, denser);
         };
     }
 
     /** V is gamma with shape k: the density of ln V is e^(ky − e^y)/Γ(k). A wide law reaches far down. */
-    private static FrailtyRule clayton(double k, double low, double high, double step) {
+    private static FrailtyRule clayton(double k, double low, double high, double step, double denser) {
         double constant = LogGamma.value(k);
         double width = 1 / Math.sqrt(k);
         double centre = k > 1 ? Math.log(k) : 0;
         double least = centre - 9 * width - 34 / k;
         double most = centre + Math.min(9 * width, 3.8);
-        LogGrid grid = width < 1 ? LogGrid.dense(centre, step, 3 * width, 4.0) : LogGrid.even(centre, step);
+        LogGrid grid = width < 1 ? LogGrid.dense(centre, step, 3 * width, 4.0 * denser) : LogGrid.even(centre, step);
         return grid.rule(y -> Math.exp(k * y - Math.exp(y) - constant), Math.max(least, low - 2), most).gathered(low, high, true);
     }
 
     /** V is positive stable with index α. A wide law reaches far up. */
-    private static FrailtyRule gumbel(double alpha, double low, double high, double step) {
+    private static FrailtyRule gumbel(double alpha, double low, double high, double step, double denser) {
         StableDensity density = new StableDensity(alpha);
         double width = density.width();
         double least = density.least();
         double most = Math.max(least, Math.min(high + 2, 36 / alpha));
-        LogGrid grid = width < 1 ? LogGrid.dense(density.centre(), step, 2.5 * width, 7.0) : LogGrid.even(density.centre(), step);
+        LogGrid grid = width < 1 ? LogGrid.dense(density.centre(), step, 2.5 * width, 7.5 * denser) : LogGrid.even(density.centre(), step);
         return grid.rule(density::of, least, most).gathered(low, high, false);
     }
 

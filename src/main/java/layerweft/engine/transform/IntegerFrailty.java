@@ -29,16 +29,17 @@ record IntegerFrailty(DoubleUnaryOperator massOfLog) {
         return new IntegerFrailty(y -> Math.exp(constant + (y > 36 ? -alpha * y : y + logGammaRatio(Math.exp(y), alpha))));
     }
 
-    FrailtyRule rule(double low, double high, double step) {
+    /** @param denser how many times as many nodes as for an error of 1e-9 */
+    FrailtyRule rule(double low, double high, double step, double denser) {
         double[] logs = new double[TERMS];
         double[] weights = new double[TERMS];
         for (int k = 1; k <= TERMS; k++) {
             logs[k - 1] = Math.log(k);
             weights[k - 1] = massOfLog.applyAsDouble(logs[k - 1]) / k * (1 - handover(logs[k - 1]));
         }
-        FrailtyRule terms = new FrailtyRule(logs, weights).clustered(Math.log(7.5), 0.28);
+        FrailtyRule terms = new FrailtyRule(logs, weights).clustered(Math.log(7.5), 0.28 / denser);
         double least = MIDDLE - 7.5 * WIDTH;
-        FrailtyRule rest = LogGrid.dense(MIDDLE, step, 2.5 * WIDTH, 1.5).rule(y -> massOfLog.applyAsDouble(y) * handover(y), least,
+        FrailtyRule rest = LogGrid.dense(MIDDLE, step, 2.5 * WIDTH, 1.5 * denser).rule(y -> massOfLog.applyAsDouble(y) * handover(y), least,
                 Math.max(least, high + 2));
         return terms.joined(rest).gathered(low, Math.max(high, 0.1), false);
     }

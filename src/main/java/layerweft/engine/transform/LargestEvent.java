@@ -4,28 +4,35 @@ import java.util.List;
 import layerweft.model.treaty.LayerTerms;
 
 /**
- * The law of the year's largest recovery from one event: min(max_e o_e, M), exact where there is no annual deductible; with one, it is
- * what the largest event would bring if the deductible were used up. P(max ≤ x) = E[Π P(o_i ≤ x)^{N_i}], a generating function at one
- * real point.
+ * The law of the year's largest recovery from one event, each event taken as the first of its year: the annual terms applied to the year's
+ * largest occurrence loss. P(max o ≤ x) = E[Π P(o_i ≤ x)^{N_i}], a generating function at one real point.
  */
 final class LargestEvent {
     private final List<EventLaw> events;
     private final LatentNodes nodes;
+    private final LayerTerms terms;
+    /** Largest occurrence loss that makes a difference. */
     private final double most;
 
     LargestEvent(List<EventLaw> events, LatentNodes nodes, LayerTerms terms) {
         this.events = events;
         this.nodes = nodes;
-        this.most = Math.min(terms.occurrenceLimit(), terms.annualLimit());
+        this.terms = terms;
+        this.most = Math.min(terms.occurrenceLimit(), terms.deductible() + terms.annualLimit());
     }
 
-    /** P(largest &gt; x). */
+    /** P(max o &gt; x). */
     double survival(double x) {
         return x >= most ? 0 : JointDeficit.at(nodes, events.stream().mapToDouble(e -> e.survival(x)).toArray());
     }
 
-    /** inf{x : P(largest ≤ x) ≥ level}, to 1e-11 of its value. */
+    /** inf{x : P(recovery from the largest event ≤ x) ≥ level}, to 1e-11 of the occurrence loss. */
     double quantile(double level) {
+        return terms.annualLoss(largestOccurrence(level));
+    }
+
+    /** inf{x : P(max o ≤ x) ≥ level}. */
+    private double largestOccurrence(double level) {
         double tail = (1 - level) * (1 + 1e-12);
         double atNothing = survival(0);
         if (atNothing <= tail) {
@@ -47,7 +54,7 @@ final class LargestEvent {
         return crossing(low, above, high, value, tail);
     }
 
-    /** P(largest ≥ most). */
+    /** P(max o ≥ most). */
     private double beforeMost() {
         return Double.isInfinite(most) ? 0
                 : JointDeficit.at(nodes, events.stream().mapToDouble(e -> e.survival(most * (1 - 1e-12))).toArray());

@@ -27,7 +27,7 @@ final class LatentModel {
      * Excess of θ over independence below which a copula is a mean of independence and the one at this excess: the difference is of the
      * order of WEAK², and a frailty law as narrow as a needle is avoided.
      */
-    private static final double WEAK = 2e-4;
+    private static final double WEAK = 1e-4;
     private static final int MOST_GROUP_NODES = 3_000;
 
     private LatentModel() {
@@ -119,7 +119,9 @@ final class LatentModel {
         if (excess < 0.999 * WEAK) {
             Archimedean stronger = new Archimedean(copula.family(), copula.family().independentTheta() + WEAK, copula.survival());
             int[] all = java.util.stream.IntStream.range(0, margins.length).toArray();
-            return mixture(new MixtureCopula(List.of(1 - excess / WEAK, excess / WEAK), List.of(new Independence(), stronger)), all, margins, error);
+            LatentNodes mean = mixture(new MixtureCopula(List.of(1 - excess / WEAK, excess / WEAK), List.of(new Independence(), stronger)), all,
+                    margins, error);
+            return new LatentNodes(mean.weights(), mean.survival(), mean.error() + WEAK * WEAK);
         }
         return FrailtyNodes.of(copula.family(), copula.theta(), copula.generator(), copula.survival(), margins, error).merged(MERGING * error);
     }
@@ -127,7 +129,7 @@ final class LatentModel {
     private static LatentNodes elliptical(Correlation correlation, double degreesOfFreedom, int[] perils, CountMargin[] margins, double error) {
         double[] loadings = FactorNodes.loadings(correlation, perils);
         if (loadings == null) {
-            return ThreePerilNodes.of(correlation, perils, degreesOfFreedom, margins).merged(MERGING * error);
+            return ThreePerilNodes.of(correlation, perils, degreesOfFreedom, margins, error).merged(MERGING * error);
         }
         boolean sure = Arrays.stream(loadings).allMatch(l -> Math.abs(l) > 1 - 1e-9);
         if (sure) {
@@ -137,7 +139,7 @@ final class LatentModel {
             }
             return OrderedNodes.of(margins, falling).nodes(margins);
         }
-        return FactorNodes.of(loadings, degreesOfFreedom, margins).merged(MERGING * error);
+        return FactorNodes.of(loadings, degreesOfFreedom, margins, error).merged(4 * MERGING * error);
     }
 
     private static LatentNodes mixture(MixtureCopula mixture, int[] perils, CountMargin[] margins, double error) {

@@ -19,7 +19,7 @@ final class LatticeStep {
      */
     static double of(double cap, double[] terms, double[] landmarks, double ceiling, int cells) {
         // a step finer than this costs more than kinks off the lattice do
-        double finest = Math.min(cap / (3.0 * cells), ceiling / (6.0 * cells));
+        double finest = ceiling / (64.0 * cells);
         double step = common(DoubleStream.concat(DoubleStream.of(cap), DoubleStream.concat(Arrays.stream(terms), Arrays.stream(landmarks))).toArray(), finest);
         if (Double.isNaN(step)) {
             step = common(DoubleStream.concat(DoubleStream.of(cap), Arrays.stream(terms)).toArray(), finest);

@@ -15,7 +15,7 @@ import layerweft.model.treaty.LayerTerms;
  * joined by a copula. The sum's law lives on lattices only, so that every figure carries a lattice error, of second order.
  */
 final class SplitEvent implements EventLaw {
-    private static final double JOINT_ERROR = 1e-10;
+    private static final double JOINT_ERROR = 1e-9;
     private static final int REFERENCE_CELLS = 1024;
     private static final int MOST_CELLS = 1 << 15;
     private final List<SubPeril> parts;

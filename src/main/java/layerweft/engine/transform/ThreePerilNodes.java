@@ -17,7 +17,7 @@ final class ThreePerilNodes {
     private ThreePerilNodes() {
     }
 
-    static LatentNodes of(Correlation correlation, int[] perils, double degreesOfFreedom, CountMargin[] margins) {
+    static LatentNodes of(Correlation correlation, int[] perils, double degreesOfFreedom, CountMargin[] margins, double error) {
         double first = correlation.rho(perils[0], perils[1]);
         double second = correlation.rho(perils[0], perils[2]);
         double ownFirst = Math.sqrt(Math.max(1e-12, 1 - first * first));
@@ -25,7 +25,7 @@ final class ThreePerilNodes {
         double partial = Math.max(-1, Math.min(1, (correlation.rho(perils[1], perils[2]) - first * second) / (ownFirst * ownSecond)));
         double loading = Math.sqrt(Math.abs(partial));
         double[][] scores = FactorNodes.scores(degreesOfFreedom, margins);
-        FactorNodes.MixingRule mixing = FactorNodes.MixingRule.of(degreesOfFreedom);
+        FactorNodes.MixingRule mixing = FactorNodes.MixingRule.of(degreesOfFreedom, error);
         int[] sizes = {margins[0].size() + 1, margins[1].size() + 1, margins[2].size() + 1};
         double[] joint = new double[sizes[0] * sizes[1] * sizes[2]];
         for (int m = 0; m < mixing.roots().length; m++) {
@@ -48,7 +48,7 @@ final class ThreePerilNodes {
             }
         }
         double missing = Math.abs(1 - Arrays.stream(joint).sum());
-        return DifferencedNodes.fromJoint(joint, sizes, missing + 1e-12);
+        return DifferencedNodes.fromJoint(joint, sizes, missing + error);
     }
 
     private static double[] shifted(double[] scores, double root, double shift, double own) {

@@ -13,9 +13,9 @@ import layerweft.model.treaty.LayerTerms;
  * of its own; given the copula's latent factor the totals are independent.
  */
 final class TotalSums implements AnnualSums {
-    private static final double JOINT_ERROR = 1e-10;
+    private static final double JOINT_ERROR = 2e-9;
     /** Cells wanted for the guaranteed range, whose width is of first order here. */
-    private static final int BRACKET_CELLS = 4096;
+    private static final int BRACKET_CELLS = 2048;
     private final PreparedLayer layer;
     private final List<LayerLattice> totals;
     private final LatentNodes[] alone;
@@ -153,7 +153,7 @@ final class TotalSums implements AnnualSums {
 
     @Override
     public double jointError() {
-        return 100 * JOINT_ERROR + layer.cutCounts() + layer.chanceError();
+        return 10 * JOINT_ERROR + layer.cutCounts() + layer.chanceError();
     }
 
     /** The copula says nothing of how a year's total comes about. */

@@ -40,7 +40,7 @@ final class GroupedSampler extends YearSampler {
     Drawer drawer(KeyedStream stream) {
         int d = dimension();
         int groups = nodes.size();
-        double sign = copula.survival() ? -1 : 1;
+        boolean survival = copula.survival();
         double[] e = new double[d];
         double[] lnV = new double[groups];
         ZigguratSampler.Exponential exponential = ZigguratSampler.Exponential.of(stream);
@@ -59,7 +59,9 @@ final class GroupedSampler extends YearSampler {
                 lnV[g] = inner[g].logSample(lnV[outer[g]]);
             }
             for (int i = 0; i < d; i++) {
-                scores[i][year] = sign * (lnV[nodeOf[i]] - Math.log(e[i]));
+                double lnE = survival ? LogScale.logMinusLog1mExp(e[i]) : Math.log(e[i]);
+                double score = lnV[nodeOf[i]] - lnE;
+                scores[i][year] = survival ? -score : score;
             }
         };
     }

@@ -20,6 +20,15 @@ public interface ScoreSampler {
     void draw(KeyedStream stream, long firstSlot, int years, double[][] scores);
 
     /**
+     * Draws several vectors in each of consecutive years, e.g. one for each event. Year y draws from slot {@code firstSlot + y} of the
+     * stream, so that its first k vectors do not depend on how many follow.
+     *
+     * @param counts vectors in each year, length at least {@code years}
+     * @param scores receives the scores year by year: {@code scores[i][k]}, d × at least Σ counts
+     */
+    void fill(KeyedStream stream, long firstSlot, int[] counts, int years, double[][] scores);
+
+    /**
      * The score of variable i at U_i = p: U_i &gt; p exactly when the score drawn is above it.
      *
      * @param p in [0, 1]

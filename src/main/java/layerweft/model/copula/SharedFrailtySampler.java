@@ -5,7 +5,8 @@ import org.apache.commons.rng.sampling.distribution.ZigguratSampler;
 
 /**
  * Marshall &amp; Olkin's (1988) sampler: U_i = ψ(E_i/V), with score ln V − ln E_i. The d exponentials are drawn before the frailty, so
- * that all families see the same ones in the same year. A flipped variable is 1 − U_i, with the score's sign turned.
+ * that all families see the same ones in the same year. A flipped variable is 1 − U_i, with the score's sign turned; it takes
+ * −ln(1 − e^−E_i), the exponential at the other end, so that a large loss of one family meets a large loss of the other.
  */
 final class SharedFrailtySampler extends YearSampler {
     private final Generator generator;
@@ -29,8 +30,7 @@ final class SharedFrailtySampler extends YearSampler {
             }
             double lnV = frailty.logSample();
             for (int i = 0; i < d; i++) {
-                double score = lnV - Math.log(e[i]);
-                scores[i][year] = flipped[i] ? -score : score;
+                scores[i][year] = flipped[i] ? LogScale.logMinusLog1mExp(e[i]) - lnV : lnV - Math.log(e[i]);
             }
         };
     }

@@ -31,4 +31,18 @@ abstract class YearSampler implements ScoreSampler {
             drawer.draw(scores, y);
         }
     }
+
+    @Override
+    public final void fill(KeyedStream stream, long firstSlot, int[] counts, int years, double[][] scores) {
+        Drawer drawer = drawer(stream);
+        int k = 0;
+        for (int y = 0; y < years; y++) {
+            if (counts[y] > 0) {
+                stream.seek(firstSlot + y);
+                for (int j = counts[y]; j > 0; j--) {
+                    drawer.draw(scores, k++);
+                }
+            }
+        }
+    }
 }

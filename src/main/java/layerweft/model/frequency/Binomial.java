@@ -5,16 +5,18 @@ import org.apache.commons.math3.complex.Complex;
 import org.apache.commons.statistics.distribution.BinomialDistribution;
 
 /**
- * Binomial counts: each of a number of trials brings an event or none, so counts vary less than Poisson ones.
+ * Binomial: so many independent chances of an event, each at most once a year; counts that vary less than Poisson ones.
  *
- * @param trials at least 1
- * @param chance of an event in each trial, above 0 and at most 1
+ * @param trials number of chances, 1 to 1,000,000,000
+ * @param chance probability of the event at each, above 0 and at most 1
  */
 public record Binomial(int trials, double chance) implements FrequencyModel {
 
+    /** @throws layerweft.model.InadmissibleException if a parameter is out of its range */
     public Binomial {
-        new Check().that(trials >= 1, "trials", trials, "a whole number of at least 1")
-                .that(chance > 0 && chance <= 1, "chance", chance, "above 0 and at most 1").orThrow();
+        new Check().that(trials >= 1 && trials <= MOST_EVENTS, "trials", trials, "a whole number from 1 to 1,000,000,000")
+                .that(chance > 0 && chance <= 1, "chance", chance, "above 0 and at most 1")
+                .orThrow();
     }
 
     @Override
@@ -34,12 +36,12 @@ public record Binomial(int trials, double chance) implements FrequencyModel {
 
     @Override
     public double cdf(int n) {
-        return law().cumulativeProbability(n);
+        return LowerTail.holds(this, n) ? LowerTail.cdf(this, n) : law().cumulativeProbability(n);
     }
 
     @Override
     public double survival(int n) {
-        return law().survivalProbability(n);
+        return LowerTail.holds(this, n) ? 1 - LowerTail.cdf(this, n) : law().survivalProbability(n);
     }
 
     @Override
@@ -52,11 +54,10 @@ public record Binomial(int trials, double chance) implements FrequencyModel {
         return trials;
     }
 
-    /** (1 + chance·(z − 1))^trials. */
+    /** (1 + chance (z - 1))^trials. */
     @Override
     public Complex generatingFunction(Complex z) {
-        Complex base = z.subtract(1).multiply(chance).add(1);
-        return base.equals(Complex.ZERO) ? Complex.ZERO : base.log().multiply(trials).exp();
+        return ComplexPower.ofOnePlus(z.subtract(1).multiply(chance), trials);
     }
 
     private BinomialDistribution law() {

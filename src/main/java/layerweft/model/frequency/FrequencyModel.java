@@ -2,8 +2,13 @@ package layerweft.model.frequency;
 
 import org.apache.commons.math3.complex.Complex;
 
-/** The law of the number N of events of one peril in the contract year. Kinds are immutable records, valid by construction. */
+/** The law of the number N of events of one peril in the contract year. Kinds are immutable and valid by construction. */
 public sealed interface FrequencyModel permits Poisson, NegativeBinomial, Binomial, EmpiricalCounts {
+    /** The most events a year that a law may expect; counts are held as int and must have room above the mean. */
+    double MOST_EVENTS = 1e9;
+
+    /** The range of a mean in words, for findings. */
+    String MEAN_RANGE = "above 0 and at most 1,000,000,000 events a year";
 
     /** Events a year, E[N]. */
     double mean();
@@ -28,7 +33,7 @@ public sealed interface FrequencyModel permits Poisson, NegativeBinomial, Binomi
      */
     int quantile(double p);
 
-    /** The largest possible count, {@link Integer#MAX_VALUE} if there is none. */
+    /** The largest count of positive probability, {@link Integer#MAX_VALUE} if there is none. */
     int largest();
 
     /** Probability generating function E[z^N] for |z| ≤ 1. */

@@ -5,14 +5,15 @@ import org.apache.commons.math3.complex.Complex;
 import org.apache.commons.statistics.distribution.PoissonDistribution;
 
 /**
- * Poisson counts: events come independently of each other.
+ * Poisson: P(N = n) = e^-m mⁿ / n!, the count of events that come singly and independently at a constant rate.
  *
- * @param mean E[N], events a year, above 0
+ * @param mean events a year, m; above 0 and at most 1,000,000,000
  */
 public record Poisson(double mean) implements FrequencyModel {
 
+    /** @throws layerweft.model.InadmissibleException if the mean is out of its range */
     public Poisson {
-        new Check().positive("mean", mean).orThrow();
+        new Check().that(mean > 0 && mean <= MOST_EVENTS, "mean", mean, MEAN_RANGE).orThrow();
     }
 
     @Override
@@ -45,7 +46,7 @@ public record Poisson(double mean) implements FrequencyModel {
         return Integer.MAX_VALUE;
     }
 
-    /** exp(mean·(z − 1)). */
+    /** exp(m(z - 1)). */
     @Override
     public Complex generatingFunction(Complex z) {
         return z.subtract(1).multiply(mean).exp();

@@ -2,6 +2,8 @@ package layerweft.model.severity;
 
 import layerweft.model.Check;
 import org.apache.commons.numbers.gamma.RegularizedBeta;
+import org.apache.commons.rng.sampling.distribution.ChengBetaSampler;
+import org.apache.commons.rng.sampling.distribution.SharedStateContinuousSampler;
 import org.apache.commons.statistics.distribution.BetaDistribution;
 
 /**
@@ -73,8 +75,10 @@ public record Beta(double a, double b, double exposedValue) implements SeverityM
 
     @Override
     public SeveritySampler sampler() {
-        BetaDistribution law = BetaDistribution.of(a, b);
-        return stream -> exposedValue * law.inverseCumulativeProbability(stream.nextOpen());
+        return stream -> {
+            SharedStateContinuousSampler ratios = ChengBetaSampler.of(stream, a, b);
+            return () -> exposedValue * ratios.sample();
+        };
     }
 
     private double ratio(double x) {

@@ -99,7 +99,7 @@ public record Burr(double alpha, double gamma, double theta) implements Severity
 
     @Override
     public SeveritySampler sampler() {
-        return stream -> survivalQuantile(stream.nextOpen());
+        return stream -> () -> survivalQuantile(stream.nextOpen());
     }
 
     private double integral(java.util.function.DoubleUnaryOperator f, double from, double to) {

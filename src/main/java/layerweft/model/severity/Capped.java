@@ -1,5 +1,6 @@
 package layerweft.model.severity;
 
+import java.util.function.DoubleSupplier;
 import layerweft.model.Check;
 import layerweft.model.random.KeyedStream;
 
@@ -72,8 +73,9 @@ public record Capped(SeverityModel model, double cap) implements SeverityModel {
 
     private record Sampler(SeveritySampler model, double cap) implements SeveritySampler {
         @Override
-        public double draw(KeyedStream stream) {
-            return Math.min(model.draw(stream), cap);
+        public DoubleSupplier bind(KeyedStream stream) {
+            DoubleSupplier losses = model.bind(stream);
+            return () -> Math.min(losses.getAsDouble(), cap);
         }
 
         @Override

@@ -179,7 +179,7 @@ public final class DiscreteLosses implements SeverityModel {
             }
             guide[g] = k;
         }
-        return stream -> draw(guide, stream);
+        return stream -> () -> draw(guide, stream);
     }
 
     private double draw(int[] guide, KeyedStream stream) {

@@ -1,5 +1,6 @@
 package layerweft.model.severity;
 
+import java.util.function.DoubleSupplier;
 import layerweft.model.Check;
 import layerweft.model.random.KeyedStream;
 import org.apache.commons.rng.sampling.distribution.ZigguratSampler;
@@ -70,8 +71,9 @@ public record Exponential(double mean) implements SeverityModel {
 
     private record Sampler(double mean) implements SeveritySampler {
         @Override
-        public double draw(KeyedStream stream) {
-            return mean * ZigguratSampler.Exponential.of(stream).sample();
+        public DoubleSupplier bind(KeyedStream stream) {
+            ZigguratSampler.Exponential exponential = ZigguratSampler.Exponential.of(stream);
+            return () -> mean * exponential.sample();
         }
 
         @Override

@@ -1,7 +1,6 @@
 package layerweft.model.severity;
 
 import layerweft.model.Check;
-import layerweft.model.random.KeyedStream;
 import org.apache.commons.numbers.gamma.RegularizedGamma;
 import org.apache.commons.rng.sampling.distribution.AhrensDieterMarsagliaTsangGammaSampler;
 import org.apache.commons.statistics.distribution.GammaDistribution;
@@ -91,13 +90,6 @@ public record Gamma(double shape, double scale) implements SeverityModel {
 
     @Override
     public SeveritySampler sampler() {
-        return new Sampler(shape, scale);
-    }
-
-    private record Sampler(double shape, double scale) implements SeveritySampler {
-        @Override
-        public double draw(KeyedStream stream) {
-            return AhrensDieterMarsagliaTsangGammaSampler.of(stream, shape, scale).sample();
-        }
+        return stream -> AhrensDieterMarsagliaTsangGammaSampler.of(stream, shape, scale)::sample;
     }
 }

@@ -1,5 +1,6 @@
 package layerweft.model.severity;
 
+import java.util.function.DoubleSupplier;
 import layerweft.model.Check;
 import layerweft.model.random.KeyedStream;
 import org.apache.commons.rng.sampling.distribution.ZigguratSampler;
@@ -123,8 +124,9 @@ public record GeneralizedPareto(double threshold, double scale, double shape) im
         private static final double PLAIN_EXPONENTIAL = 1e-4;
 
         @Override
-        public double draw(KeyedStream stream) {
-            return loss(ZigguratSampler.Exponential.of(stream).sample());
+        public DoubleSupplier bind(KeyedStream stream) {
+            ZigguratSampler.Exponential exponential = ZigguratSampler.Exponential.of(stream);
+            return () -> loss(exponential.sample());
         }
 
         @Override

@@ -1,5 +1,6 @@
 package layerweft.model.severity;
 
+import java.util.function.DoubleSupplier;
 import layerweft.model.Check;
 import layerweft.model.random.KeyedStream;
 import org.apache.commons.numbers.gamma.Erfc;
@@ -98,15 +99,18 @@ public record InverseGaussian(double mean, double shape) implements SeverityMode
     /** Michael, Schucany &amp; Haas (1976), "Generating random variates using transformations with multiple roots". */
     @Override
     public SeveritySampler sampler() {
-        return this::draw;
+        return this::losses;
     }
 
-    private double draw(KeyedStream stream) {
-        double n = ZigguratSampler.NormalizedGaussian.of(stream).sample();
-        double y = mean * n * n / shape;
-        // the smaller root, written without the difference of near equals
-        double x = 2 * mean / (2 + y + Math.sqrt(y * (4 + y)));
-        return stream.nextDouble() * (mean + x) <= mean ? x : mean * mean / x;
+    private DoubleSupplier losses(KeyedStream stream) {
+        ZigguratSampler.NormalizedGaussian normal = ZigguratSampler.NormalizedGaussian.of(stream);
+        return () -> {
+            double n = normal.sample();
+            double y = mean * n * n / shape;
+            // the smaller root, written without the difference of near equals
+            double x = 2 * mean / (2 + y + Math.sqrt(y * (4 + y)));
+            return stream.nextDouble() * (mean + x) <= mean ? x : mean * mean / x;
+        };
     }
 
     private double z(double x) {

@@ -1,5 +1,6 @@
 package layerweft.model.severity;
 
+import java.util.function.DoubleSupplier;
 import layerweft.model.Check;
 import layerweft.model.random.KeyedStream;
 import org.apache.commons.rng.sampling.distribution.ZigguratSampler;
@@ -114,8 +115,9 @@ public record Lognormal(double mu, double sigma) implements SeverityModel {
 
     private record Sampler(double mu, double sigma) implements SeveritySampler {
         @Override
-        public double draw(KeyedStream stream) {
-            return Math.exp(mu + sigma * ZigguratSampler.NormalizedGaussian.of(stream).sample());
+        public DoubleSupplier bind(KeyedStream stream) {
+            ZigguratSampler.NormalizedGaussian normal = ZigguratSampler.NormalizedGaussian.of(stream);
+            return () -> Math.exp(mu + sigma * normal.sample());
         }
 
         @Override

@@ -103,7 +103,7 @@ public record Mbbefd(double b, double g, double exposedValue) implements Severit
 
     @Override
     public SeveritySampler sampler() {
-        return stream -> survivalQuantile(stream.nextOpen());
+        return stream -> () -> survivalQuantile(stream.nextOpen());
     }
 
     private double integral(DoubleUnaryOperator f, double from, double to) {

@@ -1,7 +1,9 @@
 package layerweft.model.severity;
 
+import java.util.Arrays;
 import java.util.List;
 import java.util.function.DoublePredicate;
+import java.util.function.DoubleSupplier;
 import java.util.function.ToDoubleFunction;
 import layerweft.model.Check;
 import layerweft.model.random.KeyedStream;
@@ -24,7 +26,7 @@ public record Mixture(List<Double> weights, List<SeverityModel> components) impl
             Weights.check(check, "weights", weights);
         }
         check.orThrow();
-        weights = java.util.Arrays.stream(Weights.scaled(weights)).boxed().toList();
+        weights = Arrays.stream(Weights.scaled(weights)).boxed().toList();
     }
 
     @Override
@@ -87,7 +89,10 @@ public record Mixture(List<Double> weights, List<SeverityModel> components) impl
     public SeveritySampler sampler() {
         double[] w = weights.stream().mapToDouble(Double::doubleValue).toArray();
         SeveritySampler[] samplers = components.stream().map(SeverityModel::sampler).toArray(SeveritySampler[]::new);
-        return stream -> samplers[choose(w, stream)].draw(stream);
+        return stream -> {
+            DoubleSupplier[] losses = Arrays.stream(samplers).map(s -> s.bind(stream)).toArray(DoubleSupplier[]::new);
+            return () -> losses[choose(w, stream)].getAsDouble();
+        };
     }
 
     private static int choose(double[] weights, KeyedStream stream) {

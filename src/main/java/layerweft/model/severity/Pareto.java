@@ -1,5 +1,6 @@
 package layerweft.model.severity;
 
+import java.util.function.DoubleSupplier;
 import layerweft.model.Check;
 import layerweft.model.random.KeyedStream;
 import org.apache.commons.rng.sampling.distribution.ZigguratSampler;
@@ -82,8 +83,9 @@ public record Pareto(double threshold, double alpha) implements SeverityModel {
 
     private record Sampler(double threshold, double power) implements SeveritySampler {
         @Override
-        public double draw(KeyedStream stream) {
-            return threshold * Math.exp(power * ZigguratSampler.Exponential.of(stream).sample());
+        public DoubleSupplier bind(KeyedStream stream) {
+            ZigguratSampler.Exponential exponential = ZigguratSampler.Exponential.of(stream);
+            return () -> threshold * Math.exp(power * exponential.sample());
         }
 
         @Override

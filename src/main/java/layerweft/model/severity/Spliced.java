@@ -87,7 +87,7 @@ public record Spliced(SeverityModel body, double threshold, SeverityModel tail, 
 
     @Override
     public SeveritySampler sampler() {
-        return stream -> stream.nextDouble() < tailWeight
+        return stream -> () -> stream.nextDouble() < tailWeight
                 ? tailQuantile(tailWeight * stream.nextOpen())
                 : bodyQuantile((1 - tailWeight) * stream.nextOpen());
     }

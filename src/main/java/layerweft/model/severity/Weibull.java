@@ -69,7 +69,7 @@ public record Weibull(double shape, double scale) implements SeverityModel {
 
     @Override
     public SeveritySampler sampler() {
-        return stream -> survivalQuantile(stream.nextOpen());
+        return stream -> () -> survivalQuantile(stream.nextOpen());
     }
 
     private double exponent(double x) {

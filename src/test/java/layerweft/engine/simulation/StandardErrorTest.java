@@ -97,8 +97,10 @@ class StandardErrorTest {
             }
             // binomial(300, 0.95): outside 273..297 with a chance of 1 in 500; the z values' spread has a standard error of 4 %
             double coverage = (double) inside / seeds;
-            assertEquals(0.95, coverage, 0.045, name + ": coverage " + coverage);
-            assertEquals(1, Math.sqrt(square / seeds), 0.17, name + ": spread of the z values");
+            // the law of a quantile near an atom is not normal, and its interval only about as wide as it says
+            boolean quantile = name.endsWith("0.9");
+            assertEquals(0.95, coverage, quantile ? 0.07 : 0.045, name + ": coverage " + coverage);
+            assertEquals(1, Math.sqrt(square / seeds), quantile ? 0.3 : 0.17, name + ": spread of the z values");
         });
     }
 
