@@ -22,7 +22,12 @@ final class BreakEvenText {
         text.append("First: ").append(found.first().name()).append(". Second: ").append(found.second().name()).append(".\n");
         text.append("By expected cost to the buyer: premiums with reinstatement premium less expected recoveries, ").append(money)
                 .append(". Difference: first less second.\n\n").append(table).append('\n');
-        found.answers().forEach(a -> text.append(a.family().label()).append(": ").append(inWords(found, a)).append(".\n"));
+        if (found.answers().size() > 1 && found.answers().stream().map(BreakEven.Answer::outcome).distinct().count() == 1
+                && found.answers().get(0).outcome() != BreakEven.Outcome.CROSSES) {
+            text.append("With every family: ").append(inWords(found, found.answers().get(0))).append(".\n");
+        } else {
+            found.answers().forEach(a -> text.append(a.family().label()).append(": ").append(inWords(found, a)).append(".\n"));
+        }
         return text.append("Cost of risk is not compared: the law of the net position with its reinstatement premiums is not known to the transform.\n")
                 .toString();
     }

@@ -17,9 +17,10 @@ final class FigureKindText {
         return kind.measured() == FigureKind.Measured.AS_PART ? FigureText.percentError(figure) : FigureText.error(figure);
     }
 
-    /** With a sign, so that it reads as a change. */
+    /** With a sign, so that it reads as a change; of a part in percentage points. */
     static String change(FigureKind kind, Figure change) {
-        String text = value(kind, change);
+        boolean part = kind.measured() == FigureKind.Measured.AS_PART;
+        String text = FigureText.value(part ? change.times(100) : change) + (part && change.defined() ? " points" : "");
         return change.value() > 0 && !change.infinite() ? "+" + text : text;
     }
 
@@ -28,12 +29,14 @@ final class FigureKindText {
         return lift.defined() ? String.format(java.util.Locale.ROOT, "%+.1f %%", 100 * lift.value() + 0.0) : "—";
     }
 
-    /** The figure's words with its unit. */
+    /** The figure's words, with the currency where it is money. */
     static String title(FigureKind kind, Portfolio portfolio) {
-        return switch (kind.measured()) {
-            case IN_MONEY -> (kind.words() + ", " + portfolio.currency() + " " + portfolio.unit()).strip();
-            case AS_PART -> kind.words() + ", %";
-            case PLAINLY -> kind.words();
-        };
+        boolean money = kind.measured() == FigureKind.Measured.IN_MONEY;
+        return money ? (kind.words() + ", " + portfolio.currency() + " " + portfolio.unit()).strip() : kind.words();
+    }
+
+    /** The title of an axis whose numbers stand alone. */
+    static String axis(FigureKind kind, Portfolio portfolio) {
+        return title(kind, portfolio) + (kind.measured() == FigureKind.Measured.AS_PART ? ", %" : "");
     }
 }

@@ -20,14 +20,16 @@ final class RankText {
                 .append(": ").append(FigureKindText.value(kind, ranking.base())).append(' ').append(FigureKindText.error(kind, ranking.base()))
                 .append("\n\n");
         double largest = ranking.sensitivities().stream().mapToDouble(s -> Math.abs(s.change().value())).filter(Double::isFinite).max().orElse(0);
-        TextTable table = new TextTable("", "step", "change", "", "relative", "reach", "↓ falls " + " ".repeat(2 * HALF - 14) + "rises ↑");
+        TextTable table = new TextTable("", "step", "change", "", "relative", " ".repeat(HALF - 6) + "falls │ rises" + " ".repeat(HALF - 6));
         for (Sensitivity s : ranking.sensitivities()) {
             String name = s.subject().isEmpty() ? s.lever().words() : s.subject() + ", " + s.lever().words();
             table.row(name, s.step(), FigureKindText.change(kind, s.change()), FigureKindText.error(kind, s.change()),
-                    FigureKindText.lift(relative(s.change(), ranking.base())), s.reach().map(r -> reach(kind, r)).orElse(""),
+                    FigureKindText.lift(relative(s.change(), ranking.base())),
                     bar(s.change().value(), largest));
         }
         text.append(table).append('\n');
+        ranking.sensitivities().forEach(s -> s.reach().ifPresent(r ->
+                text.append("The ").append(s.lever().words()).append(" can move it from ").append(reach(kind, r)).append(".\n")));
         ranking.notVaried().forEach(reason -> text.append("Not varied: ").append(reason).append(".\n"));
         return text.toString();
     }
@@ -37,7 +39,7 @@ final class RankText {
     }
 
     private static String reach(FigureKind kind, Sensitivity.Reach r) {
-        return r.lowest() + " " + FigureKindText.value(kind, r.atLowest()) + " to " + r.highest() + " " + FigureKindText.value(kind, r.atHighest());
+        return FigureKindText.value(kind, r.atLowest()) + " (" + r.lowest() + ") to " + FigureKindText.value(kind, r.atHighest()) + " (" + r.highest() + ")";
     }
 
     /** Fixed width, zero in the middle; falls are drawn in whole characters, as there are no blocks that fill from the right. */

@@ -93,7 +93,7 @@ final class SweepText {
 
     private String chart(LayerSweep layer) {
         double scale = kind.measured() == FigureKind.Measured.AS_PART ? 100 : 1;
-        LineChart chart = new LineChart("Kendall's τ", FigureKindText.title(kind, sweep.treaty().portfolio()),
+        LineChart chart = new LineChart("Kendall's τ", FigureKindText.axis(kind, sweep.treaty().portfolio()),
                 y -> FigureText.value(Figure.exact(y)));
         for (CopulaFamily family : sweep.request().families()) {
             List<SweepPoint> points = layer.of(family).stream().sorted(Comparator.comparingDouble(SweepPoint::kendallTau)).toList();

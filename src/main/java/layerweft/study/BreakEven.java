@@ -100,7 +100,7 @@ public record BreakEven(Portfolio portfolio, Programme first, Programme second, 
                 return null;
             });
         }
-        Parallel.run(tasks, settings.threads(), control);
+        Parallel.run(tasks, settings.threads(), new Steps(control, tasks.size()));
         return new BreakEven(portfolio, first, second, List.of(answers));
     }
 

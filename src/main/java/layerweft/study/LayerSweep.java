@@ -13,7 +13,7 @@ import layerweft.model.copula.CopulaFamily;
  * @param still why the swept figure does not depend on the copula; empty where it does
  * @param refusals why some families were simulated, in plain words; empty where the transform priced all
  * @param independent the layer with independent perils
- * @param comonotone the layer with comonotonic perils: the ceiling of its expected loss where it covers a sum from below without a limit,
+ * @param comonotone the layer with comonotonic perils: the ceiling of its expected loss where there is no annual limit,
  *     and the end that every family approaches as τ → 1
  * @param comonotoneValue the swept figure there
  * @param comonotoneLift its lift

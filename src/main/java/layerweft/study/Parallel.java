@@ -8,8 +8,6 @@ import java.util.concurrent.ExecutionException;
 import java.util.concurrent.ExecutorService;
 import java.util.concurrent.Executors;
 import java.util.concurrent.Future;
-import java.util.concurrent.atomic.AtomicInteger;
-import layerweft.engine.RunControl;
 
 /** Runs the tasks of a study on several threads. */
 final class Parallel {
@@ -19,9 +17,10 @@ final class Parallel {
     /**
      * Runs all tasks to their end; what one of them throws is thrown here, once no other is at work.
      *
+     * @param steps told of each task's end
      * @throws CancellationException if the calling thread is interrupted
      */
-    static void run(List<Callable<Void>> tasks, int threads, RunControl control) {
+    static void run(List<Callable<Void>> tasks, int threads, Steps steps) {
         if (tasks.isEmpty()) {
             return;
         }
@@ -30,13 +29,12 @@ final class Parallel {
             thread.setDaemon(true);
             return thread;
         });
-        AtomicInteger done = new AtomicInteger();
         try {
             List<Future<?>> running = new ArrayList<>();
             for (Callable<Void> task : tasks) {
                 running.add(pool.submit(() -> {
                     task.call();
-                    control.progress(done.incrementAndGet(), tasks.size());
+                    steps.one();
                     return null;
                 }));
             }

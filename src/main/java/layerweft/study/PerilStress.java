@@ -32,6 +32,15 @@ final class PerilStress {
         return losses(portfolio, i, model -> TailStress.heavier(model, factor));
     }
 
+    /** Mean loss of one event, in the portfolio's unit. */
+    static double meanLoss(Portfolio portfolio, int i) {
+        EventLoss loss = portfolio.perils().get(i).eventLoss();
+        if (loss instanceof EventLoss.Single single) {
+            return single.severity().mean();
+        }
+        return ((EventLoss.Split) loss).subPerils().stream().mapToDouble(sub -> sub.chance() * sub.severity().mean()).sum();
+    }
+
     private static Optional<Portfolio> losses(Portfolio portfolio, int i, Function<SeverityModel, Optional<SeverityModel>> change) {
         Peril peril = portfolio.perils().get(i);
         return losses(peril.eventLoss(), change).map(loss -> with(portfolio, i, new Peril(peril.name(), peril.frequency(), loss)));

@@ -33,6 +33,7 @@ final class RankingRun {
     private final Copula copula;
     private final CopulaPricing asIs;
     private final Figure base;
+    private final Steps steps;
     private final List<Sensitivity> found = new ArrayList<>();
     private final List<String> notVaried = new ArrayList<>();
 
@@ -46,6 +47,7 @@ final class RankingRun {
                 .orElseGet(() -> IntStream.range(0, treaty.layers()).boxed().toList());
         copula = treaty.portfolio().dependence().copula();
         asIs = new CopulaPricing(treaty, settings, control);
+        steps = new Steps(control, 2 + 3L * treaty.portfolio().perils().size());
         base = under(copula);
     }
 
@@ -133,8 +135,17 @@ final class RankingRun {
         step(Sensitivity.Lever.FREQUENCY, name, "10 % more events", PerilStress.moreEvents(portfolio, i, factor),
                 "a year cannot have 10 % more events");
         step(Sensitivity.Lever.SEVERITY, name, "losses 10 % larger", PerilStress.dearerEvents(portfolio, i, factor), "");
-        step(Sensitivity.Lever.TAIL, name, "tail parameter 10 % heavier, same mean", PerilStress.heavierTail(portfolio, i, factor),
-                "its severity has no tail parameter that could be 10 % heavier");
+        Optional<Portfolio> heavier = PerilStress.heavierTail(portfolio, i, factor);
+        String mean = heavier.map(changed -> meanMoves(PerilStress.meanLoss(portfolio, i), PerilStress.meanLoss(changed, i))).orElse("");
+        step(Sensitivity.Lever.TAIL, name, "tail 10 % heavier, " + mean, heavier, "its severity has no tail parameter that could be 10 % heavier");
+    }
+
+    private static String meanMoves(double before, double after) {
+        if (after == Double.POSITIVE_INFINITY) {
+            return "mean infinite";
+        }
+        double part = after / before - 1;
+        return Math.abs(part) < 5e-7 ? "same mean" : String.format(Locale.ROOT, "mean %+.2g %%", 100 * part);
     }
 
     private void step(Sensitivity.Lever lever, String peril, String step, Optional<Portfolio> changed, String unless) {
@@ -146,7 +157,7 @@ final class RankingRun {
     }
 
     private void add(Sensitivity.Lever lever, String subject, String step, Figure value, Optional<Sensitivity.Reach> reach) {
-        control.progress(found.size() + 1L, 2 + 3L * treaty.portfolio().perils().size());
+        steps.one();
         found.add(new Sensitivity(lever, subject, step, value, value.minus(base), reach, Optional.empty()));
     }
 

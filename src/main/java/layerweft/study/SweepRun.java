@@ -80,8 +80,15 @@ final class SweepRun {
                     pricing.refusal(j, curve.copulas()).ifPresent(reason -> curve.refusals.put(j, reason)));
             curves.add(curve);
         }
-        transform();
-        simulate();
+        boolean endsToo = positions().anyMatch(j -> pricing.refusal(j, ENDS).isPresent() || curves.stream().anyMatch(c -> c.refusals.containsKey(j)));
+        List<Callable<Void>> tasks = transformTasks();
+        List<Runnable> simulations = simulations(endsToo);
+        Steps steps = new Steps(control, tasks.size() + simulations.size());
+        Parallel.run(tasks, settings.threads(), steps);
+        simulations.forEach(simulation -> {
+            simulation.run();
+            steps.one();
+        });
         return positions().mapToObj(this::layer).toList();
     }
 
@@ -89,7 +96,7 @@ final class SweepRun {
         return IntStream.range(0, treaty.layers());
     }
 
-    private void transform() {
+    private List<Callable<Void>> transformTasks() {
         List<Callable<Void>> tasks = new ArrayList<>();
         for (Curve curve : curves) {
             for (int k = 0; k < curve.transform.length; k++) {
@@ -102,25 +109,26 @@ final class SweepRun {
             ends[e] = new LayerFigures[treaty.layers()];
         }
         tasks.addAll(pricing.transform(ENDS, positions().filter(j -> pricing.refusal(j, ENDS).isEmpty()).boxed().toList(), ends));
-        Parallel.run(tasks, settings.threads(), control);
+        return tasks;
     }
 
-    private void simulate() {
-        boolean endsToo = positions().anyMatch(j -> ends[0][j] == null);
+    /** One after the other, as each uses all threads. */
+    private List<Runnable> simulations(boolean endsToo) {
+        List<Runnable> simulations = new ArrayList<>();
         for (Curve curve : curves) {
-            endsToo |= !curve.refusals.isEmpty();
             for (double tau : request.taus()) {
                 if (!curve.refusals.isEmpty()) {
-                    curve.simulation.put(tau, pricing.simulate(curve.family.at(tau), settings.years()));
+                    simulations.add(() -> curve.simulation.put(tau, pricing.simulate(curve.family.at(tau), settings.years())));
                 }
                 if (request.check() > 0) {
-                    curve.check.put(tau, pricing.simulate(curve.family.at(tau), request.check()));
+                    simulations.add(() -> curve.check.put(tau, pricing.simulate(curve.family.at(tau), request.check())));
                 }
             }
         }
         if (endsToo) {
-            ENDS.forEach(end -> simulatedEnds.add(pricing.simulate(end, settings.years())));
+            ENDS.forEach(end -> simulations.add(() -> simulatedEnds.add(pricing.simulate(end, settings.years()))));
         }
+        return simulations;
     }
 
     private LayerSweep layer(int j) {

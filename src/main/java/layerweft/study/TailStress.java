@@ -18,7 +18,9 @@ import layerweft.model.severity.Pareto;
 import layerweft.model.severity.SeverityModel;
 import layerweft.model.severity.Spliced;
 import layerweft.model.severity.Weibull;
+import org.apache.commons.math3.analysis.UnivariateFunction;
 import org.apache.commons.math3.analysis.solvers.BrentSolver;
+import org.apache.commons.math3.analysis.solvers.UnivariateSolverUtils;
 
 /**
  * The same losses with a heavier tail: the parameter that governs the tail is moved by a factor, and the mean held where it is finite before
@@ -38,11 +40,13 @@ import org.apache.commons.math3.analysis.solvers.BrentSolver;
  * <tr><td>exponential, discrete, empirical</td><td colspan="2">have no tail parameter</td></tr>
  * </table>
  *
- * <p>A cap stays where it is, and the mean held is that of the law before the cap. Of a spliced law the tail is changed, its weight and the
- * body are not. Of a mixture every component that has a tail parameter is changed.
+ * <p>A cap stays where it is, and for the laws of the upper rows down to inverseGaussian the mean held is that of the capped loss. Of a
+ * spliced law the tail's law is changed, its weight and the body are not, so that the mean moves. Of a mixture every component that has a
+ * tail parameter is changed.
  */
 final class TailStress {
-    private static final double WIDEST_LN_B = 60;
+    private static final double WIDEST = 60;
+    private static final int MOST_STEPS = 300;
 
     private TailStress() {}
 
@@ -54,7 +58,7 @@ final class TailStress {
      */
     static Optional<SeverityModel> heavier(SeverityModel model, double factor) {
         if (model instanceof Capped m) {
-            return heavier(m.model(), factor).map(changed -> new Capped(changed, m.cap()));
+            return heavierBelowCap(m, factor);
         }
         if (model instanceof Spliced m) {
             return heavier(m.tail(), factor).map(changed -> new Spliced(m.body(), m.threshold(), changed, m.tailWeight()));
@@ -64,9 +68,6 @@ final class TailStress {
             m.components().forEach(c -> components.add(heavier(c, factor).orElse(c)));
             return components.equals(m.components()) ? Optional.empty() : Optional.of(new Mixture(m.weights(), components));
         }
-        if (model instanceof GeneralizedPareto m) {
-            return heavier(m, factor);
-        }
         if (model instanceof Beta m) {
             double sum = (m.a() + m.b() + 1) / (factor * factor) - 1;
             double part = m.a() / (m.a() + m.b());
@@ -75,42 +76,59 @@ final class TailStress {
         if (model instanceof Mbbefd m) {
             return heavier(m, factor);
         }
-        return Optional.ofNullable(reshaped(model, factor)).map(changed -> atMean(changed, model.mean()));
+        return reshaped(model, factor).map(changed -> atMean(changed, model.mean(), Double.POSITIVE_INFINITY));
     }
 
-    /** With the shape changed and the mean not yet held; null for laws without a tail parameter. */
-    private static SeverityModel reshaped(SeverityModel model, double factor) {
+    /** The mean of the capped loss is held, which is finite whatever the tail. */
+    private static Optional<SeverityModel> heavierBelowCap(Capped m, double factor) {
+        return reshaped(m.model(), factor).map(changed -> atMean(changed, m.mean(), m.cap())).or(() -> heavier(m.model(), factor))
+                .map(changed -> new Capped(changed, m.cap()));
+    }
+
+    /** With the shape changed and the mean not yet held; empty for laws without a tail parameter and for those that hold theirs otherwise. */
+    private static Optional<SeverityModel> reshaped(SeverityModel model, double factor) {
         if (model instanceof Lognormal m) {
-            return new Lognormal(m.mu(), m.sigma() * factor);
+            return Optional.of(new Lognormal(m.mu(), m.sigma() * factor));
         }
         if (model instanceof Pareto m) {
-            return new Pareto(m.threshold(), m.alpha() / factor);
+            return Optional.of(new Pareto(m.threshold(), m.alpha() / factor));
+        }
+        if (model instanceof GeneralizedPareto m) {
+            double shape = m.shape() + (factor - 1) * Math.abs(m.shape());
+            return m.shape() == 0 ? Optional.empty() : Optional.of(new GeneralizedPareto(m.threshold(), m.scale(), shape));
         }
         if (model instanceof Gamma m) {
-            return new Gamma(m.shape() / (factor * factor), m.scale());
+            return Optional.of(new Gamma(m.shape() / (factor * factor), m.scale()));
         }
         if (model instanceof Weibull m) {
-            return new Weibull(m.shape() / factor, m.scale());
+            return Optional.of(new Weibull(m.shape() / factor, m.scale()));
         }
         if (model instanceof Burr m) {
-            return new Burr(m.alpha() / factor, m.gamma(), m.theta());
+            return Optional.of(new Burr(m.alpha() / factor, m.gamma(), m.theta()));
         }
         if (model instanceof Loglogistic m) {
-            return new Loglogistic(m.shape() / factor, m.scale());
+            return Optional.of(new Loglogistic(m.shape() / factor, m.scale()));
         }
-        return model instanceof InverseGaussian m ? new InverseGaussian(m.mean(), m.shape() / (factor * factor)) : null;
+        return model instanceof InverseGaussian m ? Optional.of(new InverseGaussian(m.mean(), m.shape() / (factor * factor))) : Optional.empty();
     }
 
-    private static SeverityModel atMean(SeverityModel changed, double mean) {
-        boolean finite = mean < Double.POSITIVE_INFINITY && changed.mean() < Double.POSITIVE_INFINITY;
-        return finite ? SeverityScale.scaled(changed, mean / changed.mean()) : changed;
+    /** The law stretched until E[min(X, cap)] is as wanted; as it is where a mean is infinite. */
+    private static SeverityModel atMean(SeverityModel changed, double mean, double cap) {
+        if (mean == Double.POSITIVE_INFINITY || changed.limitedMean(cap) == Double.POSITIVE_INFINITY) {
+            return changed;
+        }
+        UnivariateFunction excess = lnFactor -> stretched(changed, Math.exp(lnFactor)).limitedMean(cap) / mean - 1;
+        if (excess.value(0) == 0) {
+            return changed;
+        }
+        double[] ends = UnivariateSolverUtils.bracket(excess, 0, -WIDEST, WIDEST);
+        return stretched(changed, Math.exp(new BrentSolver(1e-14, 1e-14).solve(MOST_STEPS, excess, ends[0], ends[1])));
     }
 
-    /** E[X] = u + σ/(1 − ξ) for ξ below 1: the smallest loss u stays. */
-    private static Optional<SeverityModel> heavier(GeneralizedPareto m, double factor) {
-        double shape = m.shape() + (factor - 1) * Math.abs(m.shape());
-        double scale = m.shape() < 1 && shape < 1 ? m.scale() * (1 - shape) / (1 - m.shape()) : m.scale();
-        return m.shape() == 0 ? Optional.empty() : Optional.of(new GeneralizedPareto(m.threshold(), scale, shape));
+    /** All amounts times a factor, but for the smallest loss of a generalized Pareto law, which is a reporting threshold more than a size. */
+    private static SeverityModel stretched(SeverityModel model, double factor) {
+        return model instanceof GeneralizedPareto m ? new GeneralizedPareto(m.threshold(), m.scale() * factor, m.shape())
+                : SeverityScale.scaled(model, factor);
     }
 
     private static Optional<SeverityModel> heavier(Mbbefd m, double factor) {
@@ -119,12 +137,12 @@ final class TailStress {
             return Optional.empty();
         }
         DoubleFunction<Mbbefd> law = lnB -> new Mbbefd(Math.exp(lnB), g, m.exposedValue());
-        double lowest = law.apply(WIDEST_LN_B).mean();
-        double highest = law.apply(-WIDEST_LN_B).mean();
+        double lowest = law.apply(WIDEST).mean();
+        double highest = law.apply(-WIDEST).mean();
         if (!(lowest < m.mean() && m.mean() < highest)) {
             return Optional.empty();
         }
-        double lnB = new BrentSolver(1e-14, 1e-13).solve(200, x -> law.apply(x).mean() - m.mean(), -WIDEST_LN_B, WIDEST_LN_B);
+        double lnB = new BrentSolver(1e-14, 1e-13).solve(MOST_STEPS, x -> law.apply(x).mean() - m.mean(), -WIDEST, WIDEST);
         return Optional.of(law.apply(lnB));
     }
 }
