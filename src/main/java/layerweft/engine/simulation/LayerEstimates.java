@@ -108,10 +108,14 @@ final class LayerEstimates {
     }
 
     /**
-     * What the control variate cannot correct: years beyond the annual limit are rare, and in a sample without any Y and A go together as if
-     * there were no limit. One such year more or less, by a further full limit, is always within the error.
+     * What a sample cannot show. Without a control variate: of a layer that no year hit, one full loss in all years is within the error. With
+     * one: years beyond the annual limit are rare, and in a sample without any Y and A go together as if there were no limit; one such
+     * year, by a further full limit, is within the error.
      */
     private double unseen(double slope) {
+        if (!controlled()) {
+            return sums.attached > 0 ? 0 : Math.min(terms.line(), terms.annualLimit()) / sums.years;
+        }
         if (slope == 0 || !terms.hasAnnualTerms()) {
             return 0;
         }
