@@ -85,8 +85,9 @@ public record Beta(double a, double b, double exposedValue) implements SeverityM
         return Math.min(Math.max(x / exposedValue, 0), 1);
     }
 
+    /** E[(X − d)+] from the law of what is left of the exposed value, a beta law with a and b exchanged: no digits are lost near the top. */
     private double stopLoss(double d) {
-        double r = ratio(d);
-        return mean() * RegularizedBeta.complement(r, a + 1, b) - r * exposedValue * RegularizedBeta.complement(r, a, b);
+        double below = (exposedValue - Math.min(Math.max(d, 0), exposedValue)) / exposedValue;
+        return exposedValue * (below * RegularizedBeta.value(below, b, a) - b / (a + b) * RegularizedBeta.value(below, b + 1, a));
     }
 }

@@ -5,16 +5,19 @@ import org.apache.commons.numbers.gamma.LogBeta;
 import org.apache.commons.numbers.gamma.RegularizedBeta;
 
 /**
- * Burr law (type XII): P(X &gt; x) = (1 + (x/θ)^γ)^(−α). The moment of order m is finite for αγ &gt; m. Limited moments as in Klugman, Panjer
- * &amp; Willmot, "Loss Models", appendix A, where the incomplete beta function exists; by quadrature of the survival function elsewhere.
+ * Burr law (type XII): P(X &gt; x) = (1 + z)^(−α), z = (x/θ)^γ. The moment of order m is finite for αγ &gt; m. With v = 1/(1 + z),
+ * ∫_0^x m·u^(m−1)·P(X &gt; u) du is an integral of v^(α−m/γ−1)·(1 − v)^(m/γ−1), so E[min(X, x)^m] = E[X^m]·I_(1−v)(m/γ, α − m/γ), I the
+ * regularized incomplete beta function, where it exists; elsewhere the integral is taken by quadrature.
  *
  * @param alpha α, above 0
  * @param gamma γ, above 0
  * @param theta θ, above 0, in the portfolio's unit
  */
 public record Burr(double alpha, double gamma, double theta) implements SeverityModel {
-    /** Second parameter of the incomplete beta function from which its values keep their digits. */
+    /** Second parameter of the incomplete beta function from which its product with the moment keeps its digits. */
     private static final double SAFE = 0.05;
+    /** Argument below which the library's complement loses digits where both parameters are 1/2, while 1 less the value is as good. */
+    private static final double NEARLY_NOTHING = 1e-6;
 
     public Burr {
         new Check().positive("alpha", alpha).positive("gamma", gamma).positive("theta", theta).orThrow();
@@ -22,17 +25,12 @@ public record Burr(double alpha, double gamma, double theta) implements Severity
 
     @Override
     public double cdf(double x) {
-        return x <= 0 ? 0 : -Math.expm1(-alpha * Math.log1p(Math.pow(x / theta, gamma)));
+        return x <= 0 ? 0 : -Math.expm1(-alpha * exponent(x));
     }
 
-    /** (1 + (x/θ)^γ)^(−α), by (x/θ)^(−γ) where that is the smaller, so that nothing overflows. */
     @Override
     public double survival(double x) {
-        if (x <= 0) {
-            return 1;
-        }
-        double lnZ = gamma * Math.log(x / theta);
-        return lnZ <= 0 ? Math.exp(-alpha * Math.log1p(Math.exp(lnZ))) : Math.exp(-alpha * (lnZ + Math.log1p(Math.exp(-lnZ))));
+        return x <= 0 ? 1 : Math.exp(-alpha * exponent(x));
     }
 
     @Override
@@ -43,13 +41,13 @@ public record Burr(double alpha, double gamma, double theta) implements Severity
     @Override
     public double quantile(double p) {
         Probability.check(p);
-        return theta * Math.pow(Math.expm1(-Math.log1p(-p) / alpha), 1 / gamma);
+        return at(-Math.log1p(-p) / alpha);
     }
 
     @Override
     public double survivalQuantile(double q) {
         Probability.check(q);
-        return theta * Math.pow(Math.expm1(-Math.log(q) / alpha), 1 / gamma);
+        return at(-Math.log(q) / alpha);
     }
 
     @Override
@@ -59,26 +57,15 @@ public record Burr(double alpha, double gamma, double theta) implements Severity
 
     @Override
     public double limitedMean(double x) {
-        if (x == Double.POSITIVE_INFINITY) {
-            return mean();
-        }
-        if (x <= 0) {
-            return 0;
-        }
-        return beyond(1) > SAFE ? moment(1) * partBelow(1, x) + x * survival(x) : integral(this::survival, 0, x);
+        return limitedMoment(1, x);
     }
 
     @Override
     public double limitedSecondMoment(double x) {
-        if (x == Double.POSITIVE_INFINITY) {
-            return moment(2);
-        }
-        if (x <= 0) {
-            return 0;
-        }
-        return beyond(2) > SAFE ? moment(2) * partBelow(2, x) + x * x * survival(x) : integral(u -> 2 * u * survival(u), 0, x);
+        return limitedMoment(2, x);
     }
 
+    /** Up to a finite amount by quadrature, without end E[X]·I_v(α − 1/γ, 1/γ). */
     @Override
     public double layerMean(double from, double to) {
         double start = Math.max(from, 0);
@@ -86,10 +73,9 @@ public record Burr(double alpha, double gamma, double theta) implements Severity
             return 0;
         }
         if (to < Double.POSITIVE_INFINITY) {
-            return integral(this::survival, start, to);
+            return integral(1, start, to);
         }
-        return start < theta || beyond(1) <= SAFE ? mean() - limitedMean(start)
-                : moment(1) * RegularizedBeta.complement(share(start), 1 + 1 / gamma, beyond(1)) - start * survival(start);
+        return beyond(1) <= 0 ? Double.POSITIVE_INFINITY : moment(1) * partAbove(1, start);
     }
 
     @Override
@@ -102,8 +88,52 @@ public record Burr(double alpha, double gamma, double theta) implements Severity
         return stream -> () -> survivalQuantile(stream.nextOpen());
     }
 
-    private double integral(java.util.function.DoubleUnaryOperator f, double from, double to) {
-        return LogQuadrature.integral(f, from, to, 2 / gamma);
+    /** t = ln(1 + z), from the logarithm of z, so that nothing overflows. */
+    private double exponent(double x) {
+        double lnZ = gamma * Math.log(x / theta);
+        return lnZ <= 0 ? Math.log1p(Math.exp(lnZ)) : lnZ + Math.log1p(Math.exp(-lnZ));
+    }
+
+    /** The loss at t = ln(1 + z): θ·(e^t − 1)^(1/γ), by e^(t/γ) where e^t would overflow. */
+    private double at(double t) {
+        return theta * (t < 700 ? Math.pow(Math.expm1(Math.max(t, 0)), 1 / gamma) : Math.exp(t / gamma));
+    }
+
+    private double limitedMoment(int m, double x) {
+        if (x <= 0) {
+            return 0;
+        }
+        if (x == Double.POSITIVE_INFINITY) {
+            return moment(m);
+        }
+        if (beyond(m) <= SAFE) {
+            return integral(m, 0, x);
+        }
+        return moment(m) * partBelow(m, x);
+    }
+
+    /** Part of E[X^m] from the survival function up to x. */
+    private double partBelow(int m, double x) {
+        return incompleteBeta(-Math.expm1(-exponent(x)), Math.exp(-exponent(x)), m / gamma, beyond(m));
+    }
+
+    /** Part of E[X^m] from the survival function above x. */
+    private double partAbove(int m, double x) {
+        return incompleteBeta(Math.exp(-exponent(x)), -Math.expm1(-exponent(x)), beyond(m), m / gamma);
+    }
+
+    /** I_v(a, b) for v + w = 1, from the smaller of v and w, which is known with all its digits. */
+    private static double incompleteBeta(double v, double w, double a, double b) {
+        if (v < w) {
+            return RegularizedBeta.value(v, a, b);
+        }
+        return w < NEARLY_NOTHING ? 1 - RegularizedBeta.value(w, b, a) : RegularizedBeta.complement(w, b, a);
+    }
+
+    /** ∫ m·u^(m−1)·P(X &gt; u) du; the logarithm of P falls by at most some 10 over the length given as scale. */
+    private double integral(int m, double from, double to) {
+        return LogQuadrature.integral(u -> m == 1 ? survival(u) : 2 * (u * survival(u)), from, to,
+                2 / gamma / Math.max(1, Math.min(alpha / 5, 6)));
     }
 
     /** α − m/γ: positive where the moment of order m is finite. */
@@ -115,15 +145,5 @@ public record Burr(double alpha, double gamma, double theta) implements Severity
     private double moment(int m) {
         return beyond(m) <= 0 ? Double.POSITIVE_INFINITY
                 : Math.pow(theta, m) * alpha * Math.exp(LogBeta.value(1 + m / gamma, beyond(m)));
-    }
-
-    /** Part of the moment of order m from losses up to x. */
-    private double partBelow(int m, double x) {
-        return RegularizedBeta.value(share(x), 1 + m / gamma, beyond(m));
-    }
-
-    /** z/(1 + z), z = (x/θ)^γ. */
-    private double share(double x) {
-        return 1 / (1 + Math.pow(theta / x, gamma));
     }
 }

@@ -71,7 +71,7 @@ public record Gamma(double shape, double scale) implements SeverityModel {
         if (x == Double.POSITIVE_INFINITY) {
             return second;
         }
-        return x <= 0 ? 0 : second * RegularizedGamma.P.value(shape + 2, x / scale) + x * x * survival(x);
+        return x <= 0 ? 0 : second * RegularizedGamma.P.value(shape + 2, x / scale) + x * (x * survival(x));
     }
 
     @Override

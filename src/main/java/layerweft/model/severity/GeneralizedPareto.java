@@ -17,6 +17,8 @@ import org.apache.commons.rng.sampling.distribution.ZigguratSampler;
 public record GeneralizedPareto(double threshold, double scale, double shape) implements SeverityModel {
     /** Nearer to 0 the quotient (g(2ξ) − g(ξ))/ξ in the second moment loses more digits than its derivative form. */
     private static final double NEARLY_EXPONENTIAL = 1e-5;
+    /** y below which that quotient, of the order of y² from terms of the order of y, gives way to quadrature. */
+    private static final double FEW_DIGITS = 1e-3;
 
     public GeneralizedPareto {
         new Check().notNegative("threshold", threshold).positive("scale", scale).finite("shape", shape).orThrow();
@@ -67,6 +69,9 @@ public record GeneralizedPareto(double threshold, double scale, double shape) im
             return Math.max(x, 0) * Math.max(x, 0);
         }
         double y = exponent(x);
+        if (y < FEW_DIGITS) {
+            return threshold * threshold + LogQuadrature.integral(u -> 2 * u * survival(u), threshold, x, 1);
+        }
         double first = ExponentialIntegral.of(1 - shape, y);
         double second = Math.abs(shape) < NEARLY_EXPONENTIAL
                 ? ExponentialIntegral.first(1 - 1.5 * shape, y)

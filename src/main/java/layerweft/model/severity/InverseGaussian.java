@@ -16,6 +16,8 @@ import org.apache.commons.rng.sampling.distribution.ZigguratSampler;
  */
 public record InverseGaussian(double mean, double shape) implements SeverityModel {
     private static final double ROOT_HALF = Math.sqrt(0.5);
+    /** Part of a moment under which its closed form, a difference of terms as large as the moment, gives way to quadrature. */
+    private static final double FEW_DIGITS = 1e-3;
 
     public InverseGaussian {
         new Check().positive("mean", mean).positive("shape", shape).orThrow();
@@ -49,13 +51,13 @@ public record InverseGaussian(double mean, double shape) implements SeverityMode
     @Override
     public double quantile(double p) {
         Probability.check(p);
-        return p > 0.5 ? survivalQuantile(1 - p) : Bisection.smallest(0, Double.POSITIVE_INFINITY, x -> cdf(x) >= p);
+        return p == 0 ? 0 : p > 0.5 ? survivalQuantile(1 - p) : Bisection.smallest(0, Double.POSITIVE_INFINITY, x -> cdf(x) >= p);
     }
 
     @Override
     public double survivalQuantile(double q) {
         Probability.check(q);
-        return q > 0.5 ? quantile(1 - q) : Bisection.smallest(0, Double.POSITIVE_INFINITY, x -> survival(x) <= q);
+        return q == 0 ? Double.POSITIVE_INFINITY : q > 0.5 ? quantile(1 - q) : Bisection.smallest(0, Double.POSITIVE_INFINITY, x -> survival(x) <= q);
     }
 
     @Override
@@ -63,7 +65,11 @@ public record InverseGaussian(double mean, double shape) implements SeverityMode
         if (x == Double.POSITIVE_INFINITY) {
             return mean;
         }
-        return x <= 0 ? 0 : firstBelow(x) + x * survival(x);
+        if (x <= 0) {
+            return 0;
+        }
+        double value = firstBelow(x) + x * survival(x);
+        return value > FEW_DIGITS * mean ? value : LogQuadrature.integral(this::survival, 0, x, 1);
     }
 
     /** E[X²; X ≤ x] + x²·P(X &gt; x), the first by parts from the law's differential equation: μ²(F + E[X; X ≤ x]/λ) − 2μ²x²f(x)/λ. */
@@ -76,9 +82,12 @@ public record InverseGaussian(double mean, double shape) implements SeverityMode
             return 0;
         }
         double z = z(x);
-        double density = Math.sqrt(shape / (2 * Math.PI * x)) / x * Math.exp(-0.5 * z * z);
-        double below = mean * mean * (cdf(x) + firstBelow(x) / shape - 2 * x * x * density / shape);
-        return Math.max(0, below) + x * x * survival(x);
+        // x²·f(x)
+        double atX = x * (Math.sqrt(shape / (2 * Math.PI * x)) * Math.exp(-0.5 * z * z));
+        double below = mean * mean * (cdf(x) + firstBelow(x) / shape - 2 * atX / shape);
+        double value = below + x * (x * survival(x));
+        return value > FEW_DIGITS * mean * mean * Math.max(1, mean / shape) ? value
+                : LogQuadrature.integral(u -> 2 * (u * survival(u)), 0, x, 1);
     }
 
     @Override

@@ -105,7 +105,8 @@ public record Lognormal(double mu, double sigma) implements SeverityModel {
         if (x == Double.POSITIVE_INFINITY) {
             return moment(k);
         }
-        return moment(k) * NORMAL.cumulativeProbability(z(x, k)) + Math.pow(x, k) * survival(x);
+        double beyond = k == 1 ? x * survival(x) : x * (x * survival(x));
+        return moment(k) * NORMAL.cumulativeProbability(z(x, k)) + beyond;
     }
 
     /** E[(X − d)+] from tail probabilities, so that it keeps its digits far up. */

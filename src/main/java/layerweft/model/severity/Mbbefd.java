@@ -15,7 +15,7 @@ import layerweft.model.Check;
  * @param exposedValue the total loss, above 0, in the portfolio's unit
  */
 public record Mbbefd(double b, double g, double exposedValue) implements SeverityModel {
-    /** Nearer than this to the limits b = 1 and bg = 1 the closed form loses more digits than quadrature. */
+    /** Nearer than this to the limits b = 1 and bg = 1, or as far up, the closed form loses more digits than quadrature. */
     private static final double NEAR_LIMIT = 0.01;
 
     public Mbbefd {
@@ -84,7 +84,7 @@ public record Mbbefd(double b, double g, double exposedValue) implements Severit
         }
         double lnB = Math.log(b);
         double a = (1 - g * b) / (1 - b);
-        if (Math.abs(lnB) < NEAR_LIMIT || Math.abs(a) < NEAR_LIMIT) {
+        if (Math.abs(lnB) < NEAR_LIMIT || Math.abs(a) * survival(start) < NEAR_LIMIT) {
             return integral(this::survival, start, end);
         }
         double growth = Math.log1p((rise(end) - rise(start)) / (1 + rise(start)));

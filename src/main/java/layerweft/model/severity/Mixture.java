@@ -47,13 +47,13 @@ public record Mixture(List<Double> weights, List<SeverityModel> components) impl
     @Override
     public double quantile(double p) {
         Probability.check(p);
-        return smallest(c -> c.quantile(p), x -> cdf(x) >= p);
+        return p == 1 ? upperEnd() : smallest(c -> c.quantile(p), x -> cdf(x) >= p);
     }
 
     @Override
     public double survivalQuantile(double q) {
         Probability.check(q);
-        return smallest(c -> c.survivalQuantile(q), x -> survival(x) <= q);
+        return q == 0 ? upperEnd() : smallest(c -> c.survivalQuantile(q), x -> survival(x) <= q);
     }
 
     @Override

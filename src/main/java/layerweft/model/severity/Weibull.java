@@ -33,13 +33,13 @@ public record Weibull(double shape, double scale) implements SeverityModel {
     @Override
     public double quantile(double p) {
         Probability.check(p);
-        return scale * Math.pow(-Math.log1p(-p), 1 / shape);
+        return scale * Math.pow(Math.max(0, -Math.log1p(-p)), 1 / shape);
     }
 
     @Override
     public double survivalQuantile(double q) {
         Probability.check(q);
-        return scale * Math.pow(-Math.log(q), 1 / shape);
+        return scale * Math.pow(Math.max(0, -Math.log(q)), 1 / shape);
     }
 
     @Override
@@ -59,7 +59,7 @@ public record Weibull(double shape, double scale) implements SeverityModel {
 
     @Override
     public double layerMean(double from, double to) {
-        return from < scale ? limitedMean(to) - limitedMean(from) : stopLoss(from) - stopLoss(to);
+        return from < scale || mean() == Double.POSITIVE_INFINITY ? limitedMean(to) - limitedMean(from) : stopLoss(from) - stopLoss(to);
     }
 
     @Override
@@ -81,12 +81,20 @@ public record Weibull(double shape, double scale) implements SeverityModel {
         return Math.pow(scale, m) * org.apache.commons.numbers.gamma.Gamma.value(1 + m / shape);
     }
 
-    /** E[X^m]·P(1 + m/k, (x/λ)^k) + x^m·P(X &gt; x). */
+    /** E[X^m]·P(1 + m/k, (x/λ)^k) + x^m·P(X &gt; x); by quadrature for shapes so small that the moment exceeds every {@code double}. */
     private double limitedMoment(int m, double x) {
+        double moment = moment(m);
         if (x == Double.POSITIVE_INFINITY) {
-            return moment(m);
+            return moment;
         }
-        return x <= 0 ? 0 : moment(m) * RegularizedGamma.P.value(1 + m / shape, exponent(x)) + Math.pow(x, m) * survival(x);
+        if (x <= 0) {
+            return 0;
+        }
+        if (moment == Double.POSITIVE_INFINITY) {
+            return LogQuadrature.integral(u -> m == 1 ? survival(u) : 2 * (u * survival(u)), 0, x, 1);
+        }
+        double beyond = m == 1 ? x * survival(x) : x * (x * survival(x));
+        return moment * RegularizedGamma.P.value(1 + m / shape, exponent(x)) + beyond;
     }
 
     private double stopLoss(double d) {
