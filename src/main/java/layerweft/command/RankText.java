@@ -39,7 +39,8 @@ final class RankText {
     }
 
     private static String reach(FigureKind kind, Sensitivity.Reach r) {
-        return FigureKindText.value(kind, r.atLowest()) + " (" + r.lowest() + ") to " + FigureKindText.value(kind, r.atHighest()) + " (" + r.highest() + ")";
+        return FigureKindText.value(kind, r.atLowest()) + " (" + r.lowest() + ") to "
+                + FigureKindText.value(kind, r.atHighest()) + " (" + r.highest() + ")";
     }
 
     /** Fixed width, zero in the middle; falls are drawn in whole characters, as there are no blocks that fill from the right. */

@@ -36,7 +36,8 @@ final class SweepText {
         Portfolio portfolio = sweep.treaty().portfolio();
         line(portfolio.name() + ": " + sweep.treaty().programme().name());
         String linked = portfolio.dependence().links() == Dependence.Links.COUNTS ? "Annual counts" : "Annual totals";
-        line(FigureKindText.capital(FigureKindText.title(kind, portfolio)) + ". " + linked + " of the perils joined by each family at the same Kendall's τ.");
+        line(FigureKindText.capital(FigureKindText.title(kind, portfolio)) + ". "
+                + linked + " of the perils joined by each family at the same Kendall's τ.");
         if (sweep.layers().stream().anyMatch(layer -> !layer.refusals().isEmpty())) {
             line(String.format(Locale.ROOT, "Simulated layers: %,d years, seed %d, the same random numbers at every point.",
                     sweep.settings().years(), sweep.settings().seed()));
@@ -60,7 +61,8 @@ final class SweepText {
         line("Independent " + FigureKindText.value(kind, kind.of(layer.independent())) + ", comonotonic "
                 + FigureKindText.value(kind, layer.comonotoneValue()) + " (" + FigureKindText.lift(layer.comonotoneLift()) + ").");
         Comparator<SweepPoint> bySlope = Comparator.comparingDouble(p -> Math.abs(p.slope().value()));
-        layer.points().stream().filter(p -> Math.abs(p.slope().value()) > p.slope().error()).max(bySlope).ifPresent(p -> line("Steepest with " + p.family().label()
+        layer.points().stream().filter(p -> Math.abs(p.slope().value()) > p.slope().error()).max(bySlope).ifPresent(p -> line("Steepest with "
+                + p.family().label()
                 + " at τ " + FigureText.plain(p.kendallTau()) + ": " + FigureKindText.change(kind, p.slope().times(0.1)) + " for 0.1 of τ."));
         layer.spreads().stream().filter(s -> s.width().defined()).max(Comparator.comparingDouble(s -> s.width().value()))
                 .filter(s -> s.width().value() > 0 && sweep.request().families().size() > 1)

@@ -72,7 +72,8 @@ final class RankingRun {
 
     private void dependence() {
         int perils = treaty.portfolio().perils().size();
-        Optional<String> still = layers.stream().map(j -> DependenceReach.none(treaty, j, figure)).reduce((a, b) -> a.isEmpty() ? a : b).orElseThrow();
+        Optional<String> still = layers.stream().map(j -> DependenceReach.none(treaty, j, figure))
+                .reduce((a, b) -> a.isEmpty() ? a : b).orElseThrow();
         if (still.isPresent()) {
             notVaried.add("dependence: " + figure.words() + " does not depend on it, because " + still.get());
             return;

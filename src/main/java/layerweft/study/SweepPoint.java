@@ -14,4 +14,5 @@ import layerweft.model.copula.CopulaFamily;
  * @param check the same layer simulated apart; null where not asked for
  */
 public record SweepPoint(
-        CopulaFamily family, double kendallTau, LayerFigures figures, Figure lift, Figure value, Figure valueLift, Figure slope, LayerFigures check) {}
+        CopulaFamily family, double kendallTau, LayerFigures figures, Figure lift,
+        Figure value, Figure valueLift, Figure slope, LayerFigures check) {}

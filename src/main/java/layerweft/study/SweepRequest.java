@@ -19,8 +19,8 @@ import layerweft.model.copula.TauRange;
  */
 public record SweepRequest(List<CopulaFamily> families, List<Double> taus, FigureKind figure, long check) {
     /** One family for each way of depending: in the large, in the small, in both, in neither, weakly and strongly. */
-    public static final List<CopulaFamily> USUAL_FAMILIES = Stream.of("gumbel", "student:4", "frank", "survival-clayton", "joe", "gaussian", "clayton")
-            .map(CopulaFamily::parse).toList();
+    public static final List<CopulaFamily> USUAL_FAMILIES =
+            Stream.of("gumbel", "student:4", "frank", "survival-clayton", "joe", "gaussian", "clayton").map(CopulaFamily::parse).toList();
 
     public static final List<Double> USUAL_TAUS = List.of(0.0, 0.1, 0.2, 0.3, 0.4, 0.5, 0.6, 0.7, 0.8, 0.9);
 

@@ -30,7 +30,8 @@ class BreakEvenTest {
         double events = expectedLoss(TwoPerils.eachEvent(), family, 0.5) + COST_OF_EACH_EVENT;
         Programme first = TwoPerils.programme("Year", TwoPerils.quoted(TwoPerils.stopLoss(), premiumOfStopLoss));
         Programme second = TwoPerils.programme("Event", TwoPerils.quoted(TwoPerils.eachEvent(), events));
-        return BreakEven.of(TwoPerils.portfolio(TwoPerils.GUMBEL), first, second, List.of(family), TwoPerils.SETTINGS, RunControl.NONE).answers().get(0);
+        return BreakEven.of(TwoPerils.portfolio(TwoPerils.GUMBEL), first, second, List.of(family), TwoPerils.SETTINGS, RunControl.NONE)
+                .answers().get(0);
     }
 
     @ParameterizedTest

@@ -97,7 +97,8 @@ class SweepTest {
         Sweep other = Sweep.of(treaty, request(families("clayton", "gumbel"), 0.7, 0.1, 0.4), new SimulationSettings(20_000, 1, 1), RunControl.NONE);
         for (int j = 0; j < 2; j++) {
             for (SweepPoint point : one.layers().get(j).points()) {
-                SweepPoint same = other.layers().get(j).of(point.family()).stream().filter(p -> p.kendallTau() == point.kendallTau()).findFirst().orElseThrow();
+                SweepPoint same =
+                        other.layers().get(j).of(point.family()).stream().filter(p -> p.kendallTau() == point.kendallTau()).findFirst().orElseThrow();
                 assertEquals(point, same);
             }
         }

@@ -56,7 +56,8 @@ final class TwoPerils {
 
     /** A layer with one free reinstatement whose premium for a second is pro rata as to time, which the transform cannot price. */
     static Layer proRataTime() {
-        return new Layer("Pro rata", List.of(), new OccurrenceTerms(10, null, 20), new AnnualTerms(0, NONE), List.of(1.0), 1, 1, true, List.of(), null);
+        return new Layer("Pro rata", List.of(), new OccurrenceTerms(10, null, 20), new AnnualTerms(0, NONE),
+                List.of(1.0), 1, 1, true, List.of(), null);
     }
 
     /** With a quoted premium. */
