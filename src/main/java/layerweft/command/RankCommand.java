@@ -1,9 +1,7 @@
 package layerweft.command;
 
-import java.nio.file.Path;
 import java.util.Optional;
 import java.util.concurrent.Callable;
-import layerweft.file.TreatyReader;
 import layerweft.model.treaty.Treaty;
 import layerweft.study.FigureKind;
 import layerweft.study.Ranking;
@@ -11,7 +9,6 @@ import picocli.CommandLine.Command;
 import picocli.CommandLine.Mixin;
 import picocli.CommandLine.Model.CommandSpec;
 import picocli.CommandLine.Option;
-import picocli.CommandLine.Parameters;
 import picocli.CommandLine.Spec;
 
 /** {@code rank}: which assumption moves a price most. */
@@ -26,11 +23,8 @@ final class RankCommand implements Callable<Integer> {
     @Spec
     private CommandSpec spec;
 
-    @Parameters(index = "0", paramLabel = "PORTFOLIO", description = "Portfolio file (JSON).")
-    private Path portfolio;
-
-    @Parameters(index = "1", paramLabel = "PROGRAMME", description = "Programme file (JSON).")
-    private Path programme;
+    @Mixin
+    private TreatyFiles files;
 
     @Option(names = "--layer", paramLabel = "NAME", description = "Layer to look at (default: the sum over the programme).")
     private String layer;
@@ -48,7 +42,7 @@ final class RankCommand implements Callable<Integer> {
     public Integer call() {
         output.checkTarget();
         FigureKind kind = FigureKind.parse(figure);
-        Treaty treaty = TreatyReader.read(portfolio, programme);
+        Treaty treaty = files.read();
         try (Progress progress = new Progress("rank")) {
             Ranking ranking = Ranking.of(treaty, Optional.ofNullable(layer), kind, simulation.settings(), progress);
             output.write(answer(ranking), spec.commandLine().getOut());

@@ -1,8 +1,6 @@
 package layerweft.command;
 
-import java.nio.file.Path;
 import java.util.concurrent.Callable;
-import layerweft.file.TreatyReader;
 import layerweft.model.treaty.Treaty;
 import layerweft.study.FigureKind;
 import layerweft.study.Sweep;
@@ -11,7 +9,6 @@ import picocli.CommandLine.Command;
 import picocli.CommandLine.Mixin;
 import picocli.CommandLine.Model.CommandSpec;
 import picocli.CommandLine.Option;
-import picocli.CommandLine.Parameters;
 import picocli.CommandLine.Spec;
 
 /** {@code sweep}: how the layers move with the family and the strength of dependence. */
@@ -26,11 +23,8 @@ final class SweepCommand implements Callable<Integer> {
     @Spec
     private CommandSpec spec;
 
-    @Parameters(index = "0", paramLabel = "PORTFOLIO", description = "Portfolio file (JSON). Its own copula is not looked at, its links are.")
-    private Path portfolio;
-
-    @Parameters(index = "1", paramLabel = "PROGRAMME", description = "Programme file (JSON).")
-    private Path programme;
+    @Mixin
+    private TreatyFiles files;
 
     @Option(names = "--families", paramLabel = "A,B,…", description = "Families, written as gumbel, survival-clayton, student:4 "
             + "(default: gumbel,student:4,frank,survival-clayton,joe,gaussian,clayton).")
@@ -58,7 +52,7 @@ final class SweepCommand implements Callable<Integer> {
         output.checkTarget();
         SweepRequest request = new SweepRequest(StudyOptions.families(families, SweepRequest.USUAL_FAMILIES),
                 StudyOptions.taus(taus, SweepRequest.USUAL_TAUS), FigureKind.parse(figure), check);
-        Treaty treaty = TreatyReader.read(portfolio, programme);
+        Treaty treaty = files.read();
         try (Progress progress = new Progress("sweep")) {
             Sweep sweep = Sweep.of(treaty, request, simulation.settings(), progress);
             output.write(answer(sweep), spec.commandLine().getOut());

@@ -129,14 +129,6 @@ public record BreakEven(Portfolio portfolio, Programme first, Programme second, 
     }
 
     private static Figure cost(CopulaPricing pricing, Treaty treaty, CopulaFamily family, double tau) {
-        return pricing.price(family.at(tau), layers(treaty)).stream().map(BreakEven::cost).reduce(Figure.exact(0), Figure::plus);
-    }
-
-    /** P·(1 + Σ c_k E[u_k]) − E[Y], at the layer's share. */
-    static Figure cost(LayerFigures layer) {
-        Figure premium = layer.premium();
-        Figure paidUp = layer.paidUpFactor();
-        Figure premiums = new Figure(premium.value() * paidUp.value(), premium.error() * paidUp.value() + premium.value() * paidUp.error());
-        return premiums.minus(layer.expectedLoss());
+        return pricing.price(family.at(tau), layers(treaty)).stream().map(LayerFigures::costOfCover).reduce(Figure.exact(0), Figure::plus);
     }
 }
