@@ -1,14 +1,11 @@
 package layerweft.command;
 
-import java.nio.file.Path;
 import java.util.concurrent.Callable;
-import layerweft.file.TreatyReader;
 import layerweft.model.treaty.Treaty;
 import layerweft.study.Bounds;
 import picocli.CommandLine.Command;
 import picocli.CommandLine.Mixin;
 import picocli.CommandLine.Model.CommandSpec;
-import picocli.CommandLine.Parameters;
 import picocli.CommandLine.Spec;
 
 /** {@code bounds}: the range of each layer's expected loss over every dependence. */
@@ -23,11 +20,8 @@ final class BoundsCommand implements Callable<Integer> {
     @Spec
     private CommandSpec spec;
 
-    @Parameters(index = "0", paramLabel = "PORTFOLIO", description = "Portfolio file (JSON).")
-    private Path portfolio;
-
-    @Parameters(index = "1", paramLabel = "PROGRAMME", description = "Programme file (JSON).")
-    private Path programme;
+    @Mixin
+    private TreatyFiles files;
 
     @Mixin
     private OutputOptions output;
@@ -35,7 +29,7 @@ final class BoundsCommand implements Callable<Integer> {
     @Override
     public Integer call() {
         output.checkTarget();
-        Treaty treaty = TreatyReader.read(portfolio, programme);
+        Treaty treaty = files.read();
         try (Progress progress = new Progress("bounds")) {
             output.write(answer(Bounds.of(treaty, progress)), spec.commandLine().getOut());
         }

@@ -1,9 +1,6 @@
 package layerweft.command;
 
-import de.siegmar.fastcsv.writer.CsvWriter;
-import java.io.IOException;
-import java.io.StringWriter;
-import java.io.UncheckedIOException;
+import java.util.List;
 import layerweft.engine.bounds.LayerRange;
 import layerweft.study.Bounds;
 
@@ -13,26 +10,25 @@ final class BoundsCsv {
     private BoundsCsv() {}
 
     static String of(Bounds bounds) {
-        StringWriter text = new StringWriter();
-        try (CsvWriter csv = CsvWriter.builder().build(text)) {
-            csv.writeRecord("layer", "lowest", "attainedLow", "independent", "comonotone", "attainedHigh", "highest", "error", "note");
-            for (Bounds.Answer answer : bounds.layers()) {
-                LayerRange r = answer.range();
-                String note = answer.note() == null ? "" : answer.note();
-                if (r == null) {
-                    csv.writeRecord(answer.name(), "", "", "", "", "", "", "", note);
-                } else {
-                    csv.writeRecord(answer.name(), number(r.lowest()), number(r.attainedLow()), number(r.independent()), number(r.comonotone()),
-                            number(r.attainedHigh()), number(r.highest()), number(r.error()), note);
+        Csv csv = new Csv();
+        List.of("layer", "lowest", "attainedLow", "independent", "comonotone", "attainedHigh", "highest", "error", "note").forEach(csv::cell);
+        csv.endOfRow();
+        for (Bounds.Answer answer : bounds.layers()) {
+            csv.cell(answer.name());
+            if (answer.range() == null) {
+                for (int empty = 0; empty < 7; empty++) {
+                    csv.cell("");
                 }
+            } else {
+                range(csv, answer.range());
             }
-        } catch (IOException e) {
-            throw new UncheckedIOException(e);
+            csv.cell(answer.note() == null ? "" : answer.note()).endOfRow();
         }
-        return text.toString();
+        return csv.toString();
     }
 
-    private static String number(double value) {
-        return Double.isInfinite(value) ? "infinity" : Double.toString(value);
+    private static void range(Csv csv, LayerRange r) {
+        csv.cell(r.lowest()).cell(r.attainedLow()).cell(r.independent()).cell(r.comonotone()).cell(r.attainedHigh()).cell(r.highest())
+                .cell(r.error());
     }
 }

@@ -16,7 +16,8 @@ import picocli.CommandLine.Spec;
  * The command line: commands in, text out, and an exit status: 0 done, 2 the command or a file is wrong (said on standard error, nothing
  * on standard output), 1 a failure of the program.
  */
-@Command(name = "layerweft", mixinStandardHelpOptions = true, versionProvider = Version.class, subcommands = {QuoteCommand.class, BoundsCommand.class, CheckCommand.class},
+@Command(name = "layerweft", mixinStandardHelpOptions = true, versionProvider = Version.class,
+        subcommands = {QuoteCommand.class, SweepCommand.class, BoundsCommand.class, BreakEvenCommand.class, RankCommand.class, CheckCommand.class},
         description = "Prices reinsurance layers over dependent perils.",
         footer = {"", "A price supports qualified judgement; it does not replace it, and it defers to local regulation and licensed practice."})
 public final class CommandLineProgram implements Runnable {

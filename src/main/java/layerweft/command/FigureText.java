@@ -28,6 +28,9 @@ final class FigureText {
         if (!figure.defined() || figure.infinite() || figure.error() == 0) {
             return "";
         }
+        if (figure.error() == Double.POSITIVE_INFINITY) {
+            return "± ∞";
+        }
         int places = figure.value() == 0 ? Math.min(PLACES_OF_ZERO, places(figure)) : places(figure);
         double unit = Math.pow(10, -places);
         return figure.error() < 0.5 * unit ? "± < " + grouped(unit, places) : "± " + grouped(figure.error(), places);
@@ -46,7 +49,8 @@ final class FigureText {
     /** "1 in 83 years" for a chance a year: three significant digits at most. */
     static String oneIn(Figure chance) {
         if (!(chance.value() > 0)) {
-            return "never";
+            // none seen: rarer than the simulation can show
+            return chance.error() > 0 && chance.error() < 1 ? "< 1 in " + grouped(Math.rint(1 / chance.error()), 0) : "never";
         }
         double years = 1 / chance.value();
         return "1 in " + grouped(years, Math.min(2, Math.max(0, 2 - (int) Math.floor(Math.log10(years)))));

@@ -1,8 +1,6 @@
 package layerweft.command;
 
-import java.nio.file.Path;
 import java.util.concurrent.Callable;
-import layerweft.file.TreatyReader;
 import layerweft.model.treaty.Treaty;
 import layerweft.study.EngineChoice;
 import layerweft.study.Quote;
@@ -10,7 +8,6 @@ import picocli.CommandLine.Command;
 import picocli.CommandLine.Mixin;
 import picocli.CommandLine.Model.CommandSpec;
 import picocli.CommandLine.Option;
-import picocli.CommandLine.Parameters;
 import picocli.CommandLine.Spec;
 
 /** {@code quote}: the figures of a programme on a portfolio. */
@@ -25,11 +22,8 @@ final class QuoteCommand implements Callable<Integer> {
     @Spec
     private CommandSpec spec;
 
-    @Parameters(index = "0", paramLabel = "PORTFOLIO", description = "Portfolio file (JSON).")
-    private Path portfolio;
-
-    @Parameters(index = "1", paramLabel = "PROGRAMME", description = "Programme file (JSON).")
-    private Path programme;
+    @Mixin
+    private TreatyFiles files;
 
     @Option(names = "--engine", paramLabel = "auto|transform|simulation", defaultValue = "auto",
             description = "auto: the transform for each layer that it can price, simulation for the rest (default: ${DEFAULT-VALUE}).")
@@ -44,7 +38,7 @@ final class QuoteCommand implements Callable<Integer> {
     @Override
     public Integer call() {
         output.checkTarget();
-        Treaty treaty = TreatyReader.read(portfolio, programme);
+        Treaty treaty = files.read();
         try (Progress progress = new Progress("quote")) {
             Quote quote = Quote.of(treaty, engine, simulation.settings(), progress);
             output.write(answer(quote), spec.commandLine().getOut());

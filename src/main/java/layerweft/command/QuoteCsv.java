@@ -1,10 +1,5 @@
 package layerweft.command;
 
-import de.siegmar.fastcsv.writer.CsvWriter;
-import java.io.IOException;
-import java.io.StringWriter;
-import java.io.UncheckedIOException;
-import java.util.ArrayList;
 import java.util.List;
 import java.util.SortedMap;
 import layerweft.figures.Figure;
@@ -19,6 +14,7 @@ import layerweft.study.Quote;
  * infinite figure is the word infinity, an undefined one an empty cell.
  */
 final class QuoteCsv {
+    private final Csv csv = new Csv();
     private final Quote quote;
     private final Buyer buyer;
 
@@ -32,74 +28,47 @@ final class QuoteCsv {
     }
 
     private String write() {
-        StringWriter text = new StringWriter();
-        try (CsvWriter csv = CsvWriter.builder().build(text)) {
-            csv.writeRecord(header());
-            for (LayerFigures layer : quote.layers()) {
-                csv.writeRecord(row(layer));
-            }
-            csv.writeRecord(row("gross", quote.whole().gross()));
-            csv.writeRecord(row("ceded", quote.whole().ceded()));
-            csv.writeRecord(row("net", quote.whole().net()));
-        } catch (IOException e) {
-            throw new UncheckedIOException(e);
+        header();
+        for (LayerFigures layer : quote.layers()) {
+            row(layer);
         }
-        return text.toString();
+        row("gross", quote.whole().gross());
+        row("ceded", quote.whole().ceded());
+        row("net", quote.whole().net());
+        return csv.toString();
     }
 
-    private List<String> header() {
-        List<String> cells = new ArrayList<>(List.of("layer", "engine", "share", "quotedPremium", "quotedRateOnLine"));
-        for (String name : List.of("expectedLoss", "standardDeviation", "lossOnLine", "attachmentProbability", "exhaustionProbability",
-                "expectedEvents", "paidUpFactor", "netPremium", "technicalPremium", "technicalRateOnLine", "payback")) {
-            pair(cells, name);
-        }
-        buyer.levels().forEach(level -> pair(cells, "valueAtRisk " + FigureText.plain(level)));
-        pair(cells, "tailValueAtRisk " + FigureText.plain(buyer.tailLevel()));
-        buyer.returnPeriods().stream().sorted().distinct().forEach(t -> pair(cells, "largest event 1 in " + FigureText.plain(t)));
-        return cells;
+    private void header() {
+        List.of("layer", "engine", "share", "quotedPremium", "quotedRateOnLine").forEach(csv::cell);
+        List.of("expectedLoss", "standardDeviation", "lossOnLine", "attachmentProbability", "exhaustionProbability", "expectedEvents",
+                "paidUpFactor", "netPremium", "technicalPremium", "technicalRateOnLine", "payback").forEach(csv::pair);
+        buyer.levels().forEach(level -> csv.pair("valueAtRisk " + FigureText.plain(level)));
+        csv.pair("tailValueAtRisk " + FigureText.plain(buyer.tailLevel()));
+        buyer.returnPeriods().stream().sorted().distinct().forEach(t -> csv.pair("largest event 1 in " + FigureText.plain(t)));
+        csv.endOfRow();
     }
 
-    private static void pair(List<String> cells, String name) {
-        cells.add(name);
-        cells.add(name + " error");
-    }
-
-    private List<String> row(LayerFigures f) {
+    private void row(LayerFigures f) {
         double share = quote.treaty().layer(quote.layers().indexOf(f)).share();
-        List<String> cells = new ArrayList<>(List.of(f.name(), f.engine().label(), number(share),
-                f.quotedPremium() == null ? "" : number(f.quotedPremium()), f.quotedRateOnLine() == null ? "" : number(f.quotedRateOnLine())));
-        for (Figure figure : List.of(f.expectedLoss(), f.standardDeviation(), f.lossOnLine(), f.attachmentProbability(),
-                f.exhaustionProbability(), f.expectedEvents(), f.paidUpFactor(), f.netPremium(), f.technicalPremium(), f.technicalRateOnLine(),
-                f.payback())) {
-            pair(cells, figure);
+        csv.cell(f.name()).cell(f.engine().label()).cell(share).cell(f.quotedPremium() == null ? Double.NaN : f.quotedPremium())
+                .cell(f.quotedRateOnLine() == null ? Double.NaN : f.quotedRateOnLine());
+        List.of(f.expectedLoss(), f.standardDeviation(), f.lossOnLine(), f.attachmentProbability(), f.exhaustionProbability(), f.expectedEvents(),
+                f.paidUpFactor(), f.netPremium(), f.technicalPremium(), f.technicalRateOnLine(), f.payback()).forEach(csv::pair);
+        tail(f.valueAtRisk(), f.tailValueAtRisk(), f.occurrence());
+    }
+
+    private void row(String side, PositionStatistics p) {
+        csv.cell(side).cell("simulation").cell("").cell("").cell("").pair(p.mean()).pair(p.standardDeviation());
+        for (int empty = 0; empty < 9; empty++) {
+            csv.pair(Figure.UNDEFINED);
         }
-        tail(cells, f.valueAtRisk(), f.tailValueAtRisk(), f.occurrence());
-        return cells;
+        tail(p.valueAtRisk(), p.tailValueAtRisk(), ReturnPeriods.of(p.occurrenceValueAtRisk(), buyer));
     }
 
-    private List<String> row(String side, PositionStatistics p) {
-        List<String> cells = new ArrayList<>(List.of(side, "simulation", "", "", ""));
-        pair(cells, p.mean());
-        pair(cells, p.standardDeviation());
-        for (int empty = 0; empty < 18; empty++) {
-            cells.add("");
-        }
-        tail(cells, p.valueAtRisk(), p.tailValueAtRisk(), ReturnPeriods.of(p.occurrenceValueAtRisk(), buyer));
-        return cells;
-    }
-
-    private static void tail(List<String> cells, SortedMap<Double, Figure> atRisk, Figure tail, SortedMap<Double, Figure> occurrence) {
-        atRisk.values().forEach(figure -> pair(cells, figure));
-        pair(cells, tail);
-        occurrence.values().forEach(figure -> pair(cells, figure));
-    }
-
-    private static void pair(List<String> cells, Figure figure) {
-        cells.add(number(figure.value()));
-        cells.add(figure.defined() ? number(figure.error()) : "");
-    }
-
-    private static String number(double value) {
-        return Double.isNaN(value) ? "" : Double.isInfinite(value) ? "infinity" : Double.toString(value);
+    private void tail(SortedMap<Double, Figure> atRisk, Figure tail, SortedMap<Double, Figure> occurrence) {
+        atRisk.values().forEach(csv::pair);
+        csv.pair(tail);
+        occurrence.values().forEach(csv::pair);
+        csv.endOfRow();
     }
 }

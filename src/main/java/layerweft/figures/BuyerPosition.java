@@ -36,13 +36,10 @@ public record BuyerPosition(
         Figure recoveries = Figure.exact(0);
         Figure cost = Figure.exact(0);
         for (LayerFigures layer : layers) {
-            Figure premium = layer.premium();
-            double factor = layer.paidUpFactor().value() - 1;
-            Figure ofLayer = new Figure(premium.value() * factor, premium.error() * factor + premium.value() * layer.paidUpFactor().error());
-            upfront = upfront.plus(premium);
-            reinstatement = reinstatement.plus(ofLayer);
+            upfront = upfront.plus(layer.premium());
+            reinstatement = reinstatement.plus(layer.reinstatementPremium());
             recoveries = recoveries.plus(layer.expectedLoss());
-            cost = cost.plus(premium).plus(ofLayer).minus(layer.expectedLoss());
+            cost = cost.plus(layer.costOfCover());
         }
         SortedMap<Double, Figure> relief = new TreeMap<>();
         for (Map.Entry<Double, Figure> gross : whole.gross().valueAtRisk().entrySet()) {

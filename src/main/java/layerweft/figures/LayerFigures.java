@@ -67,6 +67,17 @@ public record LayerFigures(
         return quotedPremium == null ? technicalPremium : Figure.exact(quotedPremium);
     }
 
+    /** Expected reinstatement premium, P·Σ c_k E[u_k]. */
+    public Figure reinstatementPremium() {
+        double factor = paidUpFactor.value() - 1;
+        return new Figure(premium().value() * factor, premium().error() * factor + premium().value() * paidUpFactor.error());
+    }
+
+    /** What the layer is expected to cost its buyer: P·(1 + Σ c_k E[u_k]) − E[Y]. */
+    public Figure costOfCover() {
+        return premium().plus(reinstatementPremium()).minus(expectedLoss);
+    }
+
     private static Figure payback(Figure rateOnLine) {
         if (!rateOnLine.defined() || rateOnLine.value() == 0) {
             return Figure.UNDEFINED;

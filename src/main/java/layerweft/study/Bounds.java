@@ -1,8 +1,9 @@
 package layerweft.study;
 
-import java.util.ArrayList;
 import java.util.List;
 import java.util.concurrent.CancellationException;
+import java.util.concurrent.atomic.AtomicInteger;
+import java.util.stream.IntStream;
 import layerweft.engine.RunControl;
 import layerweft.engine.bounds.BoundsEngine;
 import layerweft.engine.bounds.LayerRange;
@@ -30,15 +31,16 @@ public record Bounds(Treaty treaty, List<Answer> layers) {
     /** @throws CancellationException if the control stops it between two layers */
     public static Bounds of(Treaty treaty, RunControl control) {
         BoundsEngine engine = new BoundsEngine(treaty);
-        List<Answer> answers = new ArrayList<>();
-        for (int j = 0; j < treaty.layers(); j++) {
+        AtomicInteger done = new AtomicInteger();
+        // layers share nothing, so that they can be taken in any order and at once
+        return new Bounds(treaty, IntStream.range(0, treaty.layers()).parallel().mapToObj(j -> {
             if (control.cancelled()) {
                 throw new CancellationException();
             }
-            answers.add(answer(treaty, engine, j));
-            control.progress(j + 1L, treaty.layers());
-        }
-        return new Bounds(treaty, answers);
+            Answer answer = answer(treaty, engine, j);
+            control.progress(done.incrementAndGet(), treaty.layers());
+            return answer;
+        }).toList());
     }
 
     private static Answer answer(Treaty treaty, BoundsEngine engine, int j) {

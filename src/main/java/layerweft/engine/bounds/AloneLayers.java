@@ -21,23 +21,29 @@ import layerweft.model.treaty.Treaty;
 
 /** One layer taken apart: its occurrence terms on each of its perils alone, and on all of them independent of each other. */
 final class AloneLayers {
-    /** Laws are not extrapolated: a lattice as fine as 8,192 cells. */
+    /** Laws are not extrapolated: a lattice of up to 8,192 cells. */
     private static final Accuracy OF_LAWS = new Accuracy(1e-12, 1 << 13);
+    /** Fewer where events are sums over sub-perils, whose laws take their time. */
+    private static final Accuracy OF_SPLIT_LAWS = new Accuracy(1e-12, 1 << 12);
     private static final Accuracy OF_VALUES = Accuracy.of(1e-7);
     private final Portfolio portfolio;
     private final Treaty original;
     private final Layer layer;
     private final List<List<String>> covered = new ArrayList<>();
+    private final boolean split;
 
     AloneLayers(Treaty treaty, int layer) {
         this.original = treaty;
         this.portfolio = treaty.portfolio().with(Dependence.NONE);
         this.layer = treaty.layer(layer);
+        boolean parts = false;
         for (int i = 0; i < portfolio.perils().size(); i++) {
             if (treaty.cover(layer).covers(i) && reaches(i, treaty, layer)) {
                 covered.add(names(treaty, layer, i));
+                parts |= portfolio.perils().get(i).eventLoss() instanceof EventLoss.Split;
             }
         }
+        split = parts;
     }
 
     /** Whether events of a peril that happen at all can be large enough. */
@@ -87,7 +93,7 @@ final class AloneLayers {
     /** The laws of min(A_i, cap): on the finest lattice, and on that of twice the step. */
     Margin[][] margins(double cap) {
         List<Layer> layers = each(new AnnualTerms(0, cap));
-        TransformEngine engine = new TransformEngine(treaty(layers), OF_LAWS);
+        TransformEngine engine = new TransformEngine(treaty(layers), split ? OF_SPLIT_LAWS : OF_LAWS);
         Margin[][] margins = new Margin[2][layers.size()];
         for (int i = 0; i < layers.size(); i++) {
             TransformLaw law = engine.law(i);

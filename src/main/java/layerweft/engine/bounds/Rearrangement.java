@@ -194,10 +194,4 @@ final class Rearrangement {
     int rank(int peril, int row) {
         return place[peril][row];
     }
-
-    int[][] ranks() {
-        int[][] copy = new int[place.length][];
-        Arrays.setAll(copy, i -> place[i].clone());
-        return copy;
-    }
 }

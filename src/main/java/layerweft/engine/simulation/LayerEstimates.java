@@ -57,10 +57,10 @@ final class LayerEstimates {
         double factorSlope = controlSlope(sums.ra / n - factorMean * sums.a / n);
         double off = controlled() ? sums.a / n - known.mean() : 0;
         Figure expected = infiniteMean ? Figure.INFINITE
-                : new Figure(mean - meanSlope * off, error(residual(variance, meanSlope, sums.ya / n - mean * sums.a / n)) + unseen(meanSlope));
+                : new Figure(mean - meanSlope * off, error(residual(variance, meanSlope, sums.ya / n - mean * sums.a / n)) + unseen(meanSlope, 1));
         double factorVariance = Math.max(0, sums.rr / n - factorMean * factorMean);
         Figure factor = new Figure(Math.max(0, factorMean - factorSlope * off),
-                error(residual(factorVariance, factorSlope, sums.ra / n - factorMean * sums.a / n)) + unseen(factorSlope));
+                error(residual(factorVariance, factorSlope, sums.ra / n - factorMean * sums.a / n)) + unseen(factorSlope, factorPerFullLoss()));
         Figure deviation = infiniteDeviation ? Figure.INFINITE
                 : new Figure(sd, sd == 0 ? 0 : error(variance(y -> (y - mean) * (y - mean)) / (4 * variance)));
 
@@ -89,6 +89,15 @@ final class LayerEstimates {
         });
     }
 
+    /** One event that takes the whole line. */
+    private double fullLoss() {
+        return Math.min(terms.line(), terms.annualLimit());
+    }
+
+    private double factorPerFullLoss() {
+        return terms.hasPaidReinstatements() ? terms.reinstatementFactor(fullLoss()) / fullLoss() : 0;
+    }
+
     private double varianceOfSum() {
         double m = sums.a / sums.years;
         return sums.aa / sums.years - m * m;
@@ -108,10 +117,17 @@ final class LayerEstimates {
     }
 
     /**
-     * What the control variate cannot correct: years beyond the annual limit are rare, and in a sample without any Y and A go together as if
-     * there were no limit. One such year more or less, by a further full limit, is always within the error.
+     * What a sample cannot show. Without a control variate: of a layer that no year hit, one full loss in all years is within the error. With
+     * one: years beyond the annual limit are rare, and in a sample without any Y and A go together as if there were no limit; one such
+     * year, by a further full limit, is within the error.
+     *
+     * @param slope of the figure on the control variate
+     * @param perLoss what the figure gains from a unit of layer loss in one year
      */
-    private double unseen(double slope) {
+    private double unseen(double slope, double perLoss) {
+        if (!controlled()) {
+            return sums.attached > 0 || perLoss == 0 ? 0 : Math.abs(perLoss) * fullLoss() / sums.years;
+        }
         if (slope == 0 || !terms.hasAnnualTerms()) {
             return 0;
         }
@@ -174,11 +190,11 @@ final class LayerEstimates {
             upfront[k] = part + (timed ? 0 : s.byReinstatementFactor() * terms.reinstatementFactor(y));
         }
         double control = s.byExpectedLoss() * meanSlope;
-        double netError = error(residualVariance(net, control * build.divisor())) + unseen(control * build.divisor());
+        double netError = error(residualVariance(net, control * build.divisor())) + unseen(control * build.divisor(), s.byExpectedLoss() * build.divisor());
         // pro rata as to time the factor is no function of A: its error is added in full, which is never too little
         double upfrontError = timed
                 ? error(residualVariance(upfront, control)) + Math.abs(s.byReinstatementFactor()) * factor.error()
-                : error(residualVariance(upfront, control + s.byReinstatementFactor() * factorSlope)) + unseen(control);
+                : error(residualVariance(upfront, control + s.byReinstatementFactor() * factorSlope)) + unseen(control, s.byExpectedLoss());
         return new PremiumParts(new Figure(build.net(), netError), new Figure(build.upfront(), upfrontError));
     }
 

@@ -113,11 +113,23 @@ public final class TransformEngine {
      * @throws IllegalArgumentException if the layer is one of those that {@link #refusal(int)} names
      */
     public LayerStatistics price(int layer) {
+        require(layer);
+        if (prepared(layer).perils().length == 0) {
+            return UnreachableLayer.statistics(treaty.programme().buyer());
+        }
         return answer(layer).statistics();
     }
 
-    /** The law of the layer's annual loss, for curves and other figures. */
+    /**
+     * The law of the layer's annual loss, for curves and other figures.
+     *
+     * @throws IllegalArgumentException if the layer is one of those that {@link #refusal(int)} names, or no loss can reach it
+     */
     public TransformLaw law(int layer) {
+        require(layer);
+        if (prepared(layer).perils().length == 0) {
+            throw new IllegalArgumentException("no loss can reach layer \"" + treaty.layer(layer).name() + "\"");
+        }
         AnnualSums sums = sums(layer);
         LayerAnswer answer = answer(layer, sums);
         return new TransformLaw(sums, answer.finest(), answer.coarser(), answer.facts(), treaty.layer(layer).terms());
@@ -133,15 +145,22 @@ public final class TransformEngine {
         return answer;
     }
 
-    private AnnualSums sums(int layer) {
+    private void require(int layer) {
         refusal(layer).ifPresent(reason -> {
             throw new IllegalArgumentException("layer \"" + treaty.layer(layer).name() + "\" needs simulation: " + reason);
         });
-        PreparedLayer prepared = shared.layers.computeIfAbsent(layer, j -> PreparedLayer.of(treaty, j, accuracy));
+    }
+
+    private AnnualSums sums(int layer) {
+        PreparedLayer prepared = prepared(layer);
         if (totalsJoined() && prepared.perils().length > 1) {
             return totals(layer, prepared);
         }
         return new CountSums(prepared, nodes(prepared.perils()));
+    }
+
+    private PreparedLayer prepared(int layer) {
+        return shared.layers.computeIfAbsent(layer, j -> PreparedLayer.of(treaty, j, accuracy));
     }
 
     private boolean totalsJoined() {

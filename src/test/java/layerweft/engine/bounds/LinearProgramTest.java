@@ -24,7 +24,7 @@ class LinearProgramTest {
     private static final int ATOMS = 4;
 
     static IntStream seeds() {
-        return IntStream.range(0, 30);
+        return IntStream.range(0, 60);
     }
 
     @ParameterizedTest
@@ -35,14 +35,15 @@ class LinearProgramTest {
         double[][] values = new double[d][];
         double[][] chances = new double[d][];
         Margin[] margins = new Margin[d];
+        double deductible = seed % 5 == 0 ? 0 : random.nextInt(40);
+        AnnualLayer layer = new AnnualLayer(deductible, seed % 3 == 0 ? Double.POSITIVE_INFINITY : 1 + random.nextInt(50));
+        int most = (int) Math.min(40, layer.end() + 1);
         for (int i = 0; i < d; i++) {
-            values[i] = IntStream.range(0, ATOMS).mapToDouble(k -> random.nextInt(40)).distinct().sorted().toArray();
+            values[i] = IntStream.range(0, ATOMS).mapToDouble(k -> random.nextInt(most)).distinct().sorted().toArray();
             chances[i] = IntStream.range(0, values[i].length).mapToDouble(k -> 1 + random.nextInt(9)).toArray();
             double total = Arrays.stream(chances[i]).sum();
             chances[i] = Arrays.stream(chances[i]).map(p -> p / total).toArray();
         }
-        double deductible = seed % 5 == 0 ? 0 : random.nextInt(40);
-        AnnualLayer layer = new AnnualLayer(deductible, seed % 3 == 0 ? Double.POSITIVE_INFINITY : 1 + random.nextInt(50));
         for (int i = 0; i < d; i++) {
             margins[i] = margin(values[i], chances[i]);
         }
@@ -52,6 +53,8 @@ class LinearProgramTest {
         String what = "seed " + seed + ": " + Arrays.deepToString(values) + Arrays.deepToString(chances) + layer + range + " exact " + lowest
                 + " to " + highest;
         double slack = 1e-9 * (1 + highest);
+        assertTrue(new LowerDual(margins, layer).bound() <= lowest + slack, what);
+        assertTrue(new UpperDual(margins, layer).bound() >= highest - slack, what);
         assertTrue(range.lowest() <= lowest + slack && lowest <= range.attainedLow() + slack, what);
         assertTrue(range.attainedHigh() <= highest + slack && highest <= range.highest() + slack, what);
         // slices of a few atoms are coarse; what is found comes near nevertheless

@@ -11,6 +11,7 @@ import java.util.ArrayList;
 import java.util.Arrays;
 import java.util.List;
 import java.util.stream.DoubleStream;
+import java.util.stream.IntStream;
 import org.junit.jupiter.api.DynamicTest;
 import org.junit.jupiter.api.Test;
 import org.junit.jupiter.api.TestFactory;
@@ -86,8 +87,9 @@ class RearrangementTest {
         Rearrangement matrix = new Rearrangement(columns);
         matrix.flatten(0, 5, 20);
         matrix.exchange(new AnnualLayer(5, 4), 1, 1000);
-        for (int[] ranks : matrix.ranks()) {
-            assertArrayEquals(new int[] {0, 1, 2, 3, 4}, Arrays.stream(ranks).sorted().toArray());
+        for (int i = 0; i < columns.length; i++) {
+            int peril = i;
+            assertArrayEquals(new int[] {0, 1, 2, 3, 4}, IntStream.range(0, 5).map(row -> matrix.rank(peril, row)).sorted().toArray());
         }
         assertEquals(Arrays.stream(columns).flatMapToDouble(DoubleStream::of).sum(), Arrays.stream(matrix.rowSums()).sum(), 1e-12);
     }
