@@ -57,9 +57,19 @@ public record Weibull(double shape, double scale) implements SeverityModel {
         return limitedMoment(2, x);
     }
 
+    /** Up to a finite amount by quadrature, without end E[X]·Q(1 + 1/k, (x/λ)^k) − x·P(X &gt; x) from the scale on. */
     @Override
     public double layerMean(double from, double to) {
-        return from < scale || mean() == Double.POSITIVE_INFINITY ? limitedMean(to) - limitedMean(from) : stopLoss(from) - stopLoss(to);
+        double start = Math.max(from, 0);
+        if (to <= start) {
+            return 0;
+        }
+        if (to < Double.POSITIVE_INFINITY) {
+            return start == 0 ? limitedMean(to) : integral(1, start, to);
+        }
+        double mean = mean();
+        return start < scale || mean == Double.POSITIVE_INFINITY ? mean - limitedMean(start)
+                : mean * RegularizedGamma.Q.value(1 + 1 / shape, exponent(start)) - start * survival(start);
     }
 
     @Override
@@ -91,13 +101,13 @@ public record Weibull(double shape, double scale) implements SeverityModel {
             return 0;
         }
         if (moment == Double.POSITIVE_INFINITY) {
-            return LogQuadrature.integral(this::survival, m, 0, x, 1);
+            return integral(m, 0, x);
         }
         double beyond = m == 1 ? x * survival(x) : x * (x * survival(x));
         return moment * RegularizedGamma.P.value(1 + m / shape, exponent(x)) + beyond;
     }
 
-    private double stopLoss(double d) {
-        return d == Double.POSITIVE_INFINITY ? 0 : moment(1) * RegularizedGamma.Q.value(1 + 1 / shape, exponent(d)) - d * survival(d);
+    private double integral(int m, double from, double to) {
+        return LogQuadrature.integral(this::survival, m, from, to, 1 / (3 * shape));
     }
 }

@@ -90,10 +90,10 @@ final class SeverityExamples {
         return kinks(model).filter(x -> model.atom(x) > 0).sorted().distinct().toArray();
     }
 
-    /** Amounts over the whole range of the law, far into both tails and at its kinks, rising. */
+    /** Amounts over the whole range of the law, far into both tails and at its kinks, rising; of those whose squares are numbers. */
     static double[] amounts(SeverityModel model) {
         double[] p = {1e-12, 1e-6, 1e-3, 0.02, 0.1, 0.25, 0.4, 0.5};
         DoubleStream quantiles = DoubleStream.concat(Arrays.stream(p).map(model::quantile), Arrays.stream(p).map(model::survivalQuantile));
-        return DoubleStream.concat(quantiles, kinks(model)).filter(x -> x >= 0 && x < 1e150).sorted().distinct().toArray();
+        return DoubleStream.concat(quantiles, kinks(model)).filter(x -> x == 0 || x > 1e-150 && x < 1e150).sorted().distinct().toArray();
     }
 }
