@@ -55,7 +55,7 @@ final class QuoteCsv {
         }
         buyer.levels().forEach(level -> pair(cells, "valueAtRisk " + FigureText.plain(level)));
         pair(cells, "tailValueAtRisk " + FigureText.plain(buyer.tailLevel()));
-        buyer.returnPeriods().stream().sorted().distinct().forEach(t -> pair(cells, "largest event 1 in " + FigureText.plain(t)));
+        ReturnPeriods.inOrder(buyer).forEach(t -> pair(cells, "largest event 1 in " + FigureText.plain(t)));
         return cells;
     }
 

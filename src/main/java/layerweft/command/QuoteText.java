@@ -9,6 +9,7 @@ import layerweft.figures.Engine;
 import layerweft.figures.Figure;
 import layerweft.figures.LayerFigures;
 import layerweft.figures.PositionStatistics;
+import layerweft.figures.ReturnPeriods;
 import layerweft.model.portfolio.Portfolio;
 import layerweft.model.treaty.Buyer;
 import layerweft.model.treaty.Layer;
@@ -102,7 +103,7 @@ final class QuoteText {
     private void curves() {
         section("Recovered once in … years: the year's total, and from the year's largest event");
         List<String> header = new ArrayList<>(List.of(""));
-        buyer.returnPeriods().forEach(t -> header.addAll(List.of(FigureText.plain(t), "")));
+        ReturnPeriods.inOrder(buyer).forEach(t -> header.addAll(List.of(FigureText.plain(t), "")));
         header.addAll(List.of("tail mean " + FigureText.plainPercent(buyer.tailLevel()), ""));
         TextTable table = new TextTable(header.toArray(String[]::new));
         for (LayerFigures f : quote.layers()) {
@@ -115,7 +116,7 @@ final class QuoteText {
     private void whole() {
         section("The whole programme, losses only");
         List<String> header = new ArrayList<>(List.of("", "mean", "", "std. deviation", ""));
-        buyer.returnPeriods().forEach(t -> header.addAll(List.of("1 in " + FigureText.plain(t), "")));
+        ReturnPeriods.inOrder(buyer).forEach(t -> header.addAll(List.of("1 in " + FigureText.plain(t), "")));
         header.addAll(List.of("tail mean " + FigureText.plainPercent(buyer.tailLevel()), ""));
         TextTable table = new TextTable(header.toArray(String[]::new));
         position(table, "gross", quote.whole().gross());
@@ -127,8 +128,8 @@ final class QuoteText {
     private void position(TextTable table, String side, PositionStatistics p) {
         String[] moments = {FigureText.value(p.mean()), FigureText.error(p.mean()), FigureText.value(p.standardDeviation()),
             FigureText.error(p.standardDeviation())};
-        table.row(cells(side + ", year", layerweft.figures.ReturnPeriods.of(p.valueAtRisk(), buyer), p.tailValueAtRisk(), moments));
-        table.row(cells(side + ", largest event", layerweft.figures.ReturnPeriods.of(p.occurrenceValueAtRisk(), buyer), null, "", "", "", ""));
+        table.row(cells(side + ", year", ReturnPeriods.of(p.valueAtRisk(), buyer), p.tailValueAtRisk(), moments));
+        table.row(cells(side + ", largest event", ReturnPeriods.of(p.occurrenceValueAtRisk(), buyer), null, "", "", "", ""));
     }
 
     private static String[] cells(String name, SortedMap<Double, Figure> curve, Figure tail, String... before) {
