@@ -37,8 +37,7 @@ public record BuyerPosition(
         Figure cost = Figure.exact(0);
         for (LayerFigures layer : layers) {
             Figure premium = layer.premium();
-            double factor = layer.paidUpFactor().value() - 1;
-            Figure ofLayer = new Figure(premium.value() * factor, premium.error() * factor + premium.value() * layer.paidUpFactor().error());
+            Figure ofLayer = reinstatementPremium(premium, layer.paidUpFactor());
             upfront = upfront.plus(premium);
             reinstatement = reinstatement.plus(ofLayer);
             recoveries = recoveries.plus(layer.expectedLoss());
@@ -54,6 +53,15 @@ public record BuyerPosition(
                 : Figure.UNDEFINED;
         return new BuyerPosition(upfront, reinstatement, recoveries, cost, whole.gross().mean().plus(cost),
                 fall(whole.gross().standardDeviation(), whole.net().standardDeviation()), relief, tail, perUnit);
+    }
+
+    /** P·Σ c_k E[u_k]; nothing where there is nothing to reinstate, also where the premium is infinite. */
+    private static Figure reinstatementPremium(Figure premium, Figure paidUpFactor) {
+        double factor = paidUpFactor.value() - 1;
+        if (factor == 0 && premium.infinite()) {
+            return Figure.exact(0);
+        }
+        return new Figure(premium.value() * factor, premium.error() * factor + premium.value() * paidUpFactor.error());
     }
 
     /** Undefined where both are infinite. */
