@@ -36,7 +36,7 @@ class QuoteTableTest {
 
     @Test
     void textIsAlignedAndNarrow() {
-        String text = Run.of("quote", BOOK, COVER, "--years", 20_000).done().out();
+        String text = Run.of("quote", BOOK, COVER, "--years", 5_000).done().out();
         text.lines().forEach(line -> assertTrue(line.length() <= 200, line.length() + ": " + line));
         assertFalse(text.contains("NaN") || text.contains("null") || text.contains("Infinity"), text);
         List<String> lines = text.lines().toList();
@@ -57,7 +57,7 @@ class QuoteTableTest {
     /** Cells of a column end at the same place: the expected loss of each layer ends where its header does. */
     @Test
     void expectedLossesStandUnderTheirHeaderWithTheirErrors() {
-        List<String> lines = Run.of("quote", BOOK, COVER, "--years", 20_000, "--engine", "simulation").done().out().lines().toList();
+        List<String> lines = Run.of("quote", BOOK, COVER, "--years", 5_000, "--engine", "simulation").done().out().lines().toList();
         int header = 0;
         while (!lines.get(header).contains("expected loss")) {
             header++;
@@ -75,7 +75,7 @@ class QuoteTableTest {
     /** Simulated figures of the whole programme and the buyer's carry their error in the same line. */
     @Test
     void everySimulatedRowHasItsError() {
-        List<String> lines = Run.of("quote", BOOK, COVER, "--years", 20_000, "--engine", "simulation").done().out().lines().toList();
+        List<String> lines = Run.of("quote", BOOK, COVER, "--years", 5_000, "--engine", "simulation").done().out().lines().toList();
         for (String row : List.of("gross, year", "ceded, year", "net, year", "gross, largest event", "net, largest event", "expected recoveries",
                 "cost of cover", "expected net position", "relief of standard deviation", "cost per unit of tail relief")) {
             List<String> found = lines.stream().filter(l -> l.startsWith(row)).toList();
@@ -86,7 +86,7 @@ class QuoteTableTest {
 
     @Test
     void csvHasARowPerLayerThenGrossCededAndNet() throws IOException {
-        Run run = Run.of("quote", BOOK, COVER, "--years", 20_000, "--format", "csv").done();
+        Run run = Run.of("quote", BOOK, COVER, "--years", 5_000, "--format", "csv").done();
         List<NamedCsvRecord> records = records(run.out());
         List<String> names = new ArrayList<>(layerweft.file.ProgrammeReader.read(Path.of(COVER)).layers().stream().map(l -> l.name()).toList());
         names.addAll(List.of("gross", "ceded", "net"));
