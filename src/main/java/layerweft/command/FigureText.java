@@ -84,9 +84,13 @@ final class FigureText {
 
     /** Decimal places: to the first digit of the error, but not beyond the fourth significant digit of the value. */
     private static int places(Figure figure) {
-        double size = Math.max(Math.abs(figure.value()), figure.error());
+        boolean known = figure.error() > 0 && figure.error() < Double.POSITIVE_INFINITY;
+        double size = Math.max(Math.abs(figure.value()), known ? figure.error() : 0);
+        if (size == 0) {
+            return 0;
+        }
         int most = SIGNIFICANT - 1 - (int) Math.floor(Math.log10(size));
-        if (!(figure.error() > 0) || figure.error() == Double.POSITIVE_INFINITY) {
+        if (!known) {
             return most;
         }
         double rounded = new BigDecimal(figure.error()).round(new java.math.MathContext(1, RoundingMode.HALF_UP)).doubleValue();

@@ -44,7 +44,7 @@ final class QuoteCsv {
                 "paidUpFactor", "netPremium", "technicalPremium", "technicalRateOnLine", "payback").forEach(csv::pair);
         buyer.levels().forEach(level -> csv.pair("valueAtRisk " + FigureText.plain(level)));
         csv.pair("tailValueAtRisk " + FigureText.plain(buyer.tailLevel()));
-        buyer.returnPeriods().stream().sorted().distinct().forEach(t -> csv.pair("largest event 1 in " + FigureText.plain(t)));
+        ReturnPeriods.inOrder(buyer).forEach(t -> csv.pair("largest event 1 in " + FigureText.plain(t)));
         csv.endOfRow();
     }
 

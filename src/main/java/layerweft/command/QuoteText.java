@@ -103,7 +103,7 @@ final class QuoteText {
     private void curves() {
         section("Recovered once in … years: the year's total, and from the year's largest event");
         List<String> header = new ArrayList<>(List.of(""));
-        buyer.returnPeriods().forEach(t -> header.addAll(List.of(FigureText.plain(t), "")));
+        ReturnPeriods.inOrder(buyer).forEach(t -> header.addAll(List.of(FigureText.plain(t), "")));
         header.addAll(List.of("tail mean " + FigureText.plainPercent(buyer.tailLevel()), ""));
         TextTable table = new TextTable(header.toArray(String[]::new));
         for (LayerFigures f : quote.layers()) {
@@ -116,7 +116,7 @@ final class QuoteText {
     private void whole() {
         section("The whole programme, losses only");
         List<String> header = new ArrayList<>(List.of("", "mean", "", "std. deviation", ""));
-        buyer.returnPeriods().forEach(t -> header.addAll(List.of("1 in " + FigureText.plain(t), "")));
+        ReturnPeriods.inOrder(buyer).forEach(t -> header.addAll(List.of("1 in " + FigureText.plain(t), "")));
         header.addAll(List.of("tail mean " + FigureText.plainPercent(buyer.tailLevel()), ""));
         TextTable table = new TextTable(header.toArray(String[]::new));
         position(table, "gross", quote.whole().gross());

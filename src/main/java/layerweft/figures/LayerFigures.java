@@ -67,9 +67,12 @@ public record LayerFigures(
         return quotedPremium == null ? technicalPremium : Figure.exact(quotedPremium);
     }
 
-    /** Expected reinstatement premium, P·Σ c_k E[u_k]. */
+    /** Expected reinstatement premium, P·Σ c_k E[u_k]; nothing where there is nothing to reinstate, also where the premium is infinite. */
     public Figure reinstatementPremium() {
         double factor = paidUpFactor.value() - 1;
+        if (factor == 0 && premium().infinite()) {
+            return Figure.exact(0);
+        }
         return new Figure(premium().value() * factor, premium().error() * factor + premium().value() * paidUpFactor.error());
     }
 

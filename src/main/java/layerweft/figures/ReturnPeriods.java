@@ -1,5 +1,6 @@
 package layerweft.figures;
 
+import java.util.List;
 import java.util.SortedMap;
 import java.util.TreeMap;
 import layerweft.model.treaty.Buyer;
@@ -8,6 +9,11 @@ import layerweft.model.treaty.Buyer;
 public final class ReturnPeriods {
 
     private ReturnPeriods() {}
+
+    /** The buyer's return periods in years, rising, each once: the order of {@link #of}. */
+    public static List<Double> inOrder(Buyer buyer) {
+        return buyer.returnPeriods().stream().sorted().distinct().toList();
+    }
 
     /** Amounts by the buyer's return periods in years, from amounts by level. */
     public static SortedMap<Double, Figure> of(SortedMap<Double, Figure> byLevel, Buyer buyer) {

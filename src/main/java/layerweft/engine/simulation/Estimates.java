@@ -2,6 +2,7 @@ package layerweft.engine.simulation;
 
 import java.util.ArrayList;
 import java.util.List;
+import java.util.function.Predicate;
 import layerweft.figures.LayerStatistics;
 import layerweft.figures.PositionStatistics;
 import layerweft.figures.WholeStatistics;
@@ -36,8 +37,22 @@ final class Estimates {
     }
 
     private PositionStatistics position(int side, BlockSums sums, Sketches sketches) {
-        return PositionEstimates.of(sums.positions[side], sums.positions[0], gross, side == 0 || (side == 2 && cededIsLimited()),
+        boolean asGross = side == 0 || (side == 2 && cededIsLimited());
+        boolean infiniteMean = asGross ? gross.mean() == Double.POSITIVE_INFINITY
+                : side == 1 && anyUnlimited(moments -> moments.mean() == Double.POSITIVE_INFINITY);
+        boolean infiniteVariance = asGross ? !gross.finiteVariance() : side == 1 && anyUnlimited(moments -> !moments.finiteVariance());
+        return PositionEstimates.of(sums.positions[side], sums.positions[0], gross, infiniteMean, infiniteVariance,
                 sketches.totals[side].law(), sketches.largestEvents[side].law(), treaty.programme().buyer());
+    }
+
+    /** What is ceded is as infinite as the recovery of any layer without an annual limit. */
+    private boolean anyUnlimited(Predicate<OccurrenceMoments> infinite) {
+        for (int j = 0; j < known.length; j++) {
+            if (treaty.layer(j).terms().annualLimit() == Double.POSITIVE_INFINITY && infinite.test(known[j])) {
+                return true;
+            }
+        }
+        return false;
     }
 
     /** With every layer limited, what is kept of an unlimited loss is unlimited. */

@@ -1,5 +1,7 @@
 package layerweft.engine.simulation;
 
+import java.util.ArrayList;
+import java.util.List;
 import layerweft.model.frequency.FrequencyModel;
 import layerweft.model.portfolio.EventLoss;
 import layerweft.model.portfolio.Peril;
@@ -14,7 +16,7 @@ import layerweft.model.treaty.Treaty;
  * What is known exactly of a layer before anything is simulated: E[A] = Σ E[N_i]·E[o_i], the mean of the year's sum of occurrence
  * losses, whatever the dependence; and the expected number of events that hit. E[A] serves as control variate.
  *
- * @param mean E[A] at 100 %, possibly infinite; NaN where not known in closed form (inuring, several sub-perils in one event)
+ * @param mean E[A] at 100 %, possibly infinite; NaN where not known in closed form (inuring, or several sub-perils in one event whose mean is finite)
  * @param finiteVariance whether A is known to have a finite variance
  * @param events expected number of events a year with an occurrence loss above 0; NaN where not known
  */
@@ -43,7 +45,7 @@ record OccurrenceMoments(double mean, boolean finiteVariance, double events) {
             Peril peril = treaty.portfolio().perils().get(i);
             SubPeril part = onlyPart(peril, treaty.cover(layer), i);
             if (part == null) {
-                return UNKNOWN;
+                return severalParts(treaty, layer);
             }
             FrequencyModel n = peril.frequency();
             double eventsOfPart = n.mean() * part.chance();
@@ -53,6 +55,29 @@ record OccurrenceMoments(double mean, boolean finiteVariance, double events) {
                     || part.severity().limitedSecondMoment(Double.POSITIVE_INFINITY) < Double.POSITIVE_INFINITY;
         }
         return new OccurrenceMoments(mean, finiteVariance, events);
+    }
+
+    /** Where an event can bring several covered losses, only whether moments are infinite is known. */
+    private static OccurrenceMoments severalParts(Treaty treaty, int layer) {
+        if (treaty.layer(layer).terms().occurrenceLimit() < Double.POSITIVE_INFINITY) {
+            return UNKNOWN;
+        }
+        List<SeverityModel> covered = new ArrayList<>();
+        for (int i = 0; i < treaty.portfolio().perils().size(); i++) {
+            EventLoss loss = treaty.portfolio().perils().get(i).eventLoss();
+            if (loss instanceof EventLoss.Single single && treaty.cover(layer).covers(i)) {
+                covered.add(single.severity());
+            } else if (loss instanceof EventLoss.Split split) {
+                for (int k = 0; k < split.subPerils().size(); k++) {
+                    if (treaty.cover(layer).covers(i, k)) {
+                        covered.add(split.subPerils().get(k).severity());
+                    }
+                }
+            }
+        }
+        boolean infiniteMean = covered.stream().anyMatch(x -> x.mean() == Double.POSITIVE_INFINITY);
+        boolean infiniteVariance = covered.stream().anyMatch(x -> x.limitedSecondMoment(Double.POSITIVE_INFINITY) == Double.POSITIVE_INFINITY);
+        return new OccurrenceMoments(infiniteMean ? Double.POSITIVE_INFINITY : Double.NaN, !infiniteVariance, Double.NaN);
     }
 
     /** The one part of the peril's event loss that is covered, or null if several are. */

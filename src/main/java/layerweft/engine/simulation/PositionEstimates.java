@@ -14,10 +14,11 @@ final class PositionEstimates {
     /**
      * @param gross sums of the ground-up total
      * @param known its exact moments; control variate where its variance is finite
-     * @param unlimited whether this side's mean and standard deviation are as finite as those of the ground-up total
+     * @param infiniteMean whether this side's mean is known to be infinite
+     * @param infiniteVariance whether its variance is
      */
-    static PositionStatistics of(PositionSums sums, PositionSums gross, GrossMoments known, boolean unlimited, AmountLaw totals,
-            AmountLaw largest, Buyer buyer) {
+    static PositionStatistics of(PositionSums sums, PositionSums gross, GrossMoments known, boolean infiniteMean, boolean infiniteVariance,
+            AmountLaw totals, AmountLaw largest, Buyer buyer) {
         double n = sums.years;
         double mean = sums.x / n;
         double variance = Math.max(0, sums.xx / n - mean * mean);
@@ -25,12 +26,11 @@ final class PositionEstimates {
         double grossVariance = gross.xx / n - grossMean * grossMean;
         double covariance = sums.xGross / n - mean * grossMean;
         double slope = known.finiteVariance() && grossVariance > 0 ? covariance / grossVariance : 0;
-        boolean infiniteMean = unlimited && known.mean() == Double.POSITIVE_INFINITY;
         Figure expected = infiniteMean ? Figure.INFINITE : new Figure(mean - (slope == 0 ? 0 : slope * (grossMean - known.mean())),
                 Math.sqrt(Math.max(0, variance - slope * covariance) / n));
         double sd = Math.sqrt(variance);
         double fourth = totals.mean(a -> Math.pow(a - mean, 4));
-        Figure deviation = unlimited && !known.finiteVariance() ? Figure.INFINITE : new Figure(sd, sd == 0 ? 0 : Math.sqrt(Math.max(0, fourth - variance * variance) / n) / (2 * sd));
+        Figure deviation = infiniteVariance ? Figure.INFINITE : new Figure(sd, sd == 0 ? 0 : Math.sqrt(Math.max(0, fourth - variance * variance) / n) / (2 * sd));
         SortedMap<Double, Figure> atRisk = new TreeMap<>();
         SortedMap<Double, Figure> occurrence = new TreeMap<>();
         for (double level : buyer.levels()) {

@@ -20,33 +20,33 @@ import layerweft.model.treaty.Programme;
 import layerweft.model.treaty.Treaty;
 
 /** Small treaties for tests. */
-final class Models {
+public final class Models {
 
     private Models() {
     }
 
-    static Peril peril(String name, FrequencyModel frequency, SeverityModel severity) {
+    public static Peril peril(String name, FrequencyModel frequency, SeverityModel severity) {
         return new Peril(name, frequency, new EventLoss.Single(severity));
     }
 
-    static Treaty treaty(List<Peril> perils, Dependence dependence, Layer... layers) {
+    public static Treaty treaty(List<Peril> perils, Dependence dependence, Layer... layers) {
         return new Treaty(new Portfolio("test", "EUR", "million", perils, dependence), new Programme("test", List.of(layers), Pricing.PLAIN, Buyer.USUAL));
     }
 
-    static Treaty counts(List<Peril> perils, Copula copula, Layer... layers) {
+    public static Treaty counts(List<Peril> perils, Copula copula, Layer... layers) {
         return treaty(perils, new Dependence(Dependence.Links.COUNTS, copula), layers);
     }
 
-    static Treaty single(FrequencyModel frequency, SeverityModel severity, Layer... layers) {
+    public static Treaty single(FrequencyModel frequency, SeverityModel severity, Layer... layers) {
         return counts(List.of(peril("only", frequency, severity)), new Independence(), layers);
     }
 
     /** Stop loss: limit in excess of deductible for the year, no occurrence terms. */
-    static Layer stopLoss(double limit, double deductible) {
+    public static Layer stopLoss(double limit, double deductible) {
         return Layer.of("stop " + limit + " xs " + deductible, OccurrenceTerms.NONE, new AnnualTerms(deductible, limit));
     }
 
-    static DiscreteLosses losses(double[] amounts, double[] probabilities) {
+    public static DiscreteLosses losses(double[] amounts, double[] probabilities) {
         List<Double> a = new ArrayList<>();
         List<Double> p = new ArrayList<>();
         for (int k = 0; k < amounts.length; k++) {
