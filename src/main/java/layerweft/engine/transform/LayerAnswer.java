@@ -22,6 +22,8 @@ final class LayerAnswer {
     private static final double QUANTILES = 1000;
     private static final int CHEAP_CELLS = 4096;
     private static final double RARELY_FULL = 3e-6;
+    /** Width wanted of the guaranteed range, as a part of the limit. */
+    private static final double NARROW = 5e-5;
     private final AnnualSums sums;
     private final LayerTerms terms;
     private final Programme programme;
@@ -67,7 +69,7 @@ final class LayerAnswer {
             }
         }
         compute();
-        while (!good() && 2L * sums.cells(start + 2) <= accuracy.mostCells()) {
+        while (!good() && 2L * sums.longest(start + 2) <= accuracy.mostCells()) {
             start++;
             levels[0] = levels[1];
             levels[1] = levels[2];
@@ -116,10 +118,11 @@ final class LayerAnswer {
         means = new Figure[rows[0].length];
         latticeError = new double[means.length];
         double floor = floor() * sums.weightOfErrors();
+        double unlimited = Double.isInfinite(terms.annualLimit()) ? sums.meanError() : 0;
         for (int f = 0; f < means.length; f++) {
             Figure figure = Extrapolation.of(rows[0][f], rows[1][f], rows[2][f]);
             latticeError[f] = figure.error();
-            means[f] = new Figure(figure.value(), figure.error() + (f == 0 ? floor : Math.max(floor, floor() * (sums.end() - terms.deductible()))));
+            means[f] = new Figure(figure.value(), figure.error() + (f == 0 ? floor + unlimited : Math.max(floor, floor() * (sums.end() - terms.deductible()))));
         }
         points = points();
     }
@@ -156,7 +159,7 @@ final class LayerAnswer {
             occurrence.put(asked.get(k), Double.isNaN(largest) ? Figure.UNDEFINED : new Figure(largest, 1e-12 * largest));
         }
         Figure mean = positive(means[0]);
-        Bracket bracket = Double.isInfinite(mean.value()) ? null : sums.bracket(start + 2, levels[2]);
+        Bracket bracket = Double.isInfinite(mean.value()) ? null : bracket();
         PremiumBuildUp premium = PremiumBuildUp.of(programme.pricing(), new PremiumBuildUp.Inputs(mean.value(), means[1].value(),
                 means[4].value(), means[3].value(), means[2].value()));
         double premiumError = error(premium.slopes());
@@ -164,6 +167,24 @@ final class LayerAnswer {
                 probability(points[1]), Figure.exact(facts.expectedEvents()), positive(means[2]),
                 new Figure(premium.net(), netError(premium, premiumError)), new Figure(premium.upfront(), premiumError), valueAtRisk,
                 positive(means[5]), occurrence);
+    }
+
+    /** On finer lattices than the figures need, until the range is narrow; a range of second order shrinks to a quarter each time. */
+    private Bracket bracket() {
+        int level = start + 2;
+        Bracket bracket = sums.bracket(level);
+        long most = Math.min(accuracy.mostCells(), sums.mostBracketCells());
+        while (bracket.high() - bracket.low() > NARROW * scale() && 2L * sums.longest(level) <= most) {
+            double excess = (bracket.high() - bracket.low()) / (NARROW * scale());
+            int more = (int) Math.max(1, Math.ceil(0.5 * Math.log(excess) / Math.log(2)));
+            while (more > 1 && (long) sums.longest(level) << more > most) {
+                more--;
+            }
+            level += more;
+            Bracket finer = sums.bracket(level);
+            bracket = new Bracket(Math.max(bracket.low(), finer.low()), Math.min(bracket.high(), finer.high()));
+        }
+        return bracket;
     }
 
     private double error(PremiumBuildUp.Slopes slopes) {

@@ -2,7 +2,9 @@ package layerweft.engine.transform;
 
 import java.util.ArrayList;
 import java.util.Arrays;
+import java.util.HashMap;
 import java.util.List;
+import java.util.Map;
 import java.util.stream.DoubleStream;
 
 /**
@@ -19,7 +21,7 @@ final class LayerLattice {
     private final double end;
     private final double firstStep;
     private final List<Level> levels = new ArrayList<>();
-    private final List<Level> lower = new ArrayList<>();
+    private final Map<Integer, Ordered> ordered = new HashMap<>();
     private Level atoms;
     private double reach = 1.6;
 
@@ -27,9 +29,12 @@ final class LayerLattice {
      * One lattice with the transforms on it.
      *
      * @param wanted cells of the annual sum
-     * @param lost by peril: what a law fused to the lattice lacks of the mean, or the chance that an event's loss is no atom; else null
+     * @param lost by peril, on the atoms' lattice, the chance that an event's loss is no atom; else null
      */
     record Level(double step, int wanted, Spectrum spectrum, double[][][] deficits, double[] lost) {}
+
+    /** Event laws above and below the true ones, by peril, and their transforms. */
+    private record Ordered(OrderedLaws[] laws, Level upper, Level lower) {}
 
     /**
      * @param events of the perils that can reach the layer, in their order
@@ -69,12 +74,18 @@ final class LayerLattice {
         return LatticeStep.cells(end, step(level));
     }
 
+    /** Cells of the longest lattice that a level needs: of the annual sum, or of a subject loss from the ground up. */
+    int longest(int level) {
+        double reach = events.stream().mapToDouble(EventLaw::reach).max().orElse(0);
+        return LatticeStep.cells(Math.max(end, reach), step(level));
+    }
+
     /** Asks for longer transforms with less tilt: the digits of rare sums far up the lattice need them. */
     void reachFurther() {
         if (reach < 4) {
             reach = 4;
             levels.clear();
-            lower.clear();
+            ordered.clear();
         }
     }
 
@@ -96,46 +107,38 @@ final class LayerLattice {
         return new LatticeSum(at.step, mean, atoms().step, atomSurvival, wrapped + rounding);
     }
 
-    /** Cell averages of P(A' &gt; y) for the law of A from event laws below the true ones in increasing convex order. */
-    double[] lowerSum(LatentNodes nodes, int level) {
-        return survival(nodes, lower(level));
-    }
-
-    /** The same for event laws rounded down and up. */
-    double[][] roundedSums(LatentNodes nodes, int level) {
-        double[][] sums = new double[2][];
-        for (int side = 0; side < 2; side++) {
-            int s = side;
-            sums[side] = survival(nodes, make(step(level), e -> e.roundedSurvival(step(level), LatticeStep.cells(cap, step(level)))[s], level));
-        }
-        return sums;
-    }
-
-    /** E[A] less the mean of the sum behind {@link #lowerSum}, for events capped at the cap. */
-    double lostMean(int level, double[] meanCounts) {
-        double lost = 0;
+    /**
+     * Sums of event laws above and below the true ones in their stop-loss transforms.
+     *
+     * @param spread the sum of this level
+     * @param meanCounts E[N_i] of the perils
+     */
+    StopLossRange range(LatentNodes nodes, int level, LatticeSum spread, double[] meanCounts) {
+        Ordered at = ordered.computeIfAbsent(level, this::ordered);
+        double[] upper = at.upper == level(level) ? spread.mean() : survival(nodes, at.upper);
+        double[] totals = new double[9];
         for (int i = 0; i < meanCounts.length; i++) {
-            lost += meanCounts[i] * lower(level).lost[i];
+            double[] each = at.laws[i].amounts();
+            for (int k = 0; k < totals.length; k++) {
+                totals[k] += meanCounts[i] * each[k];
+            }
         }
-        return lost;
+        return StopLossRange.of(step(level), upper, survival(nodes, at.lower), totals);
     }
 
-    private Level lower(int level) {
-        while (lower.size() <= level) {
-            lower.add(null);
+    private Ordered ordered(int level) {
+        double step = step(level);
+        int cells = LatticeStep.cells(cap, step);
+        OrderedLaws[] laws = events.stream().map(e -> e.ordered(step, cells)).toArray(OrderedLaws[]::new);
+        boolean spread = true;
+        double[][] upper = new double[laws.length][];
+        double[][] lower = new double[laws.length][];
+        for (int i = 0; i < laws.length; i++) {
+            upper[i] = laws[i].upper();
+            lower[i] = laws[i].lower();
+            spread &= Arrays.equals(upper[i], events.get(i).cellSurvival(step, cells));
         }
-        if (lower.get(level) == null) {
-            double step = step(level);
-            int cells = LatticeStep.cells(cap, step);
-            double[] lost = new double[events.size()];
-            for (int i = 0; i < lost.length; i++) {
-                double whole = Arrays.stream(events.get(i).cellSurvival(step, cells)).sum();
-                lost[i] = Math.max(0, step * (whole - Arrays.stream(events.get(i).lowerSurvival(step, cells)).sum()));
-            }
-            Level made = make(step, e -> e.lowerSurvival(step, cells), level);
-            lower.set(level, new Level(step, made.wanted, made.spectrum, made.deficits, lost));
-        }
-        return lower.get(level);
+        return new Ordered(laws, spread ? level(level) : make(upper, level), make(lower, level));
     }
 
     private double[] survival(LatentNodes nodes, Level at) {
@@ -155,22 +158,20 @@ final class LayerLattice {
         if (levels.get(level) == null) {
             double step = step(level);
             int cells = LatticeStep.cells(cap, step);
-            levels.set(level, make(step, e -> e.cellSurvival(step, cells), level));
+            levels.set(level, make(events.stream().map(e -> e.cellSurvival(step, cells)).toArray(double[][]::new), level));
         }
         return levels.get(level);
     }
 
-    private Level make(double step, java.util.function.Function<EventLaw, double[]> law, int level) {
+    private Level make(double[][] laws, int level) {
         int last = cells(level);
         int wanted = last + MARGIN;
         int length = Spectrum.goodLength((int) Math.ceil(reach * wanted));
         double tilt = reachesFar() ? 14.0 / length : 36.0 / (length + wanted);
         Spectrum spectrum = new Spectrum(length, tilt);
-        double[][][] deficits = new double[events.size()][][];
-        for (int i = 0; i < deficits.length; i++) {
-            deficits[i] = spectrum.deficit(law.apply(events.get(i)));
-        }
-        return new Level(step, wanted, spectrum, deficits, null);
+        double[][][] deficits = new double[laws.length][][];
+        Arrays.setAll(deficits, i -> spectrum.deficit(laws[i]));
+        return new Level(step(level), wanted, spectrum, deficits, null);
     }
 
     /**
