@@ -20,6 +20,8 @@ final class LayerAnswer {
     private static final double OWN_SIZE = 30;
     /** Values at risk may have errors so many times the accuracy, of themselves. */
     private static final double QUANTILES = 1000;
+    /** Where {@link LevelFigures#means} has the distortion's integral. */
+    private static final int DISTORTED = 3;
     private static final int CHEAP_CELLS = 4096;
     private static final double RARELY_FULL = 3e-6;
     /** Width wanted of the guaranteed range, as a part of the limit. */
@@ -122,7 +124,8 @@ final class LayerAnswer {
         for (int f = 0; f < means.length; f++) {
             Figure figure = Extrapolation.of(rows[0][f], rows[1][f], rows[2][f]);
             latticeError[f] = figure.error();
-            means[f] = new Figure(figure.value(), figure.error() + (f == 0 ? floor + unlimited : Math.max(floor, floor() * (sums.end() - terms.deductible()))));
+            double beyond = f == DISTORTED && !Double.isNaN(figure.value()) ? figures(levels[2]).distortedBeyondEnd(loading) : 0;
+            means[f] = new Figure(figure.value(), figure.error() + beyond + (f == 0 ? floor + unlimited : Math.max(floor, floor() * (sums.end() - terms.deductible()))));
         }
         points = points();
     }
@@ -138,14 +141,29 @@ final class LayerAnswer {
 
     /** Point values of the two finest lattices, each corrected by the one below it. */
     private Figure[] points() {
-        double[] fine = figures(levels[2].corrected(levels[1])).points(programme.buyer().levels());
-        double[] coarse = figures(levels[1].corrected(levels[0])).points(programme.buyer().levels());
+        List<Double> asked = programme.buyer().levels();
+        LevelFigures finer = figures(levels[2].corrected(levels[1]));
+        LevelFigures coarser = figures(levels[1].corrected(levels[0]));
+        double[] fine = finer.points(asked);
+        double[] coarse = coarser.points(asked);
         Figure[] points = new Figure[fine.length];
         double probability = floor();
         for (int f = 0; f < fine.length; f++) {
-            points[f] = new Figure(fine[f], Math.abs(fine[f] - coarse[f]) + (f < 2 ? probability : 1e-6 * levels[2].step()));
+            boolean exact = f >= 2 && fine[f] == coarse[f] && surelyOnAtom(finer, coarser, fine[f], 1 - asked.get(f - 2));
+            points[f] = exact ? Figure.exact(fine[f])
+                    : new Figure(fine[f], Math.abs(fine[f] - coarse[f]) + (f < 2 ? probability : 1e-6 * levels[2].step()));
         }
         return points;
+    }
+
+    /** Whether P(Y &gt; y) is below the tail and P(Y ≥ y) above it, by more than their errors: then y is the quantile and nothing else is. */
+    private boolean surelyOnAtom(LevelFigures finer, LevelFigures coarser, double y, double tail) {
+        boolean most = y >= terms.annualLimit();
+        double above = most ? 0 : finer.survival(y);
+        double reaches = above + finer.atom(y);
+        double error = floor() + 1e-12 + (most ? 0 : Math.abs(above - coarser.survival(y)));
+        double atomError = Math.abs(finer.atom(y) - coarser.atom(y));
+        return tail - above > error && reaches - tail > error + atomError && finer.atom(y) > 0;
     }
 
     LayerStatistics statistics() {

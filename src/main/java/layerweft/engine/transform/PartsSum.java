@@ -8,7 +8,11 @@ import java.util.function.IntFunction;
 import layerweft.model.copula.Copula;
 import layerweft.model.portfolio.EventLoss;
 import layerweft.model.portfolio.SubPeril;
+import layerweft.model.severity.Capped;
+import layerweft.model.severity.DiscreteLosses;
+import layerweft.model.severity.Mixture;
 import layerweft.model.severity.SeverityModel;
+import layerweft.model.severity.Spliced;
 
 /**
  * The subject loss s = q ΣX_m of an event that several covered sub-perils bring, each with its own chance, the sizes of those that occur
@@ -110,6 +114,29 @@ final class PartsSum {
             Arrays.setAll(survival, k -> severity(m).survival(k * step / quotaShare * (1 + SLACK)));
             return survival;
         }, cells);
+    }
+
+    /** Whether a severity has losses of positive probability other than a cap: lattices off these amounts would smear them. */
+    static boolean hasAtoms(SeverityModel severity) {
+        if (severity instanceof Capped capped) {
+            return hasAtoms(capped.model());
+        }
+        if (severity instanceof Mixture mixture) {
+            return mixture.components().stream().anyMatch(PartsSum::hasAtoms);
+        }
+        return severity instanceof DiscreteLosses || severity instanceof Spliced spliced && (hasAtoms(spliced.body()) || hasAtoms(spliced.tail()));
+    }
+
+    /** Averages over cells from {@code start} on of a function that is constant on the lattice's own cells. */
+    static double[] layered(double[] survival, double start, double step, int cells) {
+        int shift = (int) Math.floor(start / step + 1e-7);
+        double part = Math.max(0, start / step - shift);
+        part = part < 1e-7 ? 0 : part;
+        double[] mean = new double[cells];
+        for (int k = 0; k < cells; k++) {
+            mean[k] = (1 - part) * survival[shift + k] + part * survival[shift + k + 1];
+        }
+        return mean;
     }
 
     private SeverityModel severity(int m) {

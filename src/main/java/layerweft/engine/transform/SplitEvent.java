@@ -12,8 +12,6 @@ import layerweft.model.treaty.LayerTerms;
  */
 final class SplitEvent implements EventLaw {
     private static final int REFERENCE_CELLS = 1024;
-    /** What quadrature and merged nodes may do to a probability of the sum, with much to spare. */
-    private static final double SAFE_ERROR = 100 * PartsSum.JOINT_ERROR;
     private final PartsSum sum;
     private final LayerTerms terms;
     private final double cap;
@@ -160,7 +158,7 @@ final class SplitEvent implements EventLaw {
 
     @Override
     public double[] cellSurvival(double step, int cells) {
-        double[] mean = layered(sum.spread(step, cellsToTop(step)), step, cells);
+        double[] mean = PartsSum.layered(sum.spread(step, LatticeStep.cells(top(), step) + 3), retained(), step, cells);
         for (int k = 0; k < cells; k++) {
             if (terms.hasFranchise()) {
                 double below = Math.min(1, Math.max(0, terms.franchise() / step - k));
@@ -175,118 +173,14 @@ final class SplitEvent implements EventLaw {
         return terms.hasFranchise() ? 0 : terms.retention();
     }
 
-    /** Cells of the subject loss up to the end of the layer, and some. */
-    private int cellsToTop(double step) {
-        return LatticeStep.cells(top(), step) + 3;
-    }
-
-    /** Averages over the layer's cells, which start at the retention, of a function that is constant on the lattice's cells. */
-    private double[] layered(double[] survival, double step, int cells) {
-        int shift = (int) Math.floor(retained() / step + 1e-7);
-        double part = Math.max(0, retained() / step - shift);
-        part = part < 1e-7 ? 0 : part;
-        double[] mean = new double[cells];
-        for (int k = 0; k < cells; k++) {
-            mean[k] = (1 - part) * survival[shift + k] + part * survival[shift + k + 1];
-        }
-        return mean;
-    }
-
     @Override
     public boolean secondOrder() {
-        return sum.ordered() && !terms.hasFranchise();
+        return new SplitBounds(sum, terms, cap).secondOrder();
     }
 
-    /**
-     * Where the sub-peril copula keeps convex order, from the sums s' and s'' of spread and of fused parts: E[(s'' − y)+] ≤ E[(s − y)+] ≤
-     * E[(s' − y)+], and o = min((s − R)+, L) has E[(o − y)+] = E[(s − R − y)+] − E[(s − R − L)+], so that the gap at R + L is the slack. Else,
-     * and with a franchise, parts are rounded and the gap is of first order. Proven but for the quadrature over the copula's factor, for
-     * whose error there is room.
-     */
     @Override
     public OrderedLaws ordered(double step, int cells) {
-        boolean convex = secondOrder();
-        Below below = new Below(step, cellsToTop(step), convex);
-        double[] upper = convex ? layered(below.upper, step, cells) : roundedUp(below.upper, step, cells);
-        double[] lower = convex ? fusedLayer(below.lower, step, cells) : roundedDown(below.lower, step, cells);
-        double margin = SAFE_ERROR * cap;
-        double low = convex ? below.least(top()) - below.most(retained()) : OrderedLaws.limited(lower, step, cap) - margin;
-        double high = convex ? below.most(top()) - below.least(retained()) : OrderedLaws.limited(upper, step, cap) + margin;
-        double slack = convex ? below.most(top()) - below.least(top()) : margin;
-        if (terms.occurrenceLimit() < Double.POSITIVE_INFINITY) {
-            return new OrderedLaws(step, upper, lower, slack, Math.max(0, low), high, 0, 0, Math.max(0, low), high);
-        }
-        double all = sum.mean();
-        double allLow = all;
-        double allHigh = all;
-        if (start() > 0) {
-            // only what lies below the layer matters: a lattice of its own
-            Below retention = new Below(start() / (4 * REFERENCE_CELLS), 4 * REFERENCE_CELLS + 3, convex);
-            double jump = terms.hasFranchise() ? start() : 0;
-            allLow = all - retention.most(start()) + jump * retention.lower[4 * REFERENCE_CELLS];
-            allHigh = all - retention.least(start()) + jump * retention.upper[4 * REFERENCE_CELLS];
-        }
-        return new OrderedLaws(step, upper, lower, slack, Math.max(0, low), high, Math.max(0, all - below.most(top())), all - below.least(top()),
-                Math.max(0, allLow), allHigh);
-    }
-
-    /** Bounds of E[min(s, y)] on a lattice. */
-    private final class Below {
-        private final double step;
-        private final double[] upper;
-        private final double[] lower;
-        private final boolean convex;
-        private final double lost;
-
-        Below(double step, int cells, boolean convex) {
-            this.step = step;
-            this.convex = convex;
-            this.upper = convex ? sum.spread(step, cells) : sum.roundedUp(step, cells);
-            this.lower = convex ? sum.fused(step, cells) : sum.roundedDown(step, cells);
-            this.lost = convex ? Math.max(0, sum.limitedParts(cells * step) - sum.fusedMean(step, cells)) : 0;
-        }
-
-        double least(double y) {
-            return OrderedLaws.limited(convex ? upper : lower, step, y) - SAFE_ERROR * y;
-        }
-
-        double most(double y) {
-            return OrderedLaws.limited(convex ? lower : upper, step, y) + lost + SAFE_ERROR * y;
-        }
-    }
-
-    /** The law of the layer's part of a loss on the lattice, fused where the retention is not on it. */
-    private double[] fusedLayer(double[] fused, double step, int cells) {
-        double[] mean = layered(fused, step, cells);
-        int shift = (int) Math.floor(retained() / step + 1e-7);
-        if (retained() / step - shift < 1e-7) {
-            return mean;
-        }
-        double[] passes = new double[cells];
-        System.arraycopy(fused, shift + 1, passes, 0, cells);
-        return FusedLaw.survival(fused[shift], mean, passes, passes);
-    }
-
-    /** P(o' ≥ (k+1)h): o' ≥ (k+1)h where s' ≥ (k+1)h + R; with a franchise where s' ≥ (k+1)h and s' &gt; F. */
-    private double[] roundedDown(double[] down, double step, int cells) {
-        int shift = (int) Math.floor(start() / step + 1e-7);
-        boolean even = LatticeStep.holds(start(), step);
-        double[] law = new double[cells];
-        for (int k = 0; k < cells; k++) {
-            int at = terms.hasFranchise() ? Math.max(k, even ? shift : shift + 1) : even ? shift + k : shift + k + 1;
-            law[k] = down[at];
-        }
-        return law;
-    }
-
-    /** P(o' &gt; kh): s' &gt; kh + R; with a franchise s' &gt; kh and s' &gt; F. */
-    private double[] roundedUp(double[] up, double step, int cells) {
-        int shift = (int) Math.floor(start() / step + 1e-7);
-        double[] law = new double[cells];
-        for (int k = 0; k < cells; k++) {
-            law[k] = up[terms.hasFranchise() ? Math.max(k, shift) : shift + k];
-        }
-        return law;
+        return new SplitBounds(sum, terms, cap).ordered(step, cells);
     }
 
     @Override

@@ -98,6 +98,11 @@ public final class TransformEngine {
                 if (members.length > 3) {
                     return Optional.of("it covers " + members.length + " sub-perils of " + peril.name() + ", and the transform takes at most 3");
                 }
+                for (int k : members) {
+                    if (members.length > 1 && PartsSum.hasAtoms(split.subPerils().get(k).severity())) {
+                        return Optional.of("the losses of sub-peril " + peril.name() + "/" + split.subPerils().get(k).name() + " are discrete");
+                    }
+                }
                 Optional<String> reason = DependentSum.refusal(split.copula(), members);
                 if (reason.isPresent()) {
                     return reason;
