@@ -53,6 +53,11 @@ final class LayerAnswer {
         return start;
     }
 
+    /** Whether a limited layer with an annual deductible is attached with less than this chance. */
+    boolean reachedRarely(double chance) {
+        return terms.deductible() > 0 && terms.annualLimit() < Double.POSITIVE_INFINITY && points[0].value() < chance;
+    }
+
     LatticeSum finest() {
         return levels[2];
     }

@@ -23,6 +23,7 @@ final class LayerLattice {
     private final List<Level> levels = new ArrayList<>();
     private final Map<Integer, Ordered> ordered = new HashMap<>();
     private Level atoms;
+    private final double upward;
     private double reach = 1.6;
 
     /**
@@ -46,11 +47,13 @@ final class LayerLattice {
         this.cap = cap;
         this.end = end;
         double[] landmarks = events.stream().flatMapToDouble(e -> DoubleStream.of(e.landmarks())).distinct().toArray();
+        this.upward = 0;
         this.firstStep = LatticeStep.of(cap, terms, landmarks, end, FIRST_CELLS);
     }
 
-    private LayerLattice(LayerLattice whole, EventLaw event) {
-        this.events = List.of(event);
+    private LayerLattice(LayerLattice whole, List<EventLaw> events, double upward) {
+        this.events = events;
+        this.upward = upward;
         this.cap = whole.cap;
         this.end = whole.end;
         this.firstStep = whole.firstStep;
@@ -58,7 +61,28 @@ final class LayerLattice {
 
     /** The same lattice for the sum of one peril's events alone. */
     LayerLattice of(EventLaw event) {
-        return new LayerLattice(this, event);
+        return new LayerLattice(this, List.of(event), 0);
+    }
+
+    /** The same lattice with transforms tilted so that sums far up are weighted by e^(rate·A) and keep their digits. */
+    LayerLattice upward(double rate) {
+        LayerLattice tilted = new LayerLattice(this, events, rate);
+        tilted.reach = 4;
+        return tilted;
+    }
+
+    /** E[e^(rate·A)] for the capped losses on the coarsest lattice. */
+    double exponentialMoment(LatentNodes nodes, double rate) {
+        double step = step(0);
+        int cells = LatticeStep.cells(cap, step);
+        double[] deficits = new double[events.size()];
+        for (int i = 0; i < deficits.length; i++) {
+            double[] survival = events.get(i).cellSurvival(step, cells);
+            for (int k = 0; k < cells; k++) {
+                deficits[i] -= Math.expm1(rate * step) * survival[k] * Math.exp(rate * step * k);
+            }
+        }
+        return 1 - JointDeficit.at(nodes, deficits);
     }
 
     double end() {
@@ -142,13 +166,17 @@ final class LayerLattice {
     }
 
     private double[] survival(LatentNodes nodes, Level at) {
-        double[][] deficit = JointDeficit.of(nodes, at.deficits);
+        double[][] deficit = deficit(nodes, at);
         double[] mean = at.spectrum.survival(deficit[0], deficit[1], at.wanted);
         // rounding may not make a probability negative or rise
         for (int k = mean.length - 1; k >= 0; k--) {
             mean[k] = Math.min(1, Math.max(mean[k], 0));
         }
         return mean;
+    }
+
+    private double[][] deficit(LatentNodes nodes, Level at) {
+        return upward > 0 ? JointDeficit.of(nodes, at.deficits, 0) : JointDeficit.of(nodes, at.deficits);
     }
 
     private Level level(int level) {
@@ -167,7 +195,7 @@ final class LayerLattice {
         int last = cells(level);
         int wanted = last + MARGIN;
         int length = Spectrum.goodLength((int) Math.ceil(reach * wanted));
-        double tilt = reachesFar() ? 14.0 / length : 36.0 / (length + wanted);
+        double tilt = upward > 0 ? -upward * step(level) : reachesFar() ? 14.0 / length : 36.0 / (length + wanted);
         Spectrum spectrum = new Spectrum(length, tilt);
         double[][][] deficits = new double[laws.length][][];
         Arrays.setAll(deficits, i -> spectrum.deficit(laws[i]));
@@ -191,8 +219,8 @@ final class LayerLattice {
             }
             int places = cells / stride;
             int wanted = (int) Math.ceil(end / (stride * step)) + 2;
-            int length = Spectrum.goodLength(Math.max(8, 2 * wanted));
-            Spectrum spectrum = new Spectrum(length, 30.0 / length);
+            int length = Spectrum.goodLength(Math.max(8, (upward > 0 ? 4 : 2) * wanted));
+            Spectrum spectrum = new Spectrum(length, upward > 0 ? -upward * stride * step : 30.0 / length);
             double[][][] deficits = new double[events.size()][][];
             double[] never = new double[events.size()];
             for (int i = 0; i < deficits.length; i++) {
@@ -231,7 +259,7 @@ final class LayerLattice {
     /** P(A &gt; k·(step of the atoms), A an atom), k = 0, 1, … */
     double[] atomSurvival(LatentNodes nodes) {
         Level at = atoms();
-        double[][] deficit = JointDeficit.of(nodes, at.deficits);
+        double[][] deficit = deficit(nodes, at);
         // a year with any loss that is no atom is no atom: U at infinity, taken off before the inverse transform
         double constant = JointDeficit.at(nodes, at.lost);
         for (int j = 0; j < deficit[0].length; j++) {

@@ -16,7 +16,7 @@ import layerweft.model.treaty.LayerTerms;
 final class TotalSums implements AnnualSums {
     private static final double JOINT_ERROR = 2e-9;
     /** For Student copulas, whose quadrature runs over two variables. */
-    private static final double STUDENT_ERROR = 2e-8;
+    private static final double STUDENT_ERROR = 5e-9;
     /** Factor on the error of the quadrature in a guaranteed range: merged nodes are within it too. */
     private static final double SAFETY = 100;
     private final PreparedLayer layer;
