@@ -18,7 +18,8 @@ import java.util.SortedMap;
  * @param technicalPremium the upfront premium P
  * @param valueAtRisk by level, for the buyer's levels
  * @param tailValueAtRisk at the buyer's tail level
- * @param occurrenceValueAtRisk the largest recovery from one event in the year, by level; the same levels as {@code valueAtRisk}
+ * @param occurrenceValueAtRisk the largest recovery from one event in the year, by level; the same levels as {@code valueAtRisk};
+ *     undefined where the engine cannot know them
  */
 public record LayerStatistics(
         Engine engine,
@@ -33,4 +34,11 @@ public record LayerStatistics(
         Figure technicalPremium,
         SortedMap<Double, Figure> valueAtRisk,
         Figure tailValueAtRisk,
-        SortedMap<Double, Figure> occurrenceValueAtRisk) {}
+        SortedMap<Double, Figure> occurrenceValueAtRisk) {
+
+    /** The same with another law of the year's largest recovery. */
+    public LayerStatistics withOccurrence(SortedMap<Double, Figure> other) {
+        return new LayerStatistics(engine, expectedLoss, bracket, standardDeviation, attachmentProbability, exhaustionProbability, expectedEvents,
+                reinstatementFactor, netPremium, technicalPremium, valueAtRisk, tailValueAtRisk, other);
+    }
+}

@@ -10,6 +10,7 @@ import layerweft.engine.simulation.SimulationSettings;
 import layerweft.engine.transform.Accuracy;
 import layerweft.engine.transform.TransformEngine;
 import layerweft.figures.BuyerPosition;
+import layerweft.figures.Figure;
 import layerweft.figures.LayerFigures;
 import layerweft.figures.LayerStatistics;
 import layerweft.figures.WholeStatistics;
@@ -52,12 +53,22 @@ public record Quote(
         List<LayerFigures> layers = new ArrayList<>();
         List<List<String>> notes = new ArrayList<>();
         for (int j = 0; j < treaty.layers(); j++) {
-            LayerStatistics statistics = priced.get(j) == null ? simulated.layers().get(j) : priced.get(j);
+            LayerStatistics simulation = simulated.layers().get(j);
+            LayerStatistics statistics = priced.get(j) == null ? simulation : largestEventKnown(priced.get(j), simulation);
             layers.add(LayerFigures.of(treaty.layer(j), treaty.programme().buyer(), statistics));
             notes.add(LayerNotes.of(treaty, j, refusals.get(j)));
         }
         WholeStatistics whole = simulated.whole().withCeded(layers);
         return new Quote(treaty, settings, layers, notes, whole, BuyerPosition.of(layers, whole));
+    }
+
+    /**
+     * Where annual totals are joined, a copula of totals says nothing of a year's largest event, and the transform leaves it undefined;
+     * the simulation, which rearranges whole years, has it.
+     */
+    private static LayerStatistics largestEventKnown(LayerStatistics priced, LayerStatistics simulated) {
+        boolean known = priced.occurrenceValueAtRisk().values().stream().allMatch(Figure::defined);
+        return known ? priced : priced.withOccurrence(simulated.occurrenceValueAtRisk());
     }
 
     /** For each layer why the transform is not used, where it would have been; the one place where the engine is decided. */

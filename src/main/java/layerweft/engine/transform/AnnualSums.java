@@ -4,6 +4,8 @@ import layerweft.figures.Bracket;
 
 /** A layer's annual sum A of occurrence losses under one copula, on lattices of any level, with what else is known of it. */
 interface AnnualSums {
+    /** Cells up to which a range of first order is refined. */
+    int ROUNDED_CELLS = 4096;
 
     /** A on the lattice of a level. */
     LatticeSum sum(int level);
@@ -11,17 +13,22 @@ interface AnnualSums {
     /** Cells of the lattice of a level. */
     int cells(int level);
 
+    /** Cells of the longest lattice that a level needs. */
+    int longest(int level);
+
     /** Where the lattice ends: D + M, or above all that matters where there is no M. */
     double end();
 
     SumFacts facts(LatticeSum finest);
 
-    /**
-     * A range that holds E[Y], from the lattice of a level.
-     *
-     * @param finest the sum on that level
-     */
-    Bracket bracket(int level, LatticeSum finest);
+    /** A range that holds E[Y], from the lattice of a level. */
+    Bracket bracket(int level);
+
+    /** Cells up to which it is worth refining a lattice for a narrower range. */
+    int mostBracketCells();
+
+    /** Error of E[A] where it is not known in closed form. */
+    double meanError();
 
     /** Largest error of joint probabilities of what the copula joins. */
     double jointError();

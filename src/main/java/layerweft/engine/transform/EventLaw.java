@@ -9,6 +9,11 @@ interface EventLaw {
     /** The largest occurrence loss that counts. */
     double cap();
 
+    /** The largest amount for which the law needs a lattice. */
+    default double reach() {
+        return cap();
+    }
+
     /** P(o &gt; 0). */
     double hitChance();
 
@@ -23,6 +28,11 @@ interface EventLaw {
     /** E[o] without the cap, infinite where it is. */
     double mean();
 
+    /** Error of {@link #mean}. */
+    default double meanError() {
+        return 0;
+    }
+
     /** E[o²] without the cap. */
     double secondMoment();
 
@@ -36,11 +46,13 @@ interface EventLaw {
      */
     double[] cellSurvival(double step, int cells);
 
-    /** Survival function on the lattice, P(o' &gt; kh), of a law below this one in increasing convex order. */
-    double[] lowerSurvival(double step, int cells);
+    /** Whether the gap between the {@link #ordered} laws is of second order in the step, not of first. */
+    default boolean secondOrder() {
+        return true;
+    }
 
-    /** Survival functions on the lattice of the loss rounded down (first) and up (second). */
-    double[][] roundedSurvival(double step, int cells);
+    /** Laws on the lattice above and below this one in their stop-loss transforms. */
+    OrderedLaws ordered(double step, int cells);
 
     /** P(o = kh) for k = 0..cells, where o has atoms at points of the lattice below the cap; null where it has none between 0 and cap. */
     double[] atoms(double step, int cells);

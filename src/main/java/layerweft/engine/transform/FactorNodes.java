@@ -82,15 +82,29 @@ final class FactorNodes {
         int count = (2 * half + 1) * mixing.roots.length;
         double[] weights = new double[count];
         double[][][] survival = new double[margins.length][count][];
-        for (int m = 0, k = 0; m < mixing.roots.length; m++) {
-            for (int j = -half; j <= half; j++, k++) {
+        int kept = 0;
+        for (int m = 0; m < mixing.roots.length; m++) {
+            for (int j = -half; j <= half; j++) {
                 double z = j * step;
-                weights[k] = mixing.weights[m] * Math.exp(-z * z / 2);
-                for (int i = 0; i < margins.length; i++) {
-                    survival[i][k] = conditional(scores[i], loadings[i], z, mixing.roots[m]);
+                double weight = mixing.weights[m] * Math.exp(-z * z / 2);
+                // all that is left out together stays below a tenth of the error
+                if (weight * step * count > 0.1 * error) {
+                    weights[kept] = weight;
+                    for (int i = 0; i < margins.length; i++) {
+                        survival[i][kept] = conditional(scores[i], loadings[i], z, mixing.roots[m]);
+                    }
+                    kept++;
                 }
             }
         }
+        weights = Arrays.copyOf(weights, kept);
+        for (int i = 0; i < margins.length; i++) {
+            survival[i] = Arrays.copyOf(survival[i], kept);
+        }
+        return scaled(weights, survival, margins);
+    }
+
+    private static LatentNodes scaled(double[] weights, double[][][] survival, CountMargin[] margins) {
         double total = Arrays.stream(weights).sum();
         Arrays.setAll(weights, k -> weights[k] / total);
         LatentNodes nodes = new LatentNodes(weights, survival, 0);
@@ -129,12 +143,16 @@ final class FactorNodes {
     private static double measured(LatentNodes nodes, CountMargin[] margins) {
         double worst = 0;
         for (int i = 0; i < margins.length; i++) {
-            for (int n = 0; n < margins[i].size(); n++) {
-                double sum = 0;
-                for (int k = 0; k < nodes.size(); k++) {
-                    sum += nodes.weights()[k] * nodes.survival()[i][k][n];
+            double[] sum = new double[margins[i].size()];
+            for (int k = 0; k < nodes.size(); k++) {
+                double weight = nodes.weights()[k];
+                double[] conditional = nodes.survival()[i][k];
+                for (int n = 0; n < sum.length; n++) {
+                    sum[n] += weight * conditional[n];
                 }
-                worst = Math.max(worst, Math.abs(sum - margins[i].survival()[n]));
+            }
+            for (int n = 0; n < sum.length; n++) {
+                worst = Math.max(worst, Math.abs(sum[n] - margins[i].survival()[n]));
             }
         }
         return worst;

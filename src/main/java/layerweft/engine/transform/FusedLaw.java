@@ -55,7 +55,8 @@ final class FusedLaw {
         double[] survival = new double[cells];
         double above = mass[cells];
         for (int k = cells - 1; k >= 0; k--) {
-            survival[k] = above;
+            // rounding may not carry the sum of the masses beyond the probability of a loss
+            survival[k] = Math.min(hit, above);
             above += mass[k];
         }
         return survival;

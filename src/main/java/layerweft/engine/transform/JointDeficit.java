@@ -18,9 +18,14 @@ final class JointDeficit {
      * @return {real, imaginary} × frequency
      */
     static double[][] of(LatentNodes nodes, double[][][] deficits) {
+        return of(nodes, deficits, NEGLIGIBLE);
+    }
+
+    /** @param negligible probabilities of high counts below this are left out; 0 where the transforms are tilted upwards */
+    static double[][] of(LatentNodes nodes, double[][][] deficits, double negligible) {
         int perils = deficits.length;
         int count = perils == 0 ? 0 : deficits[0][0].length;
-        int[][] lengths = lengths(nodes);
+        int[][] lengths = lengths(nodes, negligible);
         double[][] out = new double[2][count];
         double[][][] phi = new double[perils][2][BLOCK];
         double[][] h = new double[2][BLOCK];
@@ -51,13 +56,13 @@ final class JointDeficit {
         return out;
     }
 
-    private static int[][] lengths(LatentNodes nodes) {
+    private static int[][] lengths(LatentNodes nodes, double negligible) {
         int[][] lengths = new int[nodes.perils()][nodes.size()];
         for (int i = 0; i < nodes.perils(); i++) {
             for (int k = 0; k < nodes.size(); k++) {
                 double[] s = nodes.survival()[i][k];
                 int n = s.length;
-                while (n > 0 && s[n - 1] * nodes.weights()[k] < NEGLIGIBLE) {
+                while (n > 0 && s[n - 1] * nodes.weights()[k] < negligible) {
                     n--;
                 }
                 lengths[i][k] = n;

@@ -20,8 +20,12 @@ final class LayerAnswer {
     private static final double OWN_SIZE = 30;
     /** Values at risk may have errors so many times the accuracy, of themselves. */
     private static final double QUANTILES = 1000;
+    /** Where {@link LevelFigures#means} has the distortion's integral. */
+    private static final int DISTORTED = 3;
     private static final int CHEAP_CELLS = 4096;
     private static final double RARELY_FULL = 3e-6;
+    /** Width wanted of the guaranteed range, as a part of the limit. */
+    private static final double NARROW = 5e-5;
     private final AnnualSums sums;
     private final LayerTerms terms;
     private final Programme programme;
@@ -49,6 +53,11 @@ final class LayerAnswer {
         return start;
     }
 
+    /** Whether a limited layer with an annual deductible is attached with less than this chance. */
+    boolean reachedRarely(double chance) {
+        return terms.deductible() > 0 && terms.annualLimit() < Double.POSITIVE_INFINITY && points[0].value() < chance;
+    }
+
     LatticeSum finest() {
         return levels[2];
     }
@@ -72,7 +81,7 @@ final class LayerAnswer {
             }
         }
         compute();
-        while (!good() && 2L * sums.cells(start + 2) <= accuracy.mostCells()) {
+        while (!good() && 2L * sums.longest(start + 2) <= accuracy.mostCells()) {
             start++;
             levels[0] = levels[1];
             levels[1] = levels[2];
@@ -121,10 +130,12 @@ final class LayerAnswer {
         means = new Figure[rows[0].length];
         latticeError = new double[means.length];
         double floor = floor() * sums.weightOfErrors();
+        double unlimited = Double.isInfinite(terms.annualLimit()) ? sums.meanError() : 0;
         for (int f = 0; f < means.length; f++) {
             Figure figure = Extrapolation.of(rows[0][f], rows[1][f], rows[2][f]);
             latticeError[f] = figure.error();
-            means[f] = new Figure(figure.value(), figure.error() + (f == 0 ? floor : Math.max(floor, floor() * (sums.end() - terms.deductible()))));
+            double beyond = f == DISTORTED && !Double.isNaN(figure.value()) ? figures(levels[2]).distortedBeyondEnd(loading) : 0;
+            means[f] = new Figure(figure.value(), figure.error() + beyond + (f == 0 ? floor + unlimited : Math.max(floor, floor() * (sums.end() - terms.deductible()))));
         }
         points = points();
     }
@@ -140,14 +151,29 @@ final class LayerAnswer {
 
     /** Point values of the two finest lattices, each corrected by the one below it. */
     private Figure[] points() {
-        double[] fine = figures(levels[2].corrected(levels[1])).points(programme.buyer().levels());
-        double[] coarse = figures(levels[1].corrected(levels[0])).points(programme.buyer().levels());
+        List<Double> asked = programme.buyer().levels();
+        LevelFigures finer = figures(levels[2].corrected(levels[1]));
+        LevelFigures coarser = figures(levels[1].corrected(levels[0]));
+        double[] fine = finer.points(asked);
+        double[] coarse = coarser.points(asked);
         Figure[] points = new Figure[fine.length];
         double probability = floor();
         for (int f = 0; f < fine.length; f++) {
-            points[f] = new Figure(fine[f], Math.abs(fine[f] - coarse[f]) + (f < 2 ? probability : 1e-6 * levels[2].step()));
+            boolean exact = f >= 2 && fine[f] == coarse[f] && surelyOnAtom(finer, coarser, fine[f], 1 - asked.get(f - 2));
+            points[f] = exact ? Figure.exact(fine[f])
+                    : new Figure(fine[f], Math.abs(fine[f] - coarse[f]) + (f < 2 ? probability : 1e-6 * levels[2].step()));
         }
         return points;
+    }
+
+    /** Whether P(Y &gt; y) is below the tail and P(Y ≥ y) above it, by more than their errors: then y is the quantile and nothing else is. */
+    private boolean surelyOnAtom(LevelFigures finer, LevelFigures coarser, double y, double tail) {
+        boolean most = y >= terms.annualLimit();
+        double above = most ? 0 : finer.survival(y);
+        double reaches = above + finer.atom(y);
+        double error = floor() + 1e-12 + (most ? 0 : Math.abs(above - coarser.survival(y)));
+        double atomError = Math.abs(finer.atom(y) - coarser.atom(y));
+        return tail - above > error && reaches - tail > error + atomError && finer.atom(y) > 0;
     }
 
     LayerStatistics statistics() {
@@ -161,7 +187,7 @@ final class LayerAnswer {
             occurrence.put(asked.get(k), Double.isNaN(largest) ? Figure.UNDEFINED : new Figure(largest, 1e-12 * largest));
         }
         Figure mean = positive(means[0]);
-        Bracket bracket = Double.isInfinite(mean.value()) ? null : sums.bracket(start + 2, levels[2]);
+        Bracket bracket = Double.isInfinite(mean.value()) ? null : bracket();
         PremiumBuildUp premium = PremiumBuildUp.of(programme.pricing(), new PremiumBuildUp.Inputs(mean.value(), means[1].value(),
                 means[4].value(), means[3].value(), means[2].value()));
         double premiumError = error(premium.slopes());
@@ -169,6 +195,24 @@ final class LayerAnswer {
                 probability(points[1]), Figure.exact(facts.expectedEvents()), positive(means[2]),
                 new Figure(premium.net(), netError(premium, premiumError)), new Figure(premium.upfront(), premiumError), valueAtRisk,
                 positive(means[5]), occurrence);
+    }
+
+    /** On finer lattices than the figures need, until the range is narrow; a range of second order shrinks to a quarter each time. */
+    private Bracket bracket() {
+        int level = start + 2;
+        Bracket bracket = sums.bracket(level);
+        long most = Math.min(accuracy.mostCells(), sums.mostBracketCells());
+        while (bracket.high() - bracket.low() > NARROW * scale() && 2L * sums.longest(level) <= most) {
+            double excess = (bracket.high() - bracket.low()) / (NARROW * scale());
+            int more = (int) Math.max(1, Math.ceil(0.5 * Math.log(excess) / Math.log(2)));
+            while (more > 1 && (long) sums.longest(level) << more > most) {
+                more--;
+            }
+            level += more;
+            Bracket finer = sums.bracket(level);
+            bracket = new Bracket(Math.max(bracket.low(), finer.low()), Math.min(bracket.high(), finer.high()));
+        }
+        return bracket;
     }
 
     private double error(PremiumBuildUp.Slopes slopes) {

@@ -2,7 +2,9 @@ package layerweft.engine.transform;
 
 import java.util.ArrayList;
 import java.util.Arrays;
+import java.util.HashMap;
 import java.util.List;
+import java.util.Map;
 import java.util.stream.DoubleStream;
 
 /**
@@ -19,17 +21,21 @@ final class LayerLattice {
     private final double end;
     private final double firstStep;
     private final List<Level> levels = new ArrayList<>();
-    private final List<Level> lower = new ArrayList<>();
+    private final Map<Integer, Ordered> ordered = new HashMap<>();
     private Level atoms;
+    private final double upward;
     private double reach = 1.6;
 
     /**
      * One lattice with the transforms on it.
      *
      * @param wanted cells of the annual sum
-     * @param lost by peril: what a law fused to the lattice lacks of the mean, or the chance that an event's loss is no atom; else null
+     * @param lost by peril, on the atoms' lattice, the chance that an event's loss is no atom; else null
      */
     record Level(double step, int wanted, Spectrum spectrum, double[][][] deficits, double[] lost) {}
+
+    /** Event laws above and below the true ones, by peril, and their transforms. */
+    private record Ordered(OrderedLaws[] laws, Level upper, Level lower) {}
 
     /**
      * @param events of the perils that can reach the layer, in their order
@@ -41,11 +47,13 @@ final class LayerLattice {
         this.cap = cap;
         this.end = end;
         double[] landmarks = events.stream().flatMapToDouble(e -> DoubleStream.of(e.landmarks())).distinct().toArray();
+        this.upward = 0;
         this.firstStep = LatticeStep.of(cap, terms, landmarks, end, FIRST_CELLS);
     }
 
-    private LayerLattice(LayerLattice whole, EventLaw event) {
-        this.events = List.of(event);
+    private LayerLattice(LayerLattice whole, List<EventLaw> events, double upward) {
+        this.events = events;
+        this.upward = upward;
         this.cap = whole.cap;
         this.end = whole.end;
         this.firstStep = whole.firstStep;
@@ -53,7 +61,28 @@ final class LayerLattice {
 
     /** The same lattice for the sum of one peril's events alone. */
     LayerLattice of(EventLaw event) {
-        return new LayerLattice(this, event);
+        return new LayerLattice(this, List.of(event), 0);
+    }
+
+    /** The same lattice with transforms tilted so that sums far up are weighted by e^(rate·A) and keep their digits. */
+    LayerLattice upward(double rate) {
+        LayerLattice tilted = new LayerLattice(this, events, rate);
+        tilted.reach = 4;
+        return tilted;
+    }
+
+    /** E[e^(rate·A)] for the capped losses on the coarsest lattice. */
+    double exponentialMoment(LatentNodes nodes, double rate) {
+        double step = step(0);
+        int cells = LatticeStep.cells(cap, step);
+        double[] deficits = new double[events.size()];
+        for (int i = 0; i < deficits.length; i++) {
+            double[] survival = events.get(i).cellSurvival(step, cells);
+            for (int k = 0; k < cells; k++) {
+                deficits[i] -= Math.expm1(rate * step) * survival[k] * Math.exp(rate * step * k);
+            }
+        }
+        return 1 - JointDeficit.at(nodes, deficits);
     }
 
     double end() {
@@ -69,12 +98,18 @@ final class LayerLattice {
         return LatticeStep.cells(end, step(level));
     }
 
+    /** Cells of the longest lattice that a level needs: of the annual sum, or of a subject loss from the ground up. */
+    int longest(int level) {
+        double reach = events.stream().mapToDouble(EventLaw::reach).max().orElse(0);
+        return LatticeStep.cells(Math.max(end, reach), step(level));
+    }
+
     /** Asks for longer transforms with less tilt: the digits of rare sums far up the lattice need them. */
     void reachFurther() {
         if (reach < 4) {
             reach = 4;
             levels.clear();
-            lower.clear();
+            ordered.clear();
         }
     }
 
@@ -96,56 +131,52 @@ final class LayerLattice {
         return new LatticeSum(at.step, mean, atoms().step, atomSurvival, wrapped + rounding);
     }
 
-    /** Cell averages of P(A' &gt; y) for the law of A from event laws below the true ones in increasing convex order. */
-    double[] lowerSum(LatentNodes nodes, int level) {
-        return survival(nodes, lower(level));
-    }
-
-    /** The same for event laws rounded down and up. */
-    double[][] roundedSums(LatentNodes nodes, int level) {
-        double[][] sums = new double[2][];
-        for (int side = 0; side < 2; side++) {
-            int s = side;
-            sums[side] = survival(nodes, make(step(level), e -> e.roundedSurvival(step(level), LatticeStep.cells(cap, step(level)))[s], level));
-        }
-        return sums;
-    }
-
-    /** E[A] less the mean of the sum behind {@link #lowerSum}, for events capped at the cap. */
-    double lostMean(int level, double[] meanCounts) {
-        double lost = 0;
+    /**
+     * Sums of event laws above and below the true ones in their stop-loss transforms.
+     *
+     * @param spread the sum of this level
+     * @param meanCounts E[N_i] of the perils
+     */
+    StopLossRange range(LatentNodes nodes, int level, LatticeSum spread, double[] meanCounts) {
+        Ordered at = ordered.computeIfAbsent(level, this::ordered);
+        double[] upper = at.upper == level(level) ? spread.mean() : survival(nodes, at.upper);
+        double[] totals = new double[9];
         for (int i = 0; i < meanCounts.length; i++) {
-            lost += meanCounts[i] * lower(level).lost[i];
+            double[] each = at.laws[i].amounts();
+            for (int k = 0; k < totals.length; k++) {
+                totals[k] += meanCounts[i] * each[k];
+            }
         }
-        return lost;
+        return StopLossRange.of(step(level), upper, survival(nodes, at.lower), totals);
     }
 
-    private Level lower(int level) {
-        while (lower.size() <= level) {
-            lower.add(null);
+    private Ordered ordered(int level) {
+        double step = step(level);
+        int cells = LatticeStep.cells(cap, step);
+        OrderedLaws[] laws = events.stream().map(e -> e.ordered(step, cells)).toArray(OrderedLaws[]::new);
+        boolean spread = true;
+        double[][] upper = new double[laws.length][];
+        double[][] lower = new double[laws.length][];
+        for (int i = 0; i < laws.length; i++) {
+            upper[i] = laws[i].upper();
+            lower[i] = laws[i].lower();
+            spread &= Arrays.equals(upper[i], events.get(i).cellSurvival(step, cells));
         }
-        if (lower.get(level) == null) {
-            double step = step(level);
-            int cells = LatticeStep.cells(cap, step);
-            double[] lost = new double[events.size()];
-            for (int i = 0; i < lost.length; i++) {
-                double whole = Arrays.stream(events.get(i).cellSurvival(step, cells)).sum();
-                lost[i] = Math.max(0, step * (whole - Arrays.stream(events.get(i).lowerSurvival(step, cells)).sum()));
-            }
-            Level made = make(step, e -> e.lowerSurvival(step, cells), level);
-            lower.set(level, new Level(step, made.wanted, made.spectrum, made.deficits, lost));
-        }
-        return lower.get(level);
+        return new Ordered(laws, spread ? level(level) : make(upper, level), make(lower, level));
     }
 
     private double[] survival(LatentNodes nodes, Level at) {
-        double[][] deficit = JointDeficit.of(nodes, at.deficits);
+        double[][] deficit = deficit(nodes, at);
         double[] mean = at.spectrum.survival(deficit[0], deficit[1], at.wanted);
         // rounding may not make a probability negative or rise
         for (int k = mean.length - 1; k >= 0; k--) {
             mean[k] = Math.min(1, Math.max(mean[k], 0));
         }
         return mean;
+    }
+
+    private double[][] deficit(LatentNodes nodes, Level at) {
+        return upward > 0 ? JointDeficit.of(nodes, at.deficits, 0) : JointDeficit.of(nodes, at.deficits);
     }
 
     private Level level(int level) {
@@ -155,22 +186,20 @@ final class LayerLattice {
         if (levels.get(level) == null) {
             double step = step(level);
             int cells = LatticeStep.cells(cap, step);
-            levels.set(level, make(step, e -> e.cellSurvival(step, cells), level));
+            levels.set(level, make(events.stream().map(e -> e.cellSurvival(step, cells)).toArray(double[][]::new), level));
         }
         return levels.get(level);
     }
 
-    private Level make(double step, java.util.function.Function<EventLaw, double[]> law, int level) {
+    private Level make(double[][] laws, int level) {
         int last = cells(level);
         int wanted = last + MARGIN;
         int length = Spectrum.goodLength((int) Math.ceil(reach * wanted));
-        double tilt = reachesFar() ? 14.0 / length : 36.0 / (length + wanted);
+        double tilt = upward > 0 ? -upward * step(level) : reachesFar() ? 14.0 / length : 36.0 / (length + wanted);
         Spectrum spectrum = new Spectrum(length, tilt);
-        double[][][] deficits = new double[events.size()][][];
-        for (int i = 0; i < deficits.length; i++) {
-            deficits[i] = spectrum.deficit(law.apply(events.get(i)));
-        }
-        return new Level(step, wanted, spectrum, deficits, null);
+        double[][][] deficits = new double[laws.length][][];
+        Arrays.setAll(deficits, i -> spectrum.deficit(laws[i]));
+        return new Level(step(level), wanted, spectrum, deficits, null);
     }
 
     /**
@@ -190,8 +219,8 @@ final class LayerLattice {
             }
             int places = cells / stride;
             int wanted = (int) Math.ceil(end / (stride * step)) + 2;
-            int length = Spectrum.goodLength(Math.max(8, 2 * wanted));
-            Spectrum spectrum = new Spectrum(length, 30.0 / length);
+            int length = Spectrum.goodLength(Math.max(8, (upward > 0 ? 4 : 2) * wanted));
+            Spectrum spectrum = new Spectrum(length, upward > 0 ? -upward * stride * step : 30.0 / length);
             double[][][] deficits = new double[events.size()][][];
             double[] never = new double[events.size()];
             for (int i = 0; i < deficits.length; i++) {
@@ -230,7 +259,7 @@ final class LayerLattice {
     /** P(A &gt; k·(step of the atoms), A an atom), k = 0, 1, … */
     double[] atomSurvival(LatentNodes nodes) {
         Level at = atoms();
-        double[][] deficit = JointDeficit.of(nodes, at.deficits);
+        double[][] deficit = deficit(nodes, at);
         // a year with any loss that is no atom is no atom: U at infinity, taken off before the inverse transform
         double constant = JointDeficit.at(nodes, at.lost);
         for (int j = 0; j < deficit[0].length; j++) {

@@ -84,6 +84,37 @@ final class LevelFigures {
         return total;
     }
 
+    /**
+     * A bound on ∫ g(S(y)) dy above the end of a lattice without annual limit, infinite where none is known. By Markov's inequality
+     * S(y) ≤ K/y² with K = E[A²; A &gt; end]; and g(s) ≤ c·s^(1/p), for the proportional hazard with c = 1, p = ρ, for Wang's transform, a mean
+     * of e^(λZ − λ²/2) over the worst part s, by Hölder's inequality with c = e^(λ²/(2(p − 1))) for any p &gt; 1.
+     */
+    double distortedBeyondEnd(Loading loading) {
+        if (limited()) {
+            return 0;
+        }
+        if (loading instanceof Loading.ProportionalHazard hazard) {
+            return beyondEnd(hazard.rho());
+        }
+        double least = Double.POSITIVE_INFINITY;
+        if (loading instanceof Loading.Wang wang) {
+            for (double p = 1.05; p < 2; p += 0.05) {
+                least = Math.min(least, Math.exp(wang.lambda() * wang.lambda() / (2 * (p - 1))) * beyondEnd(p));
+            }
+        }
+        return least;
+    }
+
+    /** ∫_end^∞ (K/y²)^(1/p) dy. */
+    private double beyondEnd(double p) {
+        if (p >= 2 || Double.isInfinite(facts.secondMoment())) {
+            return Double.POSITIVE_INFINITY;
+        }
+        double within = sum.pieces(0, end).secondMoment();
+        double k = Math.max(0, facts.secondMoment() - within) + end * end * sum.mean()[LatticeStep.cells(end, sum.step()) - 1];
+        return Math.pow(k, 1 / p) * Math.pow(end, 1 - 2 / p) / (2 / p - 1);
+    }
+
     private static double distortion(Loading loading, double survival) {
         if (survival <= 0 || survival >= 1) {
             return survival;
@@ -123,6 +154,11 @@ final class LevelFigures {
         double s = Math.max(0, a / sum.step() - cell);
         double atomsAbove = sum.mean()[cell] - continuous(cell);
         return y == 0 ? attachment() : Math.min(1, node(cell, false) * (1 - s) + node(cell + 1, false) * s + atomsAbove);
+    }
+
+    /** P(Y = y) of an atom, 0 where there is none. */
+    double atom(double y) {
+        return y == 0 ? 1 - attachment() : y >= terms.annualLimit() ? exhaustion() : sum.atom(terms.deductible() + y);
     }
 
     private double continuous(int cell) {

@@ -17,10 +17,9 @@ import layerweft.model.treaty.Treaty;
  * @param moments of these laws
  * @param meanCounts E[N_i]
  * @param cutCounts probability left out where counts are cut
- * @param splitEvents whether any peril's event is a sum of parts
  */
 record PreparedLayer(LayerTerms terms, int[] perils, List<EventLaw> events, EventMoments[] moments, double[] meanCounts, double cutCounts,
-        boolean splitEvents, LayerLattice lattice) {
+        LayerLattice lattice) {
 
     /** P(o &gt; 0), E[o] and E[o²] of one event. */
     record EventMoments(double hitChance, double mean, double secondMoment) {}
@@ -32,7 +31,6 @@ record PreparedLayer(LayerTerms terms, int[] perils, List<EventLaw> events, Even
         double cap = Math.min(terms.occurrenceLimit(), end);
         List<Integer> perils = new ArrayList<>();
         List<EventLaw> events = new ArrayList<>();
-        boolean split = false;
         double top = Double.isInfinite(cap) ? openCap(treaty, layer, terms) : cap;
         for (int i = 0; i < treaty.portfolio().perils().size(); i++) {
             if (!treaty.cover(layer).covers(i)) {
@@ -43,7 +41,6 @@ record PreparedLayer(LayerTerms terms, int[] perils, List<EventLaw> events, Even
             if (peril.frequency().mean() > 0 && event.hitChance() > 0) {
                 perils.add(i);
                 events.add(event);
-                split |= event instanceof SplitEvent;
             }
         }
         double[] means = perils.stream().mapToDouble(i -> treaty.portfolio().perils().get(i).frequency().mean()).toArray();
@@ -52,7 +49,7 @@ record PreparedLayer(LayerTerms terms, int[] perils, List<EventLaw> events, Even
         LayerLattice lattice = new LayerLattice(events, top, reach, bends);
         EventMoments[] moments = events.stream().map(e -> new EventMoments(e.hitChance(), e.mean(), e.secondMoment())).toArray(EventMoments[]::new);
         double cut = accuracy.ofCounts() * perils.size();
-        return new PreparedLayer(terms, perils.stream().mapToInt(Integer::intValue).toArray(), events, moments, means, cut, split, lattice);
+        return new PreparedLayer(terms, perils.stream().mapToInt(Integer::intValue).toArray(), events, moments, means, cut, lattice);
     }
 
     private static EventLaw event(Treaty treaty, int layer, int i, LayerTerms terms, double cap) {
@@ -116,6 +113,15 @@ record PreparedLayer(LayerTerms terms, int[] perils, List<EventLaw> events, Even
             weight += (meanCounts[i] + 12 * Math.sqrt(meanCounts[i]) + 12) * Math.min(moments[i].mean(), events.get(i).cap());
         }
         return weight;
+    }
+
+    /** Error of E[A] where the means of events are not known in closed form. */
+    double meanError() {
+        double error = 0;
+        for (int i = 0; i < meanCounts.length; i++) {
+            error += meanCounts[i] * events.get(i).meanError();
+        }
+        return error;
     }
 
     /** Error of the perils' chances to hit or exhaust, over a year. */

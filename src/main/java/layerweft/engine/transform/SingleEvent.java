@@ -1,5 +1,6 @@
 package layerweft.engine.transform;
 
+import java.util.Arrays;
 import java.util.stream.DoubleStream;
 import layerweft.model.severity.Capped;
 import layerweft.model.severity.DiscreteLosses;
@@ -90,8 +91,9 @@ record SingleEvent(SeverityModel severity, LayerTerms terms, double cap) impleme
         return (middle - a) * hitChance() + (b > middle ? q * severity.layerMean(groundUp(middle), groundUp(b)) : 0);
     }
 
+    /** Mass spread to the lattice points above, mass fused at them below: the order is one of convex functions, with nothing to spare. */
     @Override
-    public double[] lowerSurvival(double step, int cells) {
+    public OrderedLaws ordered(double step, int cells) {
         double[] mean = cellSurvival(step, cells);
         double[] reaches = new double[cells];
         double[] passes = new double[cells];
@@ -99,18 +101,9 @@ record SingleEvent(SeverityModel severity, LayerTerms terms, double cap) impleme
             reaches[k] = k == cells - 1 ? fullChance() : reaches((k + 1) * step);
             passes[k] = k == cells - 1 ? reaches[k] : survival((k + 1) * step);
         }
-        return FusedLaw.survival(hitChance(), mean, reaches, passes);
-    }
-
-    @Override
-    public double[][] roundedSurvival(double step, int cells) {
-        double[] down = new double[cells];
-        double[] up = new double[cells];
-        for (int k = 0; k < cells; k++) {
-            down[k] = k == cells - 1 ? fullChance() : reaches((k + 1) * step);
-            up[k] = survival(k * step);
-        }
-        return new double[][] {down, up};
+        double capped = step * Arrays.stream(mean).sum();
+        double beyond = terms.occurrenceLimit() < Double.POSITIVE_INFINITY ? 0 : layerMean(cap, Double.POSITIVE_INFINITY);
+        return new OrderedLaws(step, mean, FusedLaw.survival(hitChance(), mean, reaches, passes), 0, capped, capped, beyond, beyond, mean(), mean());
     }
 
     @Override

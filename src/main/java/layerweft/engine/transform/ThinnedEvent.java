@@ -31,6 +31,11 @@ record ThinnedEvent(EventLaw law, double chance) implements EventLaw {
     }
 
     @Override
+    public double meanError() {
+        return chance * law.meanError();
+    }
+
+    @Override
     public double secondMoment() {
         return chance * law.secondMoment();
     }
@@ -46,14 +51,13 @@ record ThinnedEvent(EventLaw law, double chance) implements EventLaw {
     }
 
     @Override
-    public double[] lowerSurvival(double step, int cells) {
-        return thinned(law.lowerSurvival(step, cells));
+    public boolean secondOrder() {
+        return law.secondOrder();
     }
 
     @Override
-    public double[][] roundedSurvival(double step, int cells) {
-        double[][] rounded = law.roundedSurvival(step, cells);
-        return new double[][] {thinned(rounded[0]), thinned(rounded[1])};
+    public OrderedLaws ordered(double step, int cells) {
+        return law.ordered(step, cells).thinned(chance);
     }
 
     @Override

@@ -6,6 +6,7 @@ import java.util.List;
 import java.util.Map;
 import layerweft.figures.Bracket;
 import layerweft.model.copula.Copula;
+import layerweft.model.copula.Student;
 import layerweft.model.treaty.LayerTerms;
 
 /**
@@ -14,8 +15,10 @@ import layerweft.model.treaty.LayerTerms;
  */
 final class TotalSums implements AnnualSums {
     private static final double JOINT_ERROR = 2e-9;
-    /** Cells wanted for the guaranteed range, whose width is of first order here. */
-    private static final int BRACKET_CELLS = 2048;
+    /** For Student copulas, whose quadrature runs over two variables. */
+    private static final double STUDENT_ERROR = 5e-9;
+    /** Factor on the error of the quadrature in a guaranteed range: merged nodes are within it too. */
+    private static final double SAFETY = 100;
     private final PreparedLayer layer;
     private final List<LayerLattice> totals;
     private final LatentNodes[] alone;
@@ -52,8 +55,12 @@ final class TotalSums implements AnnualSums {
             noise += total.noise();
             margins[i] = margin(total.mean());
         }
-        double[] mean = DependentSum.survival(copula, layer.perils(), margins, JOINT_ERROR);
+        double[] mean = DependentSum.survival(copula, layer.perils(), margins, wantedError());
         return new LatticeSum(layer.lattice().step(level), mean, 2 * end(), new double[] {0}, noise + 1e-14);
+    }
+
+    private double wantedError() {
+        return copula instanceof Student ? STUDENT_ERROR : JOINT_ERROR;
     }
 
     private static CountMargin margin(double[] survival) {
@@ -88,62 +95,89 @@ final class TotalSums implements AnnualSums {
     }
 
     /**
-     * Totals rounded down and up with their ranks kept. Their survival functions at points of the lattice lie between averages over the
-     * cells above and below, and these between the bounds from convex order for each total alone.
+     * Where the copula keeps convex order, totals above and below in their stop-loss transforms, joined with their ranks kept: proven but
+     * for the quadrature over the copula's factor, for whose error there is room. Else totals rounded down and up, a range of first order.
      */
     @Override
-    public Bracket bracket(int level, LatticeSum finest) {
-        LayerTerms terms = layer.terms();
-        if (Double.isInfinite(terms.annualLimit()) || layer.splitEvents()) {
-            return null;
-        }
+    public Bracket bracket(int level) {
         if (totals.isEmpty()) {
             return new Bracket(0, 0);
         }
-        int fine = level;
-        while (cells(fine) < BRACKET_CELLS) {
-            fine++;
+        int d = totals.size();
+        StopLossRange[] ranges = new StopLossRange[d];
+        double noise = 0;
+        for (int i = 0; i < d; i++) {
+            LatticeSum spread = totals.get(i).sum(alone[i], level, new double[] {0});
+            noise += spread.noise();
+            ranges[i] = totals.get(i).range(alone[i], level, spread, new double[] {layer.meanCounts()[i]});
         }
-        CountMargin[] low = new CountMargin[totals.size()];
-        CountMargin[] high = new CountMargin[totals.size()];
-        double step = layer.lattice().step(fine);
-        for (int i = 0; i < low.length; i++) {
-            LayerLattice lattice = totals.get(i);
-            LatticeSum spread = lattice.sum(alone[i], fine, new double[] {0});
-            double[] fused = lattice.lowerSum(alone[i], fine);
-            double lost = lattice.lostMean(fine, new double[] {layer.meanCounts()[i]}) + spread.noise() * end() + layer.cutCounts() * end();
-            int n = fused.length;
-            double[] under = new double[n];
-            double[] over = new double[n];
-            double least = 0;
-            double most = lost;
-            over[0] = JointDeficit.at(alone[i], new double[] {layer.events().get(i).hitChance()});
-            for (int k = 0; k + 1 < n; k++) {
-                // `least` and `most` hold E[min(S, kh)]
-                double nextLeast = least + step * spread.mean()[k];
-                double nextMost = most + step * fused[k];
-                double average = (nextLeast - (k == 0 ? 0 : most)) / step;
-                if (k > 0) {
-                    under[k - 1] = Math.max(0, average);
-                }
-                over[k + 1] = Math.min(over[0], (nextMost - least) / step);
-                least = nextLeast;
-                most = nextMost;
-            }
-            for (int k = n - 2; k >= 0; k--) {
-                under[k] = Math.max(under[k], under[k + 1]);
-            }
-            low[i] = margin(under);
-            high[i] = margin(over);
-        }
-        double slack = 10 * (jointError() + finest.noise()) * (end() - terms.deductible());
-        double[] down = DependentSum.survival(copula, layer.perils(), low, JOINT_ERROR);
-        double[] up = DependentSum.survival(copula, layer.perils(), high, JOINT_ERROR);
-        return new Bracket(Math.max(0, within(down, step, terms) - slack), within(up, step, terms) + slack);
+        double error = (SAFETY * wantedError() + 10 * layer.cutCounts() + 2 * noise) * end();
+        return ordered() ? joined(ranges).of(layer.terms(), end(), error) : rounded(ranges, error);
     }
 
-    private double within(double[] survival, double step, LayerTerms terms) {
-        return CountSums.limited(survival, step, end()) - CountSums.limited(survival, step, terms.deductible());
+    private StopLossRange joined(StopLossRange[] ranges) {
+        double[] totals = new double[9];
+        CountMargin[] high = new CountMargin[ranges.length];
+        CountMargin[] low = new CountMargin[ranges.length];
+        for (int i = 0; i < ranges.length; i++) {
+            StopLossRange r = ranges[i];
+            high[i] = margin(r.upper());
+            low[i] = margin(r.lower());
+            double[] each = r.amounts();
+            for (int k = 0; k < each.length; k++) {
+                totals[k] += each[k];
+            }
+        }
+        return StopLossRange.of(ranges[0].step(), joint(high), joint(low), totals);
+    }
+
+    private double[] joint(CountMargin[] margins) {
+        return DependentSum.survival(copula, layer.perils(), margins, wantedError());
+    }
+
+    /** The layer's loss rises with each total, so that totals rounded down and up give less and more of it under any copula. */
+    private Bracket rounded(StopLossRange[] ranges, double error) {
+        LayerTerms terms = layer.terms();
+        double step = ranges[0].step();
+        CountMargin[] low = new CountMargin[ranges.length];
+        CountMargin[] high = new CountMargin[ranges.length];
+        double least = -error;
+        double most = error;
+        for (int i = 0; i < ranges.length; i++) {
+            double positive = JointDeficit.at(alone[i], new double[] {layer.events().get(i).hitChance()}) + layer.cutCounts();
+            low[i] = margin(ranges[i].roundedDown());
+            high[i] = margin(ranges[i].roundedUp(positive));
+            least += ranges[i].allLow();
+            most += ranges[i].allHigh();
+        }
+        double[] down = joint(low);
+        double[] up = joint(high);
+        double downAtDeductible = OrderedLaws.limited(down, step, terms.deductible());
+        double upAtDeductible = OrderedLaws.limited(up, step, terms.deductible());
+        if (Double.isInfinite(terms.annualLimit())) {
+            return new Bracket(Math.max(0, least - upAtDeductible), most - downAtDeductible);
+        }
+        return new Bracket(Math.max(0, OrderedLaws.limited(down, step, end()) - downAtDeductible - error),
+                OrderedLaws.limited(up, step, end()) - upAtDeductible + error);
+    }
+
+    private boolean ordered() {
+        return ConvexOrder.keptBy(copula, layer.perils());
+    }
+
+    @Override
+    public int mostBracketCells() {
+        return ordered() && layer.events().stream().allMatch(EventLaw::secondOrder) ? Integer.MAX_VALUE : ROUNDED_CELLS;
+    }
+
+    @Override
+    public double meanError() {
+        return layer.meanError();
+    }
+
+    @Override
+    public int longest(int level) {
+        return layer.lattice().longest(level);
     }
 
     @Override
@@ -153,7 +187,7 @@ final class TotalSums implements AnnualSums {
 
     @Override
     public double jointError() {
-        return 10 * JOINT_ERROR + layer.cutCounts() + layer.chanceError();
+        return 10 * wantedError() + layer.cutCounts() + layer.chanceError();
     }
 
     /** The copula says nothing of how a year's total comes about. */

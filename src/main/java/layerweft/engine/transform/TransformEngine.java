@@ -21,6 +21,8 @@ import layerweft.model.treaty.Treaty;
  * engines that {@link #with} returns; these may be used on different threads only one at a time.
  */
 public final class TransformEngine {
+    /** A limited layer attached through its annual deductible with less than this chance is priced by {@link FarSums}. */
+    private static final double FAR = 1e-3;
     private final Treaty treaty;
     private final Accuracy accuracy;
     private final Copula copula;
@@ -98,6 +100,11 @@ public final class TransformEngine {
                 if (members.length > 3) {
                     return Optional.of("it covers " + members.length + " sub-perils of " + peril.name() + ", and the transform takes at most 3");
                 }
+                for (int k : members) {
+                    if (members.length > 1 && PartsSum.hasAtoms(split.subPerils().get(k).severity())) {
+                        return Optional.of("the losses of sub-peril " + peril.name() + "/" + split.subPerils().get(k).name() + " are discrete");
+                    }
+                }
                 Optional<String> reason = DependentSum.refusal(split.copula(), members);
                 if (reason.isPresent()) {
                     return reason;
@@ -142,7 +149,15 @@ public final class TransformEngine {
     private LayerAnswer answer(int layer, AnnualSums sums) {
         LayerAnswer answer = new LayerAnswer(sums, treaty.layer(layer).terms(), treaty.programme(), accuracy, shared.levels.getOrDefault(layer, 0));
         shared.levels.merge(layer, answer.level(), Math::max);
-        return answer;
+        boolean far = answer.reachedRarely(FAR) && sums instanceof CountSums;
+        return far ? new LayerAnswer(farSums(layer, sums), treaty.layer(layer).terms(), treaty.programme(), accuracy, answer.level()) : answer;
+    }
+
+    private FarSums farSums(int layer, AnnualSums usual) {
+        PreparedLayer prepared = shared.layers.get(layer);
+        CountMargin[] margins = Arrays.stream(prepared.perils())
+                .mapToObj(i -> CountMargin.of(treaty.portfolio().perils().get(i).frequency(), FarSums.COUNT_TAIL)).toArray(CountMargin[]::new);
+        return new FarSums(prepared, usual, LatentModel.of(copula, prepared.perils(), margins, FarSums.PROBABILITIES));
     }
 
     private void require(int layer) {

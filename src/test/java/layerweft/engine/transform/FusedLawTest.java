@@ -22,7 +22,7 @@ class FusedLawTest {
             SingleEvent event = new SingleEvent(severity, terms, 30);
             for (int cells : new int[] {8, 30, 96}) {
                 double step = 30.0 / cells;
-                double[] lower = event.lowerSurvival(step, cells);
+                double[] lower = event.ordered(step, cells).lower();
                 double[] upper = event.cellSurvival(step, cells);
                 double below = 0;
                 double above = 0;
