@@ -13,7 +13,7 @@ class FigureTextTest {
     @ParameterizedTest
     @CsvSource(quoteCharacter = '"', value = {
         "3.14159, 0.02, 3.14, ± 0.02", "3.14159, 0.2, 3.1, ± 0.2", "3.14159, 4, 3, ± 4", "3.14159, 0.096, 3.1, ± 0.1", "0.00123456, 0.00002, 0.00123, ± 0.00002",
-        "12345.6, 300, \"12,300\", ± 300", "-7.25, 0.1, -7.3, ± 0.1", "1234567, 20000, \"1,230,000\", \"± 20,000\"", "0, 0.03, 0.00, ± 0.03", "-0.0001, 0.01, 0.00, ± 0.01"})
+        "12345.6, 300, \"12,300\", ± 300", "-7.25, 0.1, -7.3, ± 0.1", "1234567, 20000, \"1,230,000\", \"± 20,000\"", "0, 0.03, 0, ± 0.03", "-0.0001, 0.01, 0.00, ± 0.01"})
     void digitsFollowTheError(double value, double error, String text, String errorText) {
         Figure figure = new Figure(value, error);
         assertEquals(text, FigureText.value(figure));

@@ -192,7 +192,7 @@ final class LayerAnswer {
                 means[4].value(), means[3].value(), means[2].value()));
         double premiumError = error(premium.slopes());
         return new LayerStatistics(Engine.TRANSFORM, mean, bracket, positive(means[1]), probability(points[0]),
-                probability(points[1]), Figure.exact(facts.expectedEvents()), positive(means[2]),
+                Double.isInfinite(terms.annualLimit()) ? Figure.exact(0) : probability(points[1]), Figure.exact(facts.expectedEvents()), positive(means[2]),
                 new Figure(premium.net(), netError(premium, premiumError)), new Figure(premium.upfront(), premiumError), valueAtRisk,
                 positive(means[5]), occurrence);
     }
