@@ -19,6 +19,12 @@ interface AnnualSums {
     /** Where the lattice ends: D + M, or above all that matters where there is no M. */
     double end();
 
+    /** The largest loss of one event that the lattices keep. */
+    double cap();
+
+    /** At most the chance that an event of the year passes {@link #cap}, as matters where nothing limits it; NaN where E[A²] is not known so far up. */
+    double capPassed();
+
     SumFacts facts(LatticeSum finest);
 
     /** A range that holds E[Y], from the lattice of a level. */

@@ -51,6 +51,16 @@ final class CountSums implements AnnualSums {
     }
 
     @Override
+    public double cap() {
+        return layer.cap();
+    }
+
+    @Override
+    public double capPassed() {
+        return layer.capPassed();
+    }
+
+    @Override
     public SumFacts facts(LatticeSum finest) {
         return facts;
     }

@@ -83,6 +83,16 @@ final class FarSums implements AnnualSums {
     }
 
     @Override
+    public double cap() {
+        return usual.cap();
+    }
+
+    @Override
+    public double capPassed() {
+        return usual.capPassed();
+    }
+
+    @Override
     public SumFacts facts(LatticeSum finest) {
         return usual.facts(finest);
     }

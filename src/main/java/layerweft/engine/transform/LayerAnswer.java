@@ -134,7 +134,7 @@ final class LayerAnswer {
         for (int f = 0; f < means.length; f++) {
             Figure figure = Extrapolation.of(rows[0][f], rows[1][f], rows[2][f]);
             latticeError[f] = figure.error();
-            double beyond = f == DISTORTED && !Double.isNaN(figure.value()) ? figures(levels[2]).distortedBeyondEnd(loading) : 0;
+            double beyond = f == DISTORTED && !Double.isNaN(figure.value()) ? figures(levels[2]).distortedBeyond(loading, sums.cap(), sums.capPassed()) : 0;
             means[f] = new Figure(figure.value(), figure.error() + beyond + (f == 0 ? floor + unlimited : Math.max(floor, floor() * (sums.end() - terms.deductible()))));
         }
         points = points();

@@ -85,34 +85,48 @@ final class LevelFigures {
     }
 
     /**
-     * A bound on ∫ g(S(y)) dy above the end of a lattice without annual limit, infinite where none is known. By Markov's inequality
-     * S(y) ≤ K/y² with K = E[A²; A &gt; end]; and g(s) ≤ c·s^(1/p), for the proportional hazard with c = 1, p = ρ, for Wang's transform, a mean
-     * of e^(λZ − λ²/2) over the worst part s, by Hölder's inequality with c = e^(λ²/(2(p − 1))) for any p &gt; 1.
+     * A bound on what a lattice without annual limit leaves out of ∫ g(S(y)) dy, infinite where none is known: all above its end, and where
+     * a loss passes the largest one kept. As g is concave it is at most ∫ g(S − S') with S' the law kept, S − S' at most the chance of a
+     * passing loss, 0 below it. By Markov's inequality S(y) ≤ K/y² above x, with K = E[A²; A &gt; x]; and g(s) ≤ c·s^(1/p), for the
+     * proportional hazard with c = 1, p = ρ, for Wang's transform, a mean of e^(λZ − λ²/2) over the worst part s, by Hölder's inequality
+     * with c = e^(λ²/(2(p − 1))) for any p &gt; 1.
+     *
+     * @param largest loss of one event that is kept
+     * @param passed chance of a larger one in the year; NaN where E[A²] is not known
      */
-    double distortedBeyondEnd(Loading loading) {
+    double distortedBeyond(Loading loading, double largest, double passed) {
         if (limited()) {
             return 0;
         }
-        if (loading instanceof Loading.ProportionalHazard hazard) {
-            return beyondEnd(hazard.rho());
+        if (Double.isNaN(passed)) {
+            return Double.POSITIVE_INFINITY;
         }
+        double first = passed > 0 ? Math.min(end, largest) : end;
         double least = Double.POSITIVE_INFINITY;
-        if (loading instanceof Loading.Wang wang) {
-            for (double p = 1.05; p < 2; p += 0.05) {
-                least = Math.min(least, Math.exp(wang.lambda() * wang.lambda() / (2 * (p - 1))) * beyondEnd(p));
+        for (int part = 0; part <= 16; part++) {
+            double x = first + (end - first) * part / 16;
+            double below = distortion(loading, Math.min(1, passed)) * (x - first);
+            double k = squareAbove(x);
+            if (loading instanceof Loading.ProportionalHazard hazard) {
+                least = Math.min(least, below + above(x, k, hazard.rho()));
+            } else if (loading instanceof Loading.Wang wang) {
+                for (double p = 1.05; p < 2; p += 0.05) {
+                    least = Math.min(least, below + Math.exp(wang.lambda() * wang.lambda() / (2 * (p - 1))) * above(x, k, p));
+                }
             }
         }
         return least;
     }
 
-    /** ∫_end^∞ (K/y²)^(1/p) dy. */
-    private double beyondEnd(double p) {
-        if (p >= 2 || Double.isInfinite(facts.secondMoment())) {
-            return Double.POSITIVE_INFINITY;
-        }
-        double within = sum.pieces(0, end).secondMoment();
-        double k = Math.max(0, facts.secondMoment() - within) + end * end * sum.mean()[LatticeStep.cells(end, sum.step()) - 1];
-        return Math.pow(k, 1 / p) * Math.pow(end, 1 - 2 / p) / (2 / p - 1);
+    /** E[A²; A &gt; x]. */
+    private double squareAbove(double x) {
+        double within = sum.pieces(0, x).secondMoment();
+        return Math.max(0, facts.secondMoment() - within) + x * x * sum.mean()[LatticeStep.cells(x, sum.step()) - 1];
+    }
+
+    /** ∫_x^∞ (K/y²)^(1/p) dy. */
+    private static double above(double x, double k, double p) {
+        return p >= 2 || Double.isInfinite(k) ? Double.POSITIVE_INFINITY : Math.pow(k, 1 / p) * Math.pow(x, 1 - 2 / p) / (2 / p - 1);
     }
 
     private static double distortion(Loading loading, double survival) {

@@ -124,6 +124,20 @@ record PreparedLayer(LayerTerms terms, int[] perils, List<EventLaw> events, Even
         return error;
     }
 
+    /** The largest loss of one event that the lattices keep. */
+    double cap() {
+        return events.stream().mapToDouble(EventLaw::cap).max().orElse(0);
+    }
+
+    /** Expected number of losses above the cap where it stands for no limit at all: no less than the chance of one; NaN for sums of parts. */
+    double capPassed() {
+        double passed = 0;
+        for (int i = 0; i < meanCounts.length && Double.isInfinite(terms.occurrenceLimit()); i++) {
+            passed += events.get(i) instanceof SplitEvent ? Double.NaN : meanCounts[i] * events.get(i).survival(cap());
+        }
+        return passed;
+    }
+
     /** Error of the perils' chances to hit or exhaust, over a year. */
     double chanceError() {
         double error = 0;

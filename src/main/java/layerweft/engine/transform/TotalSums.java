@@ -17,6 +17,8 @@ final class TotalSums implements AnnualSums {
     private static final double JOINT_ERROR = 2e-9;
     /** For Student copulas, whose quadrature runs over two variables. */
     private static final double STUDENT_ERROR = 5e-9;
+    /** In a range of first order, beside whose width this is small. */
+    private static final double ROUNDED_ERROR = 2e-7;
     /** Factor on the error of the quadrature in a guaranteed range: merged nodes are within it too. */
     private static final double SAFETY = 100;
     private final PreparedLayer layer;
@@ -82,6 +84,17 @@ final class TotalSums implements AnnualSums {
     }
 
     @Override
+    public double cap() {
+        return layer.cap();
+    }
+
+    /** The second moment of dependent totals is read from the lattice, which ends. */
+    @Override
+    public double capPassed() {
+        return Double.NaN;
+    }
+
+    @Override
     public SumFacts facts(LatticeSum finest) {
         double mean = 0;
         double expectedEvents = 0;
@@ -111,7 +124,7 @@ final class TotalSums implements AnnualSums {
             noise += spread.noise();
             ranges[i] = totals.get(i).range(alone[i], level, spread, new double[] {layer.meanCounts()[i]});
         }
-        double error = (SAFETY * wantedError() + 10 * layer.cutCounts() + 2 * noise) * end();
+        double error = (SAFETY * (ordered() ? wantedError() : ROUNDED_ERROR) + 10 * layer.cutCounts() + 2 * noise) * end();
         return ordered() ? joined(ranges).of(layer.terms(), end(), error) : rounded(ranges, error);
     }
 
@@ -132,7 +145,7 @@ final class TotalSums implements AnnualSums {
     }
 
     private double[] joint(CountMargin[] margins) {
-        return DependentSum.survival(copula, layer.perils(), margins, wantedError());
+        return DependentSum.survival(copula, layer.perils(), margins, ordered() ? wantedError() : ROUNDED_ERROR);
     }
 
     /** The layer's loss rises with each total, so that totals rounded down and up give less and more of it under any copula. */
