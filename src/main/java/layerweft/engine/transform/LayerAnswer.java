@@ -121,6 +121,8 @@ final class LayerAnswer {
             latticeError[f] = figure.error();
             means[f] = new Figure(figure.value(), figure.error() + (f == 0 ? floor : Math.max(floor, floor() * (sums.end() - terms.deductible()))));
         }
+        double deviation = means[1].value();
+        means[1] = new Figure(deviation, means[1].error() + (deviation > 0 ? facts.secondMomentError() / (2 * deviation) : 0));
         points = points();
     }
 
