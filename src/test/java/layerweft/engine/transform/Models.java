@@ -43,7 +43,7 @@ public final class Models {
 
     /** Stop loss: limit in excess of deductible for the year, no occurrence terms. */
     public static Layer stopLoss(double limit, double deductible) {
-        return Layer.of("stop " + deductible, OccurrenceTerms.NONE, new AnnualTerms(deductible, limit));
+        return Layer.of("stop " + limit + " xs " + deductible, OccurrenceTerms.NONE, new AnnualTerms(deductible, limit));
     }
 
     public static DiscreteLosses losses(double[] amounts, double[] probabilities) {
