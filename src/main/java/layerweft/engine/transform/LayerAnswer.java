@@ -137,6 +137,8 @@ final class LayerAnswer {
             double beyond = f == DISTORTED && !Double.isNaN(figure.value()) ? figures(levels[2]).distortedBeyond(loading, sums.cap(), sums.capPassed()) : 0;
             means[f] = new Figure(figure.value(), figure.error() + beyond + (f == 0 ? floor + unlimited : Math.max(floor, floor() * (sums.end() - terms.deductible()))));
         }
+        double deviation = means[1].value();
+        means[1] = new Figure(deviation, means[1].error() + (deviation > 0 ? facts.secondMomentError() / (2 * deviation) : 0));
         points = points();
     }
 

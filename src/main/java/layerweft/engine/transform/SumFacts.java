@@ -6,9 +6,10 @@ package layerweft.engine.transform;
  * @param lossChance P(A &gt; 0)
  * @param mean E[A]
  * @param secondMoment E[A²]
+ * @param secondMomentError of E[A²]; 0 where it is exact
  * @param expectedEvents events a year with an occurrence loss above 0
  */
-record SumFacts(double lossChance, double mean, double secondMoment, double expectedEvents) {
+record SumFacts(double lossChance, double mean, double secondMoment, double secondMomentError, double expectedEvents) {
 
     /**
      * From E[A] = Σ E[N_i]·E[o_i] and E[A²] = Σ E[N_i]·E[o_i²] + Σ E[N_i(N_i−1)]·E[o_i]² + 2 Σ_{i&lt;j} E[N_i N_j]·E[o_i]·E[o_j].
@@ -30,7 +31,7 @@ record SumFacts(double lossChance, double mean, double secondMoment, double expe
             expectedEvents += means[i] * hits[i];
         }
         if (Double.isInfinite(second) || Double.isInfinite(mean)) {
-            return new SumFacts(JointDeficit.at(nodes, hits), mean, Double.POSITIVE_INFINITY, expectedEvents);
+            return new SumFacts(JointDeficit.at(nodes, hits), mean, Double.POSITIVE_INFINITY, 0, expectedEvents);
         }
         for (int k = 0; k < nodes.size(); k++) {
             double sum = 0;
@@ -42,6 +43,6 @@ record SumFacts(double lossChance, double mean, double secondMoment, double expe
             }
             second += nodes.weights()[k] * (sum * sum + ownPairs);
         }
-        return new SumFacts(JointDeficit.at(nodes, hits), mean, second, expectedEvents);
+        return new SumFacts(JointDeficit.at(nodes, hits), mean, second, 0, expectedEvents);
     }
 }

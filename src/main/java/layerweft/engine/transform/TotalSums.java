@@ -27,6 +27,8 @@ final class TotalSums implements AnnualSums {
     private final Copula copula;
     private final double nothing;
     private final Map<Integer, LatticeSum> known = new HashMap<>();
+    /** E[min(S_i, end)²] of each total, by the number of the lattice's cells. */
+    private final Map<Integer, double[]> secondMomentsToEnd = new HashMap<>();
 
     /**
      * @param totals for each peril that can reach the layer the lattice of its total
@@ -52,12 +54,15 @@ final class TotalSums implements AnnualSums {
         }
         CountMargin[] margins = new CountMargin[totals.size()];
         double noise = 0;
+        double[] secondMoments = new double[margins.length];
         for (int i = 0; i < margins.length; i++) {
             LatticeSum total = totals.get(i).sum(alone[i], level, new double[] {0});
+            secondMoments[i] = total.pieces(0, end()).secondMoment();
             noise += total.noise();
             margins[i] = margin(total.mean());
         }
         double[] mean = DependentSum.survival(copula, layer.perils(), margins, wantedError());
+        secondMomentsToEnd.put(mean.length, secondMoments);
         return new LatticeSum(layer.lattice().step(level), mean, 2 * end(), new double[] {0}, noise + 1e-14);
     }
 
@@ -102,9 +107,31 @@ final class TotalSums implements AnnualSums {
             mean += layer.meanCounts()[i] * layer.moments()[i].mean();
             expectedEvents += layer.meanCounts()[i] * layer.moments()[i].hitChance();
         }
-        double second = Arrays.stream(layer.moments()).anyMatch(e -> Double.isInfinite(e.secondMoment())) ? Double.POSITIVE_INFINITY
-                : finest.pieces(0, end()).secondMoment();
-        return new SumFacts(1 - nothing, mean, second, expectedEvents);
+        if (Arrays.stream(layer.moments()).anyMatch(e -> Double.isInfinite(e.secondMoment()))) {
+            return new SumFacts(1 - nothing, mean, Double.POSITIVE_INFINITY, 0, expectedEvents);
+        }
+        double upToEnd = finest.pieces(0, end()).secondMoment();
+        double[] whole = new double[totals.size()];
+        double[] beyond = new double[whole.length];
+        Arrays.setAll(whole, this::secondMomentAlone);
+        Arrays.setAll(beyond, i -> Math.max(0, whole[i] - secondMomentsToEnd.get(finest.mean().length)[i]));
+        return new SumFacts(1 - nothing, mean, upToEnd + Arrays.stream(beyond).sum(), crossTerms(beyond, whole), expectedEvents);
+    }
+
+    /** E[S_i²] of one total, exact. */
+    private double secondMomentAlone(int i) {
+        return SumFacts.of(new PreparedLayer.EventMoments[] {layer.moments()[i]}, new double[] {layer.meanCounts()[i]}, alone[i]).secondMoment();
+    }
+
+    /** Where one total alone is beyond the lattice, what it makes with the others: E[S_i S_j; S_i beyond]² ≤ E[S_i²; S_i beyond]·E[S_j²]. */
+    private static double crossTerms(double[] beyond, double[] whole) {
+        double sum = 0;
+        for (int i = 0; i < beyond.length; i++) {
+            for (int j = 0; j < whole.length; j++) {
+                sum += i == j ? 0 : 2 * Math.sqrt(beyond[i] * whole[j]);
+            }
+        }
+        return sum;
     }
 
     /**
