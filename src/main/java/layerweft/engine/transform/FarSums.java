@@ -5,7 +5,7 @@ import layerweft.figures.Bracket;
 /**
  * Annual sums for a layer that is reached only far up the law of A, through its annual deductible: the transforms are tilted upwards by
  * e^(rate·A), with the rate at which the tilted law has its mass about the deductible (the saddle point, Daniels 1954), so that rounding is
- * relative to the probabilities there (exponential tilting, Gr&uuml;bel &amp; Hermesmeier 1999). Counts are cut far later than usual.
+ * relative to the probabilities there (exponential tilting, Grübel &amp; Hermesmeier 1999). Counts are cut far later than usual.
  */
 final class FarSums implements AnnualSums {
     /** Counts are cut where this part of their probability is left. */
