@@ -13,6 +13,8 @@ import layerweft.figures.Figure;
  */
 final class FigureText {
     private static final int SIGNIFICANT = 4;
+    /** Most places of an agreed percentage: 99.9999999 %, 66.6666667 %. */
+    private static final int PERCENT_PLACES = 7;
     /** Places to which the error of an exact-looking 0 is told. */
     private static final int PLACES_OF_ZERO = 2;
 
@@ -58,7 +60,8 @@ final class FigureText {
 
     /** A part that a person has agreed, in percent, with the digits given: 90 %, 99.5 %. */
     static String plainPercent(double part) {
-        return new BigDecimal(Double.toString(part)).movePointRight(2).stripTrailingZeros().toPlainString() + " %";
+        return new BigDecimal(Double.toString(part)).movePointRight(2).setScale(PERCENT_PLACES, RoundingMode.HALF_UP).stripTrailingZeros()
+                .toPlainString() + " %";
     }
 
     /** The shortest plain decimal that reads back the same. */

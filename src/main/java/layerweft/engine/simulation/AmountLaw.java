@@ -111,9 +111,13 @@ final class AmountLaw {
 
     /**
      * Standard error of the quantile at a level: a quarter of the distance of the quantiles at the ends of the level's own 95 % interval
-     * (order statistics; no density need be estimated, and well inside an atom it is 0).
+     * (order statistics; no density need be estimated, and well inside an atom it is 0). Infinite where no year of the sample is expected
+     * to lie beyond the level.
      */
     double quantileError(double level) {
+        if (years * (1 - level) < 1) {
+            return Double.POSITIVE_INFINITY;
+        }
         double s = 2 * Math.sqrt(level * (1 - level) / years);
         double from = quantile(Math.max(0, level - s));
         double to = quantile(Math.min(1, level + s));

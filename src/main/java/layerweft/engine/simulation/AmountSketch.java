@@ -23,6 +23,8 @@ final class AmountSketch {
     private final double unit;
     private final double perUnit;
     private final int[][] cells = new int[OCTAVES][];
+    /** Amounts below 0, by their size; null where there are none. */
+    private AmountSketch negative;
     private long zeros;
     private long infinite;
     private long count;
@@ -46,7 +48,7 @@ final class AmountSketch {
         return few || limit == Double.POSITIVE_INFINITY ? 1 : limit;
     }
 
-    /** Counts the first {@code years} amounts, each at least 0. */
+    /** Counts the first {@code years} amounts. */
     void add(double[] amounts, int years) {
         count += years;
         for (int y = 0; y < years; y++) {
@@ -65,7 +67,11 @@ final class AmountSketch {
 
     private void add(double amount) {
         if (amount <= 0) {
-            zeros++;
+            if (amount < 0) {
+                below().add(-amount);
+            } else {
+                zeros++;
+            }
             return;
         }
         // a sum of limits may be off its edge by a rounding or two: read it as on the edge
@@ -83,6 +89,13 @@ final class AmountSketch {
         cell[2 * at + ((raw & low) <= 2 * ROUNDING ? 0 : 1)]++;
     }
 
+    private AmountSketch below() {
+        if (negative == null) {
+            negative = new AmountSketch(bits, unit);
+        }
+        return negative;
+    }
+
     private void outside(int octave) {
         if (octave < 0) {
             zeros++;
@@ -96,6 +109,9 @@ final class AmountSketch {
         count += other.count;
         zeros += other.zeros;
         infinite += other.infinite;
+        if (other.negative != null) {
+            below().merge(other.negative);
+        }
         for (int o = 0; o < OCTAVES; o++) {
             if (other.cells[o] == null) {
                 continue;
@@ -112,19 +128,30 @@ final class AmountSketch {
     /** The law of the amounts counted so far. */
     AmountLaw law() {
         AmountLaw.Builder law = new AmountLaw.Builder(count);
-        law.add(0, 0, zeros);
-        double width = Math.scalb(1.0, -bits);
-        for (int o = 0; o < OCTAVES; o++) {
-            int[] cell = cells[o];
-            for (int c = 0; cell != null && c < cell.length; c++) {
-                if (cell[c] > 0) {
-                    double low = Math.scalb(1 + (c >> 1) * width, o + FIRST_EXPONENT);
-                    double high = (c & 1) == 0 ? low : Math.scalb(1 + ((c >> 1) + 1) * width, o + FIRST_EXPONENT);
-                    law.add(low * unit, high * unit, cell[c]);
+        if (negative != null) {
+            for (int o = OCTAVES - 1; o >= 0; o--) {
+                for (int c = negative.cells[o] == null ? -1 : negative.cells[o].length - 1; c >= 0; c--) {
+                    law.add(-high(o, c), -low(o, c), negative.cells[o][c]);
                 }
+            }
+        }
+        law.add(0, 0, zeros + (negative == null ? 0 : negative.zeros));
+        for (int o = 0; o < OCTAVES; o++) {
+            for (int c = 0; cells[o] != null && c < cells[o].length; c++) {
+                law.add(low(o, c), high(o, c), cells[o][c]);
             }
         }
         law.add(Double.POSITIVE_INFINITY, Double.POSITIVE_INFINITY, infinite);
         return law.build();
+    }
+
+    /** The lower end of cell c of an octave, in money. */
+    private double low(int octave, int c) {
+        return Math.scalb(1 + Math.scalb((double) (c >> 1), -bits), octave + FIRST_EXPONENT) * unit;
+    }
+
+    /** The upper end: the lower one for the edge alone, that of the next cell for the inside. */
+    private double high(int octave, int c) {
+        return low(octave, (c & 1) == 0 ? c : c + 1);
     }
 }

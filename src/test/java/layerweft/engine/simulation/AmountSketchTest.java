@@ -71,6 +71,21 @@ class AmountSketchTest {
     }
 
     @Test
+    void amountsBelowZeroKeepTheirPlace() {
+        AmountLaw law = law(1, -100, -3, 0, 2.5, 7);
+        assertEquals(-100, law.quantile(0.2));
+        assertEquals(-3, law.quantile(0.4));
+        assertEquals(0, law.quantile(0.6));
+        assertEquals(7, law.quantile(1));
+        assertEquals((-100 - 3 + 2.5 + 7) / 5, law.mean(a -> a), 1e-12);
+    }
+
+    @Test
+    void aQuantileBeyondTheSampleHasNoError() {
+        assertEquals(Double.POSITIVE_INFINITY, law(1, 1, 2, 3, 4, 5).quantileError(0.99));
+    }
+
+    @Test
     void mergingIsTheSameAsCountingTogether() {
         SplittableRandom random = new SplittableRandom(4);
         double[] amounts = random.doubles(10_000, 0, 50).toArray();
