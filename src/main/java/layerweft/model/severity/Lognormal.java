@@ -3,6 +3,7 @@ package layerweft.model.severity;
 import java.util.function.DoubleSupplier;
 import layerweft.model.Check;
 import layerweft.model.random.KeyedStream;
+import org.apache.commons.numbers.gamma.Erfcx;
 import org.apache.commons.rng.sampling.distribution.ZigguratSampler;
 import org.apache.commons.statistics.distribution.NormalDistribution;
 
@@ -15,6 +16,7 @@ import org.apache.commons.statistics.distribution.NormalDistribution;
  */
 public record Lognormal(double mu, double sigma) implements SeverityModel {
     private static final NormalDistribution NORMAL = NormalDistribution.of(0, 1);
+    private static final double ROOT_HALF = Math.sqrt(0.5);
 
     public Lognormal {
         new Check().finite("mu", mu).positive("sigma", sigma).orThrow();
@@ -72,7 +74,8 @@ public record Lognormal(double mu, double sigma) implements SeverityModel {
 
     @Override
     public double layerMean(double from, double to) {
-        if (from <= 0 || z(from, 0) < 0) {
+        // stop losses keep the digits of far layers, but are differences of infinities where the mean is beyond the range of numbers
+        if (from <= 0 || z(from, 0) < 0 || z(from, 1) <= 0 && moment(1) == Double.POSITIVE_INFINITY) {
             return limitedMean(to) - limitedMean(from);
         }
         return stopLoss(from) - stopLoss(to);
@@ -97,7 +100,7 @@ public record Lognormal(double mu, double sigma) implements SeverityModel {
         return Math.exp(k * mu + k * k * sigma * sigma / 2);
     }
 
-    /** E[min(X, x)^k] = E[X^k]·Φ((ln x − μ − kσ²)/σ) + x^k·P(X &gt; x). */
+    /** E[min(X, x)^k] = E[X^k; X ≤ x] + x^k·P(X &gt; x), with E[X^k; X ≤ x] = E[X^k]·Φ((ln x − μ − kσ²)/σ). */
     private double limitedMoment(int k, double x) {
         if (x <= 0) {
             return 0;
@@ -105,13 +108,32 @@ public record Lognormal(double mu, double sigma) implements SeverityModel {
         if (x == Double.POSITIVE_INFINITY) {
             return moment(k);
         }
-        double beyond = k == 1 ? x * survival(x) : x * (x * survival(x));
-        return moment(k) * NORMAL.cumulativeProbability(z(x, k)) + beyond;
+        double z = z(x, k);
+        double tail = survival(x);
+        if (z > 0) {
+            // x·(x·P) and not x²·P: the square alone may be beyond the range of numbers
+            return moment(k) * NORMAL.cumulativeProbability(z) + (k == 1 ? x * tail : x * (x * tail));
+        }
+        double scaled = scaledTail(x, -z) + tail;
+        return k == 1 ? x * scaled : x * (x * scaled);
     }
 
-    /** E[(X − d)+] from tail probabilities, so that it keeps its digits far up. */
+    /** E[(X − d)+] = E[X; X &gt; d] − d·P(X &gt; d), for d above the median; keeps its digits however far up, even where E[X] overflows. */
     private double stopLoss(double d) {
-        return d == Double.POSITIVE_INFINITY ? 0 : moment(1) * NORMAL.survivalProbability(z(d, 1)) - d * survival(d);
+        if (d == Double.POSITIVE_INFINITY) {
+            return 0;
+        }
+        double z = z(d, 1);
+        return z > 0 ? d * (scaledTail(d, z) - scaledTail(d, z(d, 0))) : moment(1) * NORMAL.survivalProbability(z) - d * survival(d);
+    }
+
+    /**
+     * e^(−z₀²/2)·erfcx(z/√2)/2 with z₀ = (ln x − μ)/σ and z ≥ 0. Because E[X^k]·φ(z₀ − kσ) = x^k·φ(z₀), this is Φ(−z)·E[X^k]/x^k at
+     * z = ±(z₀ − kσ), without the moment, which may be beyond the range of numbers.
+     */
+    private double scaledTail(double x, double z) {
+        double z0 = z(x, 0);
+        return 0.5 * Math.exp(-0.5 * z0 * z0) * Erfcx.value(z * ROOT_HALF);
     }
 
     private record Sampler(double mu, double sigma) implements SeveritySampler {

@@ -1,6 +1,10 @@
 package layerweft.model.severity;
 
+import java.util.function.DoublePredicate;
+import java.util.function.DoubleSupplier;
+import java.util.function.DoubleUnaryOperator;
 import layerweft.model.Check;
+import layerweft.model.random.KeyedStream;
 
 /**
  * Body and tail from different laws: P(X &gt; threshold) = tailWeight; below, the body's law given X ≤ threshold; above, the tail's law
@@ -87,9 +91,36 @@ public record Spliced(SeverityModel body, double threshold, SeverityModel tail, 
 
     @Override
     public SeveritySampler sampler() {
-        return stream -> () -> stream.nextDouble() < tailWeight
-                ? tailQuantile(tailWeight * stream.nextOpen())
-                : bodyQuantile((1 - tailWeight) * stream.nextOpen());
+        Part low = part(body, body.cdf(threshold), u -> bodyQuantile((1 - tailWeight) * u), x -> x <= threshold);
+        Part high = part(tail, tail.survival(threshold), u -> tailQuantile(tailWeight * u), x -> x > threshold);
+        return stream -> {
+            DoubleSupplier below = low.bind(stream);
+            DoubleSupplier above = high.bind(stream);
+            return () -> stream.nextDouble() < tailWeight ? above.getAsDouble() : below.getAsDouble();
+        };
+    }
+
+    /** One side of the threshold as a source of losses. */
+    private interface Part {
+        DoubleSupplier bind(KeyedStream stream);
+    }
+
+    /** By the model's own sampler, drawing again until the loss is on the right side, where that is likely; else by the quantile. */
+    private static Part part(SeverityModel model, double chance, DoubleUnaryOperator quantile, DoublePredicate inside) {
+        if (chance < 0.5) {
+            return stream -> () -> quantile.applyAsDouble(stream.nextOpen());
+        }
+        SeveritySampler sampler = model.sampler();
+        return stream -> {
+            DoubleSupplier losses = sampler.bind(stream);
+            return () -> {
+                double x = losses.getAsDouble();
+                while (!inside.test(x)) {
+                    x = losses.getAsDouble();
+                }
+                return x;
+            };
+        };
     }
 
     /** Density of X by that of the body, below the threshold. */
