@@ -13,7 +13,7 @@ import picocli.CommandLine.Spec;
 
 /** {@code rank}: which assumption moves a price most. */
 @Command(name = "rank", sortOptions = false, mixinStandardHelpOptions = true, versionProvider = Version.class,
-        description = "Rank assumptions by how much they move a figure: 0.1 of Kendall's τ, another family, 10 % of each peril's frequency, "
+        description = "Rank assumptions by how much they move a figure: 0.1 of Kendall's τ, another family, 10 %% of each peril's frequency, "
                 + "severity and tail, one at a time.",
         footerHeading = "%nExamples:%n", footer = {
             "  rank book.json cats.json",
