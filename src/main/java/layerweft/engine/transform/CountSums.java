@@ -7,12 +7,13 @@ final class CountSums implements AnnualSums {
     /** Factor on measured errors of joint probabilities in a guaranteed range. */
     private static final double SAFETY = 10;
     private final PreparedLayer layer;
-    private final LatentNodes nodes;
+    private final JointLaw nodes;
     private final LayerLattice lattice;
     private final SumFacts facts;
     private final double[] atomSurvival;
 
-    CountSums(PreparedLayer layer, LatentNodes nodes) {
+    /** @param nodes the joint law of the counts, best of those events alone that hit the layer */
+    CountSums(PreparedLayer layer, JointLaw nodes) {
         this.layer = layer;
         this.nodes = nodes;
         this.lattice = layer.lattice();
@@ -67,7 +68,7 @@ final class CountSums implements AnnualSums {
 
     @Override
     public double jointError() {
-        return nodes.error() + layer.cutCounts() + layer.chanceError();
+        return nodes.error() + JointLaw.NEGLIGIBLE + layer.cutCounts() + layer.chanceError();
     }
 
     @Override
@@ -97,7 +98,7 @@ final class CountSums implements AnnualSums {
             return new Bracket(0, 0);
         }
         LatticeSum spread = sum(level);
-        double joint = SAFETY * (nodes.error() + layer.cutCounts()) * Math.max(1, layer.events().size() - 1);
+        double joint = SAFETY * (nodes.error() + JointLaw.NEGLIGIBLE + layer.cutCounts()) * Math.max(1, layer.events().size() - 1);
         return lattice.range(nodes, level, spread, layer.meanCounts()).of(layer.terms(), end(), (joint + 2 * spread.noise()) * weightOfErrors());
     }
 }

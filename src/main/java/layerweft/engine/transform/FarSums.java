@@ -15,7 +15,7 @@ final class FarSums implements AnnualSums {
     private static final double LARGEST_EXPONENT = 500;
     private final PreparedLayer layer;
     private final AnnualSums usual;
-    private final LatentNodes nodes;
+    private final JointLaw nodes;
     private final LayerLattice lattice;
     private final double rate;
     private final double[] atomSurvival;
@@ -24,7 +24,7 @@ final class FarSums implements AnnualSums {
      * @param usual the same sums, which are better below the deductible
      * @param nodes the counts' joint law, with {@link #COUNT_TAIL} and {@link #PROBABILITIES}
      */
-    FarSums(PreparedLayer layer, AnnualSums usual, LatentNodes nodes) {
+    FarSums(PreparedLayer layer, AnnualSums usual, JointLaw nodes) {
         this.layer = layer;
         this.usual = usual;
         this.nodes = nodes;

@@ -59,7 +59,7 @@ final class FrailtyNodes {
         return logs;
     }
 
-    private static double[] logInverse(Generator generator, boolean survival, CountMargin margin) {
+    static double[] logInverse(Generator generator, boolean survival, CountMargin margin) {
         double[] a = new double[margin.size()];
         for (int n = 0; n < a.length; n++) {
             a[n] = survival ? generator.logInverse(margin.survival()[n], margin.cdf()[n])
@@ -68,7 +68,7 @@ final class FrailtyNodes {
         return a;
     }
 
-    private static double[] conditional(double[] logInverse, double logFrailty, boolean survival) {
+    static double[] conditional(double[] logInverse, double logFrailty, boolean survival) {
         double[] s = new double[logInverse.length];
         for (int n = 0; n < s.length; n++) {
             double x = logFrailty + logInverse[n];
@@ -81,6 +81,11 @@ final class FrailtyNodes {
             }
         }
         return s;
+    }
+
+    /** Error of joint probabilities that a rule for these counts makes. */
+    static double error(Generator generator, FrailtyRule rule, boolean survival, CountMargin[] margins) {
+        return SAFETY * measured(generator, rule, logInverses(generator, survival, margins));
     }
 
     /**

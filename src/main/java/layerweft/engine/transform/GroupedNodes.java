@@ -45,7 +45,7 @@ final class GroupedNodes {
         return branches;
     }
 
-    private static boolean holds(Group group, int peril) {
+    static boolean holds(Group group, int peril) {
         return group.members().contains(peril) || group.groups().stream().anyMatch(g -> holds(g, peril));
     }
 

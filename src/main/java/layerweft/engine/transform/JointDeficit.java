@@ -8,20 +8,15 @@ package layerweft.engine.transform;
 final class JointDeficit {
     /** Frequencies handled together: the working arrays stay in the nearest cache. */
     private static final int BLOCK = 128;
-    private static final double NEGLIGIBLE = 1e-14;
 
     private JointDeficit() {
     }
 
     /**
      * @param deficits peril × {real, imaginary} × frequency
+     * @param negligible high counts of this probability in all may be left out; 0 where the transforms are tilted upwards
      * @return {real, imaginary} × frequency
      */
-    static double[][] of(LatentNodes nodes, double[][][] deficits) {
-        return of(nodes, deficits, NEGLIGIBLE);
-    }
-
-    /** @param negligible probabilities of high counts below this are left out; 0 where the transforms are tilted upwards */
     static double[][] of(LatentNodes nodes, double[][][] deficits, double negligible) {
         int perils = deficits.length;
         int count = perils == 0 ? 0 : deficits[0][0].length;
@@ -58,17 +53,56 @@ final class JointDeficit {
 
     private static int[][] lengths(LatentNodes nodes, double negligible) {
         int[][] lengths = new int[nodes.perils()][nodes.size()];
+        double each = negligible / (nodes.perils() * nodes.size());
         for (int i = 0; i < nodes.perils(); i++) {
             for (int k = 0; k < nodes.size(); k++) {
                 double[] s = nodes.survival()[i][k];
                 int n = s.length;
-                while (n > 0 && s[n - 1] * nodes.weights()[k] < negligible) {
+                double left = each;
+                while (n > 0 && (left -= Math.abs(s[n - 1] * nodes.weights()[k])) > 0) {
                     n--;
                 }
                 lengths[i][k] = n;
             }
         }
         return lengths;
+    }
+
+    /**
+     * Joins one peril's counts to what is there: r ← r + x − r·x, x = w·h.
+     *
+     * @param h to work in
+     * @param r {real, imaginary} × frequency of the block, 0 where nothing is there yet
+     */
+    static void join(double[] survival, double[] wr, double[] wi, int from, double[][] h, double[][] r, int size) {
+        int length = survival.length;
+        if (length == 0) {
+            return;
+        }
+        java.util.Arrays.fill(h[0], 0, size, survival[length - 1]);
+        java.util.Arrays.fill(h[1], 0, size, 0);
+        for (int n = length - 2; n >= 0; n--) {
+            double s = survival[n];
+            for (int f = 0; f < size; f++) {
+                double p = 1 - wr[from + f];
+                double q = -wi[from + f];
+                double a = h[0][f];
+                double b = h[1][f];
+                h[0][f] = Math.fma(a, p, Math.fma(-b, q, s));
+                h[1][f] = Math.fma(a, q, b * p);
+            }
+        }
+        join(wr, wi, from, h[0], h[1], r[0], r[1], size, false);
+    }
+
+    /** The same for a deficit x + iy. */
+    static void join(double[] x, double[] y, double[][] r, int size) {
+        for (int f = 0; f < size; f++) {
+            double a = r[0][f];
+            double b = r[1][f];
+            r[0][f] = a + x[f] - (a * x[f] - b * y[f]);
+            r[1][f] = b + y[f] - (a * y[f] + b * x[f]);
+        }
     }
 
     private static void horner(double[] survival, int length, double[] pr, double[] pi, double[] hr, double[] hi, int size) {

@@ -9,12 +9,12 @@ import layerweft.model.treaty.LayerTerms;
  */
 final class LargestEvent {
     private final List<EventLaw> events;
-    private final LatentNodes nodes;
+    private final JointLaw nodes;
     private final LayerTerms terms;
     /** Largest occurrence loss that makes a difference. */
     private final double most;
 
-    LargestEvent(List<EventLaw> events, LatentNodes nodes, LayerTerms terms) {
+    LargestEvent(List<EventLaw> events, JointLaw nodes, LayerTerms terms) {
         this.events = events;
         this.nodes = nodes;
         this.terms = terms;
@@ -23,7 +23,7 @@ final class LargestEvent {
 
     /** P(max o &gt; x). */
     double survival(double x) {
-        return x >= most ? 0 : JointDeficit.at(nodes, events.stream().mapToDouble(e -> e.survival(x)).toArray());
+        return x >= most ? 0 : nodes.at(events.stream().mapToDouble(e -> e.survival(x)).toArray());
     }
 
     /** inf{x : P(recovery from the largest event ≤ x) ≥ level}, to 1e-11 of the occurrence loss. */
@@ -57,7 +57,7 @@ final class LargestEvent {
     /** P(max o ≥ most). */
     private double beforeMost() {
         return Double.isInfinite(most) ? 0
-                : JointDeficit.at(nodes, events.stream().mapToDouble(e -> e.survival(most * (1 - 1e-12))).toArray());
+                : nodes.at(events.stream().mapToDouble(e -> e.survival(most * (1 - 1e-12))).toArray());
     }
 
     /** Halving and the secant's point by turns, so that neither a jump nor a flat piece holds the search up. */

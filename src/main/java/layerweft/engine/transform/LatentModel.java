@@ -22,7 +22,7 @@ final class LatentModel {
     /** A pair without a latent factor may take so many. */
     private static final int MOST_DIFFERENCES = 4_000_000;
     /** Merging nodes may cost so many times the error wanted of a quadrature: its own error is bounded, not estimated. */
-    private static final double MERGING = 20;
+    static final double MERGING = 20;
     /**
      * Excess of θ over independence below which a copula is a mean of independence and the one at this excess: the difference is of the
      * order of WEAK², and a frailty law as narrow as a needle is avoided.
@@ -44,10 +44,6 @@ final class LatentModel {
         if (copula instanceof Student student) {
             return refusal(student.correlation(), perils);
         }
-        if (copula instanceof GroupedArchimedean grouped && perils.length > 2
-                && GroupedNodes.cost(grouped, perils, margins) > MOST_GROUP_NODES) {
-            return Optional.of("groups of the copula join too many perils with too many events for the transform");
-        }
         boolean pairOnly = copula instanceof Countermonotonic || copula instanceof Archimedean a && !a.hasFrailty();
         if (pairOnly && perils.length == 2 && DifferencedNodes.cost(margins) > MOST_DIFFERENCES) {
             return Optional.of("negative dependence between perils with too many events for the transform");
@@ -62,10 +58,22 @@ final class LatentModel {
     }
 
     /**
+     * The joint law of the counts: as nodes, or as a tree of them where groups would take too many.
+     *
      * @param perils indices in the portfolio of the perils wanted, rising
      * @param margins of these perils
      * @param error wanted of joint probabilities of the counts
      */
+    static JointLaw law(Copula copula, int[] perils, CountMargin[] margins, double error) {
+        return branched(copula, perils, margins) ? GroupTreeNodes.of((GroupedArchimedean) copula, perils, margins, error) : of(copula, perils, margins, error);
+    }
+
+    /** Whether groups take a tree of nodes, whose errors are small beside 1 but not beside chances far up the tail. */
+    static boolean branched(Copula copula, int[] perils, CountMargin[] margins) {
+        return copula instanceof GroupedArchimedean grouped && perils.length > 2 && GroupedNodes.cost(grouped, perils, margins) > MOST_GROUP_NODES;
+    }
+
+    /** The same, always as nodes. */
     static LatentNodes of(Copula copula, int[] perils, CountMargin[] margins, double error) {
         if (perils.length <= 1 || copula instanceof Independence) {
             return independent(margins);

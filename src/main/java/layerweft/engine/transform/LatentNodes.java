@@ -9,7 +9,7 @@ package layerweft.engine.transform;
  * @param survival peril × node × threshold, each in [0, 1] and falling in n
  * @param error largest error of a joint probability of the counts, as measured or bounded where the nodes were made
  */
-record LatentNodes(double[] weights, double[][][] survival, double error) {
+record LatentNodes(double[] weights, double[][][] survival, double error) implements JointLaw {
 
     int size() {
         return weights.length;
@@ -19,8 +19,59 @@ record LatentNodes(double[] weights, double[][][] survival, double error) {
         return survival.length;
     }
 
+    @Override
+    public double[][] deficit(double[][][] deficits, double negligible) {
+        return JointDeficit.of(this, deficits, negligible);
+    }
+
+    @Override
+    public double at(double[] deficits) {
+        return JointDeficit.at(this, deficits);
+    }
+
+    @Override
+    public double productMoment(double[] losses) {
+        double moment = 0;
+        for (int k = 0; k < size(); k++) {
+            double sum = 0;
+            double ownPairs = 0;
+            for (int i = 0; i < losses.length; i++) {
+                double conditional = mean(i, k) * losses[i];
+                sum += conditional;
+                ownPairs += factorialMoment(i, k) * losses[i] * losses[i] - conditional * conditional;
+            }
+            moment += weights[k] * (sum * sum + ownPairs);
+        }
+        return moment;
+    }
+
+    @Override
+    public JointLaw hits(double[] chances, double budget) {
+        double any = at(chances);
+        double[][][] thinned = new double[perils()][size()][];
+        for (int i = 0; i < perils(); i++) {
+            int longest = 0;
+            for (double[] s : survival[i]) {
+                longest = Math.max(longest, s.length);
+            }
+            double[] mean = mean(i, 0, size(), 1, longest);
+            Thinning thinning = Thinning.of(chances[i], longest);
+            double[] all = thinning.of(mean);
+            int kept = longest;
+            while (kept > 1 && all[kept - 1] < 1e-4 * NEGLIGIBLE * any) {
+                kept--;
+            }
+            thinning = thinning.first(kept);
+            for (int k = 0; k < size(); k++) {
+                thinned[i][k] = thinning.of(survival[i][k]);
+            }
+        }
+        double half = 0.5 * budget * Math.min(1, any);
+        return new HitCounts(GaussNodes.of(new LatentNodes(weights, thinned, error).merged(half), half), chances);
+    }
+
     /** E[N_i | node k] for counts cut at the last threshold. */
-    double mean(int peril, int node) {
+    private double mean(int peril, int node) {
         double sum = 0;
         for (double s : survival[peril][node]) {
             sum += s;
@@ -29,7 +80,7 @@ record LatentNodes(double[] weights, double[][][] survival, double error) {
     }
 
     /** E[N_i(N_i − 1) | node k]. */
-    double factorialMoment(int peril, int node) {
+    private double factorialMoment(int peril, int node) {
         double sum = 0;
         double[] s = survival[peril][node];
         for (int n = 1; n < s.length; n++) {
@@ -73,7 +124,7 @@ record LatentNodes(double[] weights, double[][][] survival, double error) {
                 merged[g] += weights[k];
             }
             for (int i = 0; i < perils(); i++) {
-                mean[i][g] = mean(i, start, ends[g], merged[g]);
+                mean[i][g] = mean(i, start, ends[g], merged[g], survival[i][start].length);
             }
         }
         return new LatentNodes(merged, mean, error + total);
@@ -93,12 +144,12 @@ record LatentNodes(double[] weights, double[][][] survival, double error) {
         return Math.abs(weight) * (sum * sum - sumOfSquares) / 8;
     }
 
-    private double[] mean(int peril, int start, int end, double weight) {
-        double[] mean = new double[survival[peril][start].length];
+    private double[] mean(int peril, int start, int end, double weight, int length) {
+        double[] mean = new double[length];
         for (int k = start; k < end; k++) {
             double part = weight > 0 ? weights[k] / weight : 1.0 / (end - start);
             double[] s = survival[peril][k];
-            for (int n = 0; n < mean.length; n++) {
+            for (int n = 0; n < s.length; n++) {
                 mean[n] += part * s[n];
             }
         }

@@ -26,6 +26,8 @@ final class LayerAnswer {
     private static final double RARELY_FULL = 3e-6;
     /** Width wanted of the guaranteed range, as a part of the limit. */
     private static final double NARROW = 5e-5;
+    /** A range that shrinks by less than this factor is as wide as what no lattice removes. */
+    private static final double WORTHWHILE = 0.7;
     private final AnnualSums sums;
     private final LayerTerms terms;
     private final Programme programme;
@@ -212,7 +214,11 @@ final class LayerAnswer {
             }
             level += more;
             Bracket finer = sums.bracket(level);
+            double before = bracket.high() - bracket.low();
             bracket = new Bracket(Math.max(bracket.low(), finer.low()), Math.min(bracket.high(), finer.high()));
+            if (bracket.high() - bracket.low() > WORTHWHILE * before) {
+                break;
+            }
         }
         return bracket;
     }

@@ -17,6 +17,7 @@ final class LayerLattice {
     /** Cells kept beyond the end, for one-sided slopes there. */
     private static final int MARGIN = 4;
     private final List<EventLaw> events;
+    private final double[] hitChances;
     private final double cap;
     private final double end;
     private final double firstStep;
@@ -44,6 +45,7 @@ final class LayerLattice {
      */
     LayerLattice(List<EventLaw> events, double cap, double end, double[] terms) {
         this.events = events;
+        this.hitChances = events.stream().mapToDouble(EventLaw::hitChance).toArray();
         this.cap = cap;
         this.end = end;
         double[] landmarks = events.stream().flatMapToDouble(e -> DoubleStream.of(e.landmarks())).distinct().toArray();
@@ -53,6 +55,7 @@ final class LayerLattice {
 
     private LayerLattice(LayerLattice whole, List<EventLaw> events, double upward) {
         this.events = events;
+        this.hitChances = events.stream().mapToDouble(EventLaw::hitChance).toArray();
         this.upward = upward;
         this.cap = whole.cap;
         this.end = whole.end;
@@ -72,7 +75,7 @@ final class LayerLattice {
     }
 
     /** E[e^(rate·A)] for the capped losses on the coarsest lattice. */
-    double exponentialMoment(LatentNodes nodes, double rate) {
+    double exponentialMoment(JointLaw nodes, double rate) {
         double step = step(0);
         int cells = LatticeStep.cells(cap, step);
         double[] deficits = new double[events.size()];
@@ -82,7 +85,7 @@ final class LayerLattice {
                 deficits[i] -= Math.expm1(rate * step) * survival[k] * Math.exp(rate * step * k);
             }
         }
-        return 1 - JointDeficit.at(nodes, deficits);
+        return 1 - nodes.at(deficits);
     }
 
     double end() {
@@ -122,7 +125,7 @@ final class LayerLattice {
      *
      * @param atomSurvival from {@link #atomSurvival}
      */
-    LatticeSum sum(LatentNodes nodes, int level, double[] atomSurvival) {
+    LatticeSum sum(JointLaw nodes, int level, double[] atomSurvival) {
         Level at = level(level);
         double[] mean = survival(nodes, at);
         double top = mean.length > 0 ? mean[0] : 0;
@@ -137,7 +140,7 @@ final class LayerLattice {
      * @param spread the sum of this level
      * @param meanCounts E[N_i] of the perils
      */
-    StopLossRange range(LatentNodes nodes, int level, LatticeSum spread, double[] meanCounts) {
+    StopLossRange range(JointLaw nodes, int level, LatticeSum spread, double[] meanCounts) {
         Ordered at = ordered.computeIfAbsent(level, this::ordered);
         double[] upper = at.upper == level(level) ? spread.mean() : survival(nodes, at.upper);
         double[] totals = new double[9];
@@ -165,7 +168,7 @@ final class LayerLattice {
         return new Ordered(laws, spread ? level(level) : make(upper, level), make(lower, level));
     }
 
-    private double[] survival(LatentNodes nodes, Level at) {
+    private double[] survival(JointLaw nodes, Level at) {
         double[][] deficit = deficit(nodes, at);
         double[] mean = at.spectrum.survival(deficit[0], deficit[1], at.wanted);
         // rounding may not make a probability negative or rise
@@ -175,8 +178,8 @@ final class LayerLattice {
         return mean;
     }
 
-    private double[][] deficit(LatentNodes nodes, Level at) {
-        return upward > 0 ? JointDeficit.of(nodes, at.deficits, 0) : JointDeficit.of(nodes, at.deficits);
+    private double[][] deficit(JointLaw nodes, Level at) {
+        return nodes.deficit(at.deficits, upward > 0 ? 0 : JointLaw.NEGLIGIBLE * nodes.at(hitChances));
     }
 
     private Level level(int level) {
@@ -257,11 +260,11 @@ final class LayerLattice {
     }
 
     /** P(A &gt; k·(step of the atoms), A an atom), k = 0, 1, … */
-    double[] atomSurvival(LatentNodes nodes) {
+    double[] atomSurvival(JointLaw nodes) {
         Level at = atoms();
         double[][] deficit = deficit(nodes, at);
         // a year with any loss that is no atom is no atom: U at infinity, taken off before the inverse transform
-        double constant = JointDeficit.at(nodes, at.lost);
+        double constant = nodes.at(at.lost);
         for (int j = 0; j < deficit[0].length; j++) {
             deficit[0][j] -= constant;
         }

@@ -115,6 +115,11 @@ record PreparedLayer(LayerTerms terms, int[] perils, List<EventLaw> events, Even
         return weight;
     }
 
+    /** P(an event hits) by peril, above 0. */
+    double[] hitChances() {
+        return events.stream().mapToDouble(EventLaw::hitChance).toArray();
+    }
+
     /** Error of E[A] where the means of events are not known in closed form. */
     double meanError() {
         double error = 0;

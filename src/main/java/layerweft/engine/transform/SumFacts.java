@@ -16,7 +16,7 @@ record SumFacts(double lossChance, double mean, double secondMoment, double seco
      *
      * @param means E[N_i]
      */
-    static SumFacts of(PreparedLayer.EventMoments[] events, double[] means, LatentNodes nodes) {
+    static SumFacts of(PreparedLayer.EventMoments[] events, double[] means, JointLaw nodes) {
         int d = events.length;
         double mean = 0;
         double second = 0;
@@ -31,18 +31,9 @@ record SumFacts(double lossChance, double mean, double secondMoment, double seco
             expectedEvents += means[i] * hits[i];
         }
         if (Double.isInfinite(second) || Double.isInfinite(mean)) {
-            return new SumFacts(JointDeficit.at(nodes, hits), mean, Double.POSITIVE_INFINITY, 0, expectedEvents);
+            return new SumFacts(nodes.at(hits), mean, Double.POSITIVE_INFINITY, 0, expectedEvents);
         }
-        for (int k = 0; k < nodes.size(); k++) {
-            double sum = 0;
-            double ownPairs = 0;
-            for (int i = 0; i < d; i++) {
-                double conditional = nodes.mean(i, k) * losses[i];
-                sum += conditional;
-                ownPairs += nodes.factorialMoment(i, k) * losses[i] * losses[i] - conditional * conditional;
-            }
-            second += nodes.weights()[k] * (sum * sum + ownPairs);
-        }
-        return new SumFacts(JointDeficit.at(nodes, hits), mean, second, 0, expectedEvents);
+        second += nodes.productMoment(losses);
+        return new SumFacts(nodes.at(hits), mean, second, 0, expectedEvents);
     }
 }

@@ -27,7 +27,7 @@ public final class TransformEngine {
     private final Accuracy accuracy;
     private final Copula copula;
     private final Shared shared;
-    private final Map<List<Integer>, LatentNodes> nodes = new HashMap<>();
+    private final Map<List<Integer>, JointLaw> nodes = new HashMap<>();
 
     /** What all copulas share, filled as layers are asked for. */
     private static final class Shared {
@@ -149,15 +149,19 @@ public final class TransformEngine {
     private LayerAnswer answer(int layer, AnnualSums sums) {
         LayerAnswer answer = new LayerAnswer(sums, treaty.layer(layer).terms(), treaty.programme(), accuracy, shared.levels.getOrDefault(layer, 0));
         shared.levels.merge(layer, answer.level(), Math::max);
-        boolean far = answer.reachedRarely(FAR) && sums instanceof CountSums;
+        boolean far = answer.reachedRarely(FAR) && sums instanceof CountSums && !branched(shared.layers.get(layer).perils());
         return far ? new LayerAnswer(farSums(layer, sums), treaty.layer(layer).terms(), treaty.programme(), accuracy, answer.level()) : answer;
+    }
+
+    private boolean branched(int[] perils) {
+        return LatentModel.branched(copula, perils, Arrays.stream(perils).mapToObj(this::margin).toArray(CountMargin[]::new));
     }
 
     private FarSums farSums(int layer, AnnualSums usual) {
         PreparedLayer prepared = shared.layers.get(layer);
         CountMargin[] margins = Arrays.stream(prepared.perils())
                 .mapToObj(i -> CountMargin.of(treaty.portfolio().perils().get(i).frequency(), FarSums.COUNT_TAIL)).toArray(CountMargin[]::new);
-        return new FarSums(prepared, usual, LatentModel.of(copula, prepared.perils(), margins, FarSums.PROBABILITIES));
+        return new FarSums(prepared, usual, LatentModel.law(copula, prepared.perils(), margins, FarSums.PROBABILITIES));
     }
 
     private void require(int layer) {
@@ -171,7 +175,7 @@ public final class TransformEngine {
         if (totalsJoined() && prepared.perils().length > 1) {
             return totals(layer, prepared);
         }
-        return new CountSums(prepared, nodes(prepared.perils()));
+        return new CountSums(prepared, nodes(prepared.perils()).hits(prepared.hitChances(), LatentModel.MERGING * accuracy.ofProbabilities()));
     }
 
     private PreparedLayer prepared(int layer) {
@@ -182,12 +186,12 @@ public final class TransformEngine {
         return treaty.portfolio().dependence().links() == Dependence.Links.ANNUAL_TOTALS;
     }
 
-    private LatentNodes nodes(int[] perils) {
+    private JointLaw nodes(int[] perils) {
         List<Integer> key = Arrays.stream(perils).boxed().toList();
-        LatentNodes known = nodes.get(key);
+        JointLaw known = nodes.get(key);
         if (known == null) {
             CountMargin[] margins = Arrays.stream(perils).mapToObj(this::margin).toArray(CountMargin[]::new);
-            known = LatentModel.of(copula, perils, margins, accuracy.ofProbabilities());
+            known = LatentModel.law(copula, perils, margins, accuracy.ofProbabilities());
             nodes.put(key, known);
         }
         return known;
