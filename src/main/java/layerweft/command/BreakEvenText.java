@@ -3,6 +3,7 @@ package layerweft.command;
 import java.util.List;
 import java.util.stream.Collectors;
 import layerweft.figures.Figure;
+import layerweft.figures.FigureText;
 import layerweft.study.BreakEven;
 
 /** Break-even strengths as text: a row for each family. */

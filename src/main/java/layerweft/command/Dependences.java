@@ -1,6 +1,7 @@
 package layerweft.command;
 
 import layerweft.figures.Figure;
+import layerweft.figures.FigureText;
 import layerweft.model.copula.Copula;
 import layerweft.model.copula.Independence;
 import layerweft.model.portfolio.Dependence;

@@ -2,6 +2,7 @@ package layerweft.command;
 
 import java.util.Locale;
 import layerweft.figures.Figure;
+import layerweft.figures.FigureText;
 import layerweft.model.portfolio.Portfolio;
 import layerweft.study.FigureKind;
 

@@ -8,6 +8,7 @@ import com.fasterxml.jackson.databind.node.ObjectNode;
 import java.util.Map;
 import java.util.SortedMap;
 import layerweft.figures.Figure;
+import layerweft.figures.FigureText;
 
 /** Figures as JSON: an infinite figure is the text "infinity", an undefined one null. */
 final class Json {

@@ -4,6 +4,7 @@ import java.util.ArrayList;
 import java.util.Arrays;
 import java.util.List;
 import java.util.function.DoubleFunction;
+import layerweft.figures.FigureText;
 
 /** Curves over one axis in the characters of a terminal: a letter for each curve, {@code *} where several share a place. */
 final class LineChart {

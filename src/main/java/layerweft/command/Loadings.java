@@ -1,5 +1,6 @@
 package layerweft.command;
 
+import layerweft.figures.FigureText;
 import layerweft.model.treaty.Loading;
 
 /** The loading principles in words. */

@@ -3,6 +3,7 @@ package layerweft.command;
 import java.util.List;
 import java.util.SortedMap;
 import layerweft.figures.Figure;
+import layerweft.figures.FigureText;
 import layerweft.figures.LayerFigures;
 import layerweft.figures.PositionStatistics;
 import layerweft.figures.ReturnPeriods;

@@ -7,6 +7,7 @@ import java.util.SortedMap;
 import layerweft.figures.BuyerPosition;
 import layerweft.figures.Engine;
 import layerweft.figures.Figure;
+import layerweft.figures.FigureText;
 import layerweft.figures.LayerFigures;
 import layerweft.figures.PositionStatistics;
 import layerweft.figures.ReturnPeriods;

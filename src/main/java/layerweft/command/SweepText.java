@@ -7,6 +7,7 @@ import java.util.List;
 import java.util.Locale;
 import java.util.stream.DoubleStream;
 import layerweft.figures.Figure;
+import layerweft.figures.FigureText;
 import layerweft.model.copula.CopulaFamily;
 import layerweft.model.portfolio.Dependence;
 import layerweft.model.portfolio.Portfolio;

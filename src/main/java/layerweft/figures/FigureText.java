@@ -1,17 +1,16 @@
-package layerweft.command;
+package layerweft.figures;
 
 import java.math.BigDecimal;
 import java.math.RoundingMode;
 import java.text.DecimalFormat;
 import java.text.DecimalFormatSymbols;
 import java.util.Locale;
-import layerweft.figures.Figure;
 
 /**
  * Numbers as a practitioner reads them: digits follow the error (one significant digit of it, the value to the same place), at most four
  * significant digits where there is no error to speak of; thousands are grouped.
  */
-final class FigureText {
+public final class FigureText {
     private static final int SIGNIFICANT = 4;
     /** Most places of an agreed percentage: 99.9999999 %, 66.6666667 %. */
     private static final int PERCENT_PLACES = 7;
@@ -21,12 +20,12 @@ final class FigureText {
     private FigureText() {}
 
     /** The value alone. */
-    static String value(Figure figure) {
+    public static String value(Figure figure) {
         return special(figure) != null ? special(figure) : grouped(figure.value(), places(figure));
     }
 
     /** The error alone, to the places of the value; empty where the figure is exact. */
-    static String error(Figure figure) {
+    public static String error(Figure figure) {
         if (!figure.defined() || figure.infinite() || figure.error() == 0) {
             return "";
         }
@@ -39,17 +38,17 @@ final class FigureText {
     }
 
     /** A chance or ratio in percent. */
-    static String percent(Figure figure) {
+    public static String percent(Figure figure) {
         String text = value(figure.times(100));
         return special(figure) != null ? text : text + " %";
     }
 
-    static String percentError(Figure figure) {
+    public static String percentError(Figure figure) {
         return error(figure.times(100));
     }
 
     /** "1 in 83 years" for a chance a year: three significant digits at most. */
-    static String oneIn(Figure chance) {
+    public static String oneIn(Figure chance) {
         if (!(chance.value() > 0)) {
             // none seen: rarer than the simulation can show
             return chance.error() > 0 && chance.error() < 1 ? "< 1 in " + grouped(Math.rint(1 / chance.error()), 0) : "never";
@@ -59,19 +58,19 @@ final class FigureText {
     }
 
     /** A part that a person has agreed, in percent, with the digits given: 90 %, 99.5 %. */
-    static String plainPercent(double part) {
+    public static String plainPercent(double part) {
         return new BigDecimal(Double.toString(part)).movePointRight(2).setScale(PERCENT_PLACES, RoundingMode.HALF_UP).stripTrailingZeros()
                 .toPlainString() + " %";
     }
 
     /** The shortest plain decimal that reads back the same. */
-    static String plain(double value) {
+    public static String plain(double value) {
         BigDecimal decimal = new BigDecimal(Double.toString(value)).stripTrailingZeros();
         return decimal.scale() < 0 ? decimal.setScale(0).toPlainString() : decimal.toPlainString();
     }
 
     /** An agreed amount with the digits given, thousands grouped: 12,500 or 0.75. */
-    static String groupedPlain(double value) {
+    public static String groupedPlain(double value) {
         return grouped(value, new BigDecimal(plain(value)).scale());
     }
 

@@ -1,8 +1,7 @@
-package layerweft.command;
+package layerweft.figures;
 
 import static org.junit.jupiter.api.Assertions.assertEquals;
 
-import layerweft.figures.Figure;
 import org.junit.jupiter.api.Test;
 import org.junit.jupiter.params.ParameterizedTest;
 import org.junit.jupiter.params.provider.CsvSource;
