@@ -1,5 +1,7 @@
 package layerweft.engine.transform;
 
+import java.util.HashMap;
+import java.util.Map;
 import layerweft.figures.Bracket;
 
 /** Annual sums where the copula joins the counts. */
@@ -11,6 +13,7 @@ final class CountSums implements AnnualSums {
     private final LayerLattice lattice;
     private final SumFacts facts;
     private final double[] atomSurvival;
+    private final Map<Integer, LatticeSum> known = new HashMap<>();
 
     /** @param nodes the joint law of the counts, best of those events alone that hit the layer */
     CountSums(PreparedLayer layer, JointLaw nodes) {
@@ -23,7 +26,7 @@ final class CountSums implements AnnualSums {
 
     @Override
     public LatticeSum sum(int level) {
-        return lattice.sum(nodes, level, atomSurvival);
+        return known.computeIfAbsent(level, k -> lattice.sum(nodes, k, atomSurvival));
     }
 
     @Override
@@ -89,6 +92,7 @@ final class CountSums implements AnnualSums {
             return false;
         }
         lattice.reachFurther();
+        known.clear();
         return true;
     }
 

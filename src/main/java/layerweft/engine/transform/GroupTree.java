@@ -13,9 +13,6 @@ import java.util.List;
  * @param error of joint probabilities
  */
 record GroupTree(double[] weights, Branch root, int perils, double error) implements JointLaw {
-    /** Frequencies handled together. */
-    private static final int BLOCK = 64;
-
     /**
      * A group.
      *
@@ -35,8 +32,8 @@ record GroupTree(double[] weights, Branch root, int perils, double error) implem
     public double[][] deficit(double[][][] deficits, double negligible) {
         int count = deficits[0][0].length;
         double[][] out = new double[2][count];
-        for (int from = 0; from < count; from += BLOCK) {
-            int size = Math.min(BLOCK, count - from);
+        for (int from = 0; from < count; from += JointDeficit.BLOCK) {
+            int size = Math.min(JointDeficit.BLOCK, count - from);
             double[][][] values = values(root, deficits, from, size);
             for (int k = 0; k < weights.length; k++) {
                 for (int f = 0; f < size; f++) {
@@ -52,10 +49,11 @@ record GroupTree(double[] weights, Branch root, int perils, double error) implem
     private static double[][][] values(Branch branch, double[][][] deficits, int from, int size) {
         double[][][] values = new double[branch.nodes()][2][size];
         double[][] h = new double[2][size];
+        JointDeficit.Points points = new JointDeficit.Points();
         for (int i = 0; i < branch.members.length; i++) {
-            double[][] w = deficits[branch.members[i]];
+            points.set(deficits[branch.members[i]], from, size);
             for (int k = 0; k < values.length; k++) {
-                JointDeficit.join(branch.survival[i][k], w[0], w[1], from, h, values[k], size);
+                JointDeficit.join(branch.survival[i][k], points, h, values[k], size);
             }
         }
         for (int g = 0; g < branch.inside.size(); g++) {

@@ -1,13 +1,22 @@
 package layerweft.engine.transform;
 
+import java.util.Arrays;
+
 /**
  * 1 − E[Π_i φ_i^{N_i}] for counts joined by {@link LatentNodes}, at many frequencies at once, from the deficits w_i = 1 − φ_i of the
- * perils' event laws. At a node 1 − E[φ^N] = w·Σ_n P(N &gt; n) φ^n (Horner's rule), and deficits of independent perils join as
- * r + s − rs: nothing is ever subtracted from 1, so rare layers keep their digits.
+ * perils' event laws. At a node 1 − E[φ^N] = w·Σ_n P(N &gt; n) φ^n, and deficits of independent perils join as r + s − rs: nothing is ever
+ * subtracted from 1, so rare layers keep their digits.
+ *
+ * <p>The polynomials have real coefficients, so that one real recurrence of two terms, b_n = s_n + 2 Re φ·b_{n+1} − |φ|²·b_{n+2}, takes half
+ * the work of Horner's rule (Knuth, The Art of Computer Programming, vol. 2, 4.6.4, formula (3)): Σ = s_0 + φ·b_1 − |φ|²·b_2.
+ * Its rounding grows as the square of the degree near φ = 1; long polynomials are therefore cut into short ones, joined by Horner's rule in a
+ * power of φ.
  */
 final class JointDeficit {
     /** Frequencies handled together: the working arrays stay in the nearest cache. */
-    private static final int BLOCK = 128;
+    static final int BLOCK = 128;
+    /** Coefficients of a short polynomial, a power of 2. */
+    private static final int SHORT = 16;
 
     private JointDeficit() {
     }
@@ -22,24 +31,22 @@ final class JointDeficit {
         int count = perils == 0 ? 0 : deficits[0][0].length;
         int[][] lengths = lengths(nodes, negligible);
         double[][] out = new double[2][count];
-        double[][][] phi = new double[perils][2][BLOCK];
+        Points[] points = new Points[perils];
+        Arrays.setAll(points, i -> new Points());
         double[][] h = new double[2][BLOCK];
         double[][] r = new double[2][BLOCK];
         for (int from = 0; from < count; from += BLOCK) {
             int size = Math.min(BLOCK, count - from);
             for (int i = 0; i < perils; i++) {
-                for (int f = 0; f < size; f++) {
-                    phi[i][0][f] = 1 - deficits[i][0][from + f];
-                    phi[i][1][f] = -deficits[i][1][from + f];
-                }
+                points[i].set(deficits[i], from, size);
             }
             for (int k = 0; k < nodes.size(); k++) {
                 boolean first = true;
                 for (int i = 0; i < perils; i++) {
                     int length = lengths[i][k];
                     if (length > 0) {
-                        horner(nodes.survival()[i][k], length, phi[i][0], phi[i][1], h[0], h[1], size);
-                        join(deficits[i][0], deficits[i][1], from, h[0], h[1], r[0], r[1], size, first);
+                        points[i].polynomial(nodes.survival()[i][k], length, h);
+                        join(points[i], h, r, size, first);
                         first = false;
                     }
                 }
@@ -68,100 +75,148 @@ final class JointDeficit {
         return lengths;
     }
 
+    /** One peril's deficits w at a block of frequencies, and what of φ = 1 − w its polynomials need. */
+    static final class Points {
+        private final double[] re = new double[BLOCK];
+        private final double[] im = new double[BLOCK];
+        private final double[] twice = new double[BLOCK];
+        private final double[] square = new double[BLOCK];
+        private final double[] b = new double[BLOCK];
+        private final double[] c = new double[BLOCK];
+        /** φ^SHORT, made when a polynomial asks for it. */
+        private final double[][] power = new double[2][BLOCK];
+        private final double[][] part = new double[2][BLOCK];
+        private boolean raised;
+        private int size;
+
+        /** @param deficit {real, imaginary} × frequency */
+        void set(double[][] deficit, int from, int count) {
+            size = count;
+            raised = false;
+            for (int f = 0; f < size; f++) {
+                double x = deficit[0][from + f];
+                double y = deficit[1][from + f];
+                re[f] = x;
+                im[f] = y;
+                twice[f] = 2 - 2 * x;
+                square[f] = (1 - x) * (1 - x) + y * y;
+            }
+        }
+
+        /** Σ_{n &lt; length} s_n φ^n, written to h. */
+        void polynomial(double[] s, int length, double[][] h) {
+            int from = (length - 1) / SHORT * SHORT;
+            shortPolynomial(s, from, length, h);
+            while (from > 0) {
+                raise();
+                from -= SHORT;
+                shortPolynomial(s, from, from + SHORT, part);
+                product(h[0], h[1], power[0], power[1], h[0], h[1], size);
+                for (int f = 0; f < size; f++) {
+                    h[0][f] += part[0][f];
+                    h[1][f] += part[1][f];
+                }
+            }
+        }
+
+        private void raise() {
+            if (!raised) {
+                for (int f = 0; f < size; f++) {
+                    power[0][f] = 1 - re[f];
+                    power[1][f] = -im[f];
+                }
+                for (int squares = 1; squares < SHORT; squares *= 2) {
+                    product(power[0], power[1], power[0], power[1], power[0], power[1], size);
+                }
+                raised = true;
+            }
+        }
+
+        /** Σ_{from ≤ n &lt; end} s_n φ^(n − from). */
+        private void shortPolynomial(double[] s, int from, int end, double[][] h) {
+            Arrays.fill(b, 0, size, 0);
+            Arrays.fill(c, 0, size, 0);
+            int n = end - 1;
+            for (; n >= from + 4; n -= 4) {
+                fourSteps(s[n], s[n - 1], s[n - 2], s[n - 3]);
+            }
+            for (; n > from; n--) {
+                step(s[n]);
+            }
+            finish(s[from], h[0], h[1]);
+        }
+
+        private void step(double s) {
+            for (int f = 0; f < size; f++) {
+                double next = Math.fma(twice[f], b[f], Math.fma(-square[f], c[f], s));
+                c[f] = b[f];
+                b[f] = next;
+            }
+        }
+
+        /** Four steps at once: the arithmetic, not the memory, then sets the pace. */
+        private void fourSteps(double s0, double s1, double s2, double s3) {
+            for (int f = 0; f < size; f++) {
+                double t = twice[f];
+                double q = -square[f];
+                double b0 = b[f];
+                double b1 = Math.fma(t, b0, Math.fma(q, c[f], s0));
+                double b2 = Math.fma(t, b1, Math.fma(q, b0, s1));
+                double b3 = Math.fma(t, b2, Math.fma(q, b1, s2));
+                b[f] = Math.fma(t, b3, Math.fma(q, b2, s3));
+                c[f] = b3;
+            }
+        }
+
+        private void finish(double s, double[] hr, double[] hi) {
+            for (int f = 0; f < size; f++) {
+                hr[f] = Math.fma(1 - re[f], b[f], Math.fma(-square[f], c[f], s));
+                hi[f] = -im[f] * b[f];
+            }
+        }
+    }
+
     /**
      * Joins one peril's counts to what is there: r ← r + x − r·x, x = w·h.
      *
      * @param h to work in
      * @param r {real, imaginary} × frequency of the block, 0 where nothing is there yet
      */
-    static void join(double[] survival, double[] wr, double[] wi, int from, double[][] h, double[][] r, int size) {
-        int length = survival.length;
-        if (length == 0) {
-            return;
+    static void join(double[] survival, Points points, double[][] h, double[][] r, int size) {
+        if (survival.length > 0) {
+            points.polynomial(survival, survival.length, h);
+            join(points, h, r, size, false);
         }
-        java.util.Arrays.fill(h[0], 0, size, survival[length - 1]);
-        java.util.Arrays.fill(h[1], 0, size, 0);
-        for (int n = length - 2; n >= 0; n--) {
-            double s = survival[n];
-            for (int f = 0; f < size; f++) {
-                double p = 1 - wr[from + f];
-                double q = -wi[from + f];
-                double a = h[0][f];
-                double b = h[1][f];
-                h[0][f] = Math.fma(a, p, Math.fma(-b, q, s));
-                h[1][f] = Math.fma(a, q, b * p);
-            }
-        }
-        join(wr, wi, from, h[0], h[1], r[0], r[1], size, false);
     }
 
     /** The same for a deficit x + iy. */
     static void join(double[] x, double[] y, double[][] r, int size) {
+        double[] rr = r[0];
+        double[] ri = r[1];
         for (int f = 0; f < size; f++) {
-            double a = r[0][f];
-            double b = r[1][f];
-            r[0][f] = a + x[f] - (a * x[f] - b * y[f]);
-            r[1][f] = b + y[f] - (a * y[f] + b * x[f]);
-        }
-    }
-
-    private static void horner(double[] survival, int length, double[] pr, double[] pi, double[] hr, double[] hi, int size) {
-        double top = survival[length - 1];
-        for (int f = 0; f < size; f++) {
-            hr[f] = top;
-            hi[f] = 0;
-        }
-        int n = length - 2;
-        for (; n >= 3; n -= 4) {
-            fourSteps(survival[n], survival[n - 1], survival[n - 2], survival[n - 3], pr, pi, hr, hi, size);
-        }
-        for (; n >= 0; n--) {
-            step(survival[n], pr, pi, hr, hi, size);
-        }
-    }
-
-    /** h ← h·φ + s. */
-    private static void step(double s, double[] pr, double[] pi, double[] hr, double[] hi, int size) {
-        for (int f = 0; f < size; f++) {
-            double a = hr[f];
-            double b = hi[f];
-            hr[f] = Math.fma(a, pr[f], Math.fma(-b, pi[f], s));
-            hi[f] = Math.fma(a, pi[f], b * pr[f]);
-        }
-    }
-
-    /** Four steps at once: the arithmetic, not the memory, then sets the pace. */
-    private static void fourSteps(double s0, double s1, double s2, double s3, double[] pr, double[] pi, double[] hr, double[] hi, int size) {
-        for (int f = 0; f < size; f++) {
-            double p = pr[f];
-            double q = pi[f];
-            double a0 = hr[f];
-            double b0 = hi[f];
-            double a1 = Math.fma(a0, p, Math.fma(-b0, q, s0));
-            double b1 = Math.fma(a0, q, b0 * p);
-            double a2 = Math.fma(a1, p, Math.fma(-b1, q, s1));
-            double b2 = Math.fma(a1, q, b1 * p);
-            double a3 = Math.fma(a2, p, Math.fma(-b2, q, s2));
-            double b3 = Math.fma(a2, q, b2 * p);
-            hr[f] = Math.fma(a3, p, Math.fma(-b3, q, s3));
-            hi[f] = Math.fma(a3, q, b3 * p);
+            double a = rr[f];
+            double b = ri[f];
+            rr[f] = a + x[f] - (a * x[f] - b * y[f]);
+            ri[f] = b + y[f] - (a * y[f] + b * x[f]);
         }
     }
 
     /** x = w·h; r ← r + x − r·x, or x at first. */
-    private static void join(double[] wr, double[] wi, int from, double[] hr, double[] hi, double[] rr, double[] ri, int size, boolean first) {
+    private static void join(Points w, double[][] h, double[][] r, int size, boolean first) {
+        if (first) {
+            product(w.re, w.im, h[0], h[1], r[0], r[1], size);
+        } else {
+            product(w.re, w.im, h[0], h[1], h[0], h[1], size);
+            join(h[0], h[1], r, size);
+        }
+    }
+
+    private static void product(double[] a, double[] b, double[] c, double[] d, double[] re, double[] im, int size) {
         for (int f = 0; f < size; f++) {
-            double x = wr[from + f] * hr[f] - wi[from + f] * hi[f];
-            double y = wr[from + f] * hi[f] + wi[from + f] * hr[f];
-            if (first) {
-                rr[f] = x;
-                ri[f] = y;
-            } else {
-                double a = rr[f];
-                double b = ri[f];
-                rr[f] = a + x - (a * x - b * y);
-                ri[f] = b + y - (a * y + b * x);
-            }
+            double x = a[f] * c[f] - b[f] * d[f];
+            double y = a[f] * d[f] + b[f] * c[f];
+            re[f] = x;
+            im[f] = y;
         }
     }
 

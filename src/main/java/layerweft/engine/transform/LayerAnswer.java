@@ -34,25 +34,35 @@ final class LayerAnswer {
     private final Accuracy accuracy;
     private final LatticeSum[] levels = new LatticeSum[3];
     private int start;
+    private int bracketLevel;
     private SumFacts facts;
     private Figure[] means;
     private Figure[] points;
     /** Errors of the means that a finer lattice makes smaller. */
     private double[] latticeError;
 
-    /** @param start level to begin with, where an earlier answer for this layer ended */
-    LayerAnswer(AnnualSums sums, LayerTerms terms, Programme programme, Accuracy accuracy, int start) {
+    /**
+     * @param start level to begin with, where an earlier answer for this layer ended
+     * @param bracketLevel the same for the guaranteed range
+     */
+    LayerAnswer(AnnualSums sums, LayerTerms terms, Programme programme, Accuracy accuracy, int start, int bracketLevel) {
         this.sums = sums;
         this.terms = terms;
         this.programme = programme;
         this.accuracy = accuracy;
         this.start = start;
+        this.bracketLevel = bracketLevel;
         refine();
     }
 
     /** The coarsest of the three levels that were good enough. */
     int level() {
         return start;
+    }
+
+    /** The level at which the guaranteed range was narrow enough, once the {@link #statistics} are made. */
+    int bracketLevel() {
+        return bracketLevel;
     }
 
     /** Whether a limited layer with an annual deductible is attached with less than this chance. */
@@ -203,8 +213,9 @@ final class LayerAnswer {
 
     /** On finer lattices than the figures need, until the range is narrow; a range of second order shrinks to a quarter each time. */
     private Bracket bracket() {
-        int level = start + 2;
+        int level = Math.max(start + 2, bracketLevel);
         Bracket bracket = sums.bracket(level);
+        bracketLevel = level;
         long most = Math.min(accuracy.mostCells(), sums.mostBracketCells());
         while (bracket.high() - bracket.low() > NARROW * scale() && 2L * sums.longest(level) <= most) {
             double excess = (bracket.high() - bracket.low()) / (NARROW * scale());
@@ -219,6 +230,7 @@ final class LayerAnswer {
             if (bracket.high() - bracket.low() > WORTHWHILE * before) {
                 break;
             }
+            bracketLevel = level;
         }
         return bracket;
     }

@@ -35,6 +35,7 @@ public final class TransformEngine {
         private final Map<Integer, PreparedLayer> layers = new HashMap<>();
         private final Map<Integer, List<LayerLattice>> totals = new HashMap<>();
         private final Map<Integer, Integer> levels = new HashMap<>();
+        private final Map<Integer, Integer> bracketLevels = new HashMap<>();
     }
 
     public TransformEngine(Treaty treaty, Accuracy accuracy) {
@@ -124,7 +125,10 @@ public final class TransformEngine {
         if (prepared(layer).perils().length == 0) {
             return UnreachableLayer.statistics(treaty.programme().buyer());
         }
-        return answer(layer).statistics();
+        LayerAnswer answer = answer(layer, sums(layer));
+        LayerStatistics statistics = answer.statistics();
+        shared.bracketLevels.merge(layer, answer.bracketLevel(), Math::max);
+        return statistics;
     }
 
     /**
@@ -142,15 +146,15 @@ public final class TransformEngine {
         return new TransformLaw(sums, answer.finest(), answer.coarser(), answer.facts(), treaty.layer(layer).terms());
     }
 
-    private LayerAnswer answer(int layer) {
-        return answer(layer, sums(layer));
-    }
-
     private LayerAnswer answer(int layer, AnnualSums sums) {
-        LayerAnswer answer = new LayerAnswer(sums, treaty.layer(layer).terms(), treaty.programme(), accuracy, shared.levels.getOrDefault(layer, 0));
+        LayerAnswer answer = answer(layer, sums, shared.levels.getOrDefault(layer, 0));
         shared.levels.merge(layer, answer.level(), Math::max);
         boolean far = answer.reachedRarely(FAR) && sums instanceof CountSums && !branched(shared.layers.get(layer).perils());
-        return far ? new LayerAnswer(farSums(layer, sums), treaty.layer(layer).terms(), treaty.programme(), accuracy, answer.level()) : answer;
+        return far ? answer(layer, farSums(layer, sums), answer.level()) : answer;
+    }
+
+    private LayerAnswer answer(int layer, AnnualSums sums, int level) {
+        return new LayerAnswer(sums, treaty.layer(layer).terms(), treaty.programme(), accuracy, level, shared.bracketLevels.getOrDefault(layer, 0));
     }
 
     private boolean branched(int[] perils) {
