@@ -23,6 +23,8 @@ final class LayerAnswer {
     /** Where {@link LevelFigures#means} has the distortion's integral. */
     private static final int DISTORTED = 3;
     private static final int CHEAP_CELLS = 4096;
+    /** The same where there is no annual limit: the lattice reaches far, and the figures are about its lower end. */
+    private static final int CHEAP_OPEN_CELLS = 1 << 15;
     private static final double RARELY_FULL = 3e-6;
     /** Width wanted of the guaranteed range, as a part of the limit. */
     private static final double NARROW = 5e-5;
@@ -108,7 +110,7 @@ final class LayerAnswer {
             return false;
         }
         double part = OWN_SIZE * accuracy.relative();
-        boolean cheap = 2L * sums.cells(start + 2) <= CHEAP_CELLS;
+        boolean cheap = 2L * sums.cells(start + 2) <= (terms.annualLimit() < Double.POSITIVE_INFINITY ? CHEAP_CELLS : CHEAP_OPEN_CELLS);
         for (int k = 2; cheap && k < points.length; k++) {
             if (points[k].error() > QUANTILES * accuracy.relative() * points[k].value() + 1e-5 * levels[2].step()) {
                 return false;
@@ -150,7 +152,7 @@ final class LayerAnswer {
             means[f] = new Figure(figure.value(), figure.error() + beyond + (f == 0 ? floor + unlimited : Math.max(floor, floor() * (sums.end() - terms.deductible()))));
         }
         double deviation = means[1].value();
-        means[1] = new Figure(deviation, means[1].error() + (deviation > 0 ? facts.secondMomentError() / (2 * deviation) : 0));
+        means[1] = Double.isInfinite(deviation) ? Figure.exact(deviation) : new Figure(deviation, means[1].error() + (deviation > 0 ? facts.secondMomentError() / (2 * deviation) : 0));
         points = points();
     }
 

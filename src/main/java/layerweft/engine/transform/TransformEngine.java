@@ -14,6 +14,7 @@ import layerweft.model.portfolio.Peril;
 import layerweft.model.portfolio.Portfolio;
 import layerweft.model.treaty.Layer;
 import layerweft.model.treaty.LayerTerms;
+import layerweft.model.treaty.Loading;
 import layerweft.model.treaty.Treaty;
 
 /**
@@ -69,7 +70,7 @@ public final class TransformEngine {
         if (layer.proRataTime()) {
             return Optional.of("its reinstatement premium is pro rata as to time");
         }
-        Optional<String> parts = partsRefusal(j);
+        Optional<String> parts = partsRefusal(j).or(() -> openTailRefusal(j));
         if (parts.isPresent()) {
             return parts;
         }
@@ -88,6 +89,20 @@ public final class TransformEngine {
             }
         }
         return DependentSum.refusal(copula, covered);
+    }
+
+    /** A distorted premium is an integral over the whole tail; what of it lies beyond the lattice is bounded by the variance of single losses. */
+    private Optional<String> openTailRefusal(int j) {
+        Loading loading = treaty.programme().pricing().loading();
+        boolean distorted = loading instanceof Loading.ProportionalHazard || loading instanceof Loading.Wang;
+        LayerTerms terms = treaty.layer(j).terms();
+        if (!distorted || terms.annualLimit() < Double.POSITIVE_INFINITY || terms.occurrenceLimit() < Double.POSITIVE_INFINITY) {
+            return Optional.empty();
+        }
+        int[] covered = covered(j);
+        boolean bounded = (covered.length == 1 || !totalsJoined()) && Arrays.stream(covered).allMatch(i ->
+                treaty.portfolio().perils().get(i).eventLoss() instanceof EventLoss.Single single && single.severity().limitedSecondMoment(Double.POSITIVE_INFINITY) < Double.POSITIVE_INFINITY);
+        return bounded ? Optional.empty() : Optional.of("its loading weighs a tail without a limit, and the transform cannot bound what is far up");
     }
 
     private Optional<String> partsRefusal(int j) {
