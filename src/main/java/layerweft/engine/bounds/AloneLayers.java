@@ -22,9 +22,9 @@ import layerweft.model.treaty.Treaty;
 /** One layer taken apart: its occurrence terms on each of its perils alone, and on all of them independent of each other. */
 final class AloneLayers {
     /** Laws are not extrapolated: a lattice of up to 8,192 cells. */
-    private static final Accuracy OF_LAWS = new Accuracy(1e-12, 1 << 13);
+    private static final Accuracy OF_LAWS = new Accuracy(1e-12, 1 << 13, false);
     /** Fewer where events are sums over sub-perils, whose laws take their time. */
-    private static final Accuracy OF_SPLIT_LAWS = new Accuracy(1e-12, 1 << 12);
+    private static final Accuracy OF_SPLIT_LAWS = new Accuracy(1e-12, 1 << 12, false);
     private static final Accuracy OF_VALUES = Accuracy.of(1e-7);
     private final Portfolio portfolio;
     private final Treaty original;

@@ -7,11 +7,15 @@ import layerweft.model.Check;
  *
  * @param relative error wanted of an expected loss, as a part of the layer's limit (L, or M where there is no L)
  * @param mostCells cells of the finest lattice, the bound on time and memory; an error that is still too large there is reported as it is
+ * @param brackets whether the guaranteed range of the expected loss is wanted, which takes as long as all figures together
  */
-public record Accuracy(double relative, int mostCells) {
+public record Accuracy(double relative, int mostCells, boolean brackets) {
 
     /** A millionth of the limit, at most 65,536 cells. */
-    public static final Accuracy USUAL = new Accuracy(1e-6, 1 << 16);
+    public static final Accuracy USUAL = new Accuracy(1e-6, 1 << 16, true);
+
+    /** The usual figures, without guaranteed ranges: for a price that has to follow a hand. */
+    public static final Accuracy LIVE = new Accuracy(USUAL.relative, USUAL.mostCells, false);
 
     public Accuracy {
         new Check().that(relative >= 1e-12 && relative <= 1e-2, "relative", relative, "from 1e-12 to 0.01")
@@ -20,7 +24,7 @@ public record Accuracy(double relative, int mostCells) {
     }
 
     public static Accuracy of(double relative) {
-        return new Accuracy(relative, USUAL.mostCells);
+        return new Accuracy(relative, USUAL.mostCells, USUAL.brackets);
     }
 
     /** Error wanted of the joint probabilities of counts. */

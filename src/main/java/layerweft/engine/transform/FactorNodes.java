@@ -69,7 +69,7 @@ final class FactorNodes {
      * @param error wanted of joint probabilities
      */
     static LatentNodes of(double[] loadings, double degreesOfFreedom, CountMargin[] margins, double error) {
-        double digits = Math.log(3 / error);
+        double digits = digits(error);
         double[][] scores = scores(degreesOfFreedom, margins);
         double sharpest = 0;
         for (double loading : loadings) {
@@ -80,6 +80,7 @@ final class FactorNodes {
         int half = (int) Math.ceil(Math.sqrt(2 * digits) / step);
         MixingRule mixing = MixingRule.of(degreesOfFreedom, error);
         int count = (2 * half + 1) * mixing.roots.length;
+        double nothing = nothing(error);
         double[] weights = new double[count];
         double[][][] survival = new double[margins.length][count][];
         int kept = 0;
@@ -91,7 +92,7 @@ final class FactorNodes {
                 if (weight * step * count > 0.1 * error) {
                     weights[kept] = weight;
                     for (int i = 0; i < margins.length; i++) {
-                        survival[i][kept] = conditional(scores[i], loadings[i], z, mixing.roots[m]);
+                        survival[i][kept] = conditional(scores[i], loadings[i], z, mixing.roots[m], nothing);
                     }
                     kept++;
                 }
@@ -129,12 +130,22 @@ final class FactorNodes {
         return p < q ? law.inverseCumulativeProbability(p) : law.inverseSurvivalProbability(q);
     }
 
-    static double[] conditional(double[] scores, double loading, double z, double root) {
+    /** Where ½·erfc(x) is far below the error of joint probabilities. */
+    static double nothing(double error) {
+        return Math.min(27, Math.sqrt(digits(1e-9 * error)));
+    }
+
+    private static double digits(double error) {
+        return Math.log(3 / error);
+    }
+
+    /** @param nothing as of {@link #nothing} */
+    static double[] conditional(double[] scores, double loading, double z, double root, double nothing) {
         double own = Math.sqrt(Math.max(1 - loading * loading, 1e-12)) * Math.sqrt(2);
         double[] s = new double[scores.length];
         for (int n = 0; n < s.length; n++) {
             double x = (scores[n] * root - loading * z) / own;
-            s[n] = x > 6 ? (x > 27 ? 0 : 0.5 * Erfc.value(x)) : x < -6 ? 1 : 0.5 * Erfc.value(x);
+            s[n] = x > nothing ? 0 : x < -6 ? 1 : 0.5 * Erfc.value(x);
         }
         return s;
     }

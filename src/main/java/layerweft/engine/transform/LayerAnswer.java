@@ -203,7 +203,7 @@ final class LayerAnswer {
             occurrence.put(asked.get(k), Double.isNaN(largest) ? Figure.UNDEFINED : new Figure(largest, 1e-12 * largest));
         }
         Figure mean = positive(means[0]);
-        Bracket bracket = Double.isInfinite(mean.value()) ? null : bracket();
+        Bracket bracket = accuracy.brackets() && mean.value() < Double.POSITIVE_INFINITY ? bracket() : null;
         PremiumBuildUp premium = PremiumBuildUp.of(programme.pricing(), new PremiumBuildUp.Inputs(mean.value(), means[1].value(),
                 means[4].value(), means[3].value(), means[2].value()));
         double premiumError = error(premium.slopes());

@@ -64,8 +64,8 @@ final class ThreePerilNodes {
         for (int j = -half; j <= half; j++) {
             double z = j * step;
             double w = weight * norm * Math.exp(-z * z / 2);
-            double[] p = masses(FactorNodes.conditional(b, loadingB, z, 1));
-            double[] q = masses(FactorNodes.conditional(c, loadingC, z, 1));
+            double[] p = masses(FactorNodes.conditional(b, loadingB, z, 1, 6));
+            double[] q = masses(FactorNodes.conditional(c, loadingC, z, 1, 6));
             for (int n = 0, k = offset; n < p.length; n++) {
                 double wp = w * p[n];
                 for (double mass : q) {

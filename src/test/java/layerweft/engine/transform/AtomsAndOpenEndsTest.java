@@ -66,12 +66,15 @@ class AtomsAndOpenEndsTest {
     }
 
     @Test
-    void aTailWithoutVarianceHasNoBoundForItsDistortion() {
+    void aTailWithoutVarianceIsLeftToSimulationWhereItIsDistorted() {
         Pricing pricing = new Pricing(new Loading.ProportionalHazard(1.25), 0, 0, true);
         Layer open = Layer.of("open", OccurrenceTerms.NONE, AnnualTerms.NONE);
+        Layer limited = Layer.of("limited", OccurrenceTerms.excess(1000, 5), AnnualTerms.NONE);
         Portfolio portfolio = new Portfolio("test", "EUR", "million", List.of(Models.peril("only", new Poisson(1), new Pareto(5, 1.6))),
                 new Dependence(Dependence.Links.COUNTS, new Independence()));
-        Figure net = new TransformEngine(new Treaty(portfolio, new Programme("test", List.of(open), pricing, Buyer.USUAL)), Accuracy.USUAL).price(0).netPremium();
-        assertTrue(Double.isInfinite(net.error()), net.toString());
+        TransformEngine engine = new TransformEngine(new Treaty(portfolio, new Programme("test", List.of(open, limited), pricing, Buyer.USUAL)), Accuracy.USUAL);
+        assertTrue(engine.refusal(0).orElseThrow().contains("a tail without a limit"), engine.refusal(0).toString());
+        Figure net = engine.price(1).netPremium();
+        assertTrue(net.error() < 1e-4 * net.value(), net.toString());
     }
 }
