@@ -15,8 +15,8 @@ import picocli.CommandLine.Spec;
 
 /** {@code break-even}: at which strength of dependence one programme becomes cheaper than another. */
 @Command(name = "break-even", sortOptions = false, mixinStandardHelpOptions = true, versionProvider = Version.class,
-        description = "Find the strength of dependence at which one programme becomes cheaper for the buyer than another, by expected cost: "
-                + "premiums with expected reinstatement premium less expected recoveries; quoted premiums, technical where none is quoted.",
+        description = "Find the strength of dependence at which one programme becomes cheaper for the buyer than another; quoted premiums, "
+                + "technical where none is quoted.",
         footerHeading = "%nExamples:%n", footer = {
             "  break-even book.json cats.json aggregate.json",
             "  break-even book.json cats.json aggregate.json --families gumbel,clayton --format json",
@@ -38,6 +38,11 @@ final class BreakEvenCommand implements Callable<Integer> {
             + "(default: gumbel,student:4,frank,survival-clayton,joe,gaussian,clayton).")
     private String families;
 
+    @Option(names = "--measure", paramLabel = "expectedCost|costOfRisk", defaultValue = "expectedCost", converter = MeasureConverter.class,
+            description = "expectedCost: premiums with expected reinstatement premium less expected recoveries. costOfRisk: expected net position and "
+                    + "the first programme's cost of capital on its tail (default: ${DEFAULT-VALUE}).")
+    private BreakEven.Measure measure;
+
     @Mixin
     private SimulationOptions simulation;
 
@@ -51,7 +56,7 @@ final class BreakEvenCommand implements Callable<Integer> {
         Treaty one = TreatyReader.read(portfolio, first);
         Treaty other = TreatyReader.read(portfolio, second);
         try (Progress progress = new Progress("break-even")) {
-            BreakEven found = BreakEven.of(one.portfolio(), one.programme(), other.programme(), asked, simulation.settings(), progress);
+            BreakEven found = BreakEven.of(one.portfolio(), one.programme(), other.programme(), measure, asked, simulation.settings(), progress);
             output.write(answer(found), spec.commandLine().getOut());
         }
         return 0;

@@ -23,10 +23,10 @@ final class BreakEvenOutput {
         return Json.write(root);
     }
 
-    private static void answer(ObjectNode node, BreakEven found, BreakEven.Answer a) {
+    static void answer(ObjectNode node, BreakEven found, BreakEven.Answer a) {
         node.put("first", found.first().name());
         node.put("second", found.second().name());
-        node.put("measure", BreakEven.MEASURE);
+        node.put("measure", found.measure().label());
         node.put("family", a.family().label());
         node.put("answer", word(a));
         ArrayNode taus = node.putArray("taus");
@@ -50,7 +50,7 @@ final class BreakEvenOutput {
         List.of("first", "second", "measure", "family", "answer", "taus", "cheaperBelow", "from", "to").forEach(csv::cell);
         csv.pair("difference at from").pair("difference at to").endOfRow();
         for (BreakEven.Answer a : found.answers()) {
-            csv.cell(found.first().name()).cell(found.second().name()).cell(BreakEven.MEASURE).cell(a.family().label()).cell(word(a));
+            csv.cell(found.first().name()).cell(found.second().name()).cell(found.measure().label()).cell(a.family().label()).cell(word(a));
             csv.cell(a.taus().stream().map(tau -> Double.toString(tau.value())).collect(Collectors.joining(" ")));
             csv.cell(a.cheaperBelow() == null ? "" : a.cheaperBelow()).cell(a.from()).cell(a.to());
             csv.pair(a.differenceFrom()).pair(a.differenceTo()).endOfRow();

@@ -21,16 +21,21 @@ final class BreakEvenText {
         }
         StringBuilder text = new StringBuilder(found.portfolio().name()).append('\n');
         text.append("First: ").append(found.first().name()).append(". Second: ").append(found.second().name()).append(".\n");
-        text.append("By expected cost to the buyer: premiums with reinstatement premium less expected recoveries, ").append(money)
-                .append(". Difference: first less second.\n\n").append(table).append('\n');
+        text.append("By ").append(basis(found.measure())).append(", ").append(money).append(". Difference: first less second.\n\n").append(table).append('\n');
         if (found.answers().size() > 1 && found.answers().stream().map(BreakEven.Answer::outcome).distinct().count() == 1
                 && found.answers().get(0).outcome() != BreakEven.Outcome.CROSSES) {
             text.append("With every family: ").append(inWords(found, found.answers().get(0))).append(".\n");
         } else {
             found.answers().forEach(a -> text.append(a.family().label()).append(": ").append(inWords(found, a)).append(".\n"));
         }
-        return text.append("Cost of risk is not compared: neither engine gives the law of the net position with its reinstatement premiums.\n")
-                .toString();
+        return text.toString();
+    }
+
+    private static String basis(BreakEven.Measure measure) {
+        return switch (measure) {
+            case EXPECTED_COST -> "expected cost to the buyer: premiums with reinstatement premium less expected recoveries";
+            case COST_OF_RISK -> "cost of risk: expected net position with all premiums, and the cost of capital on what its tail has beyond that";
+        };
     }
 
     private static String taus(BreakEven.Answer a) {

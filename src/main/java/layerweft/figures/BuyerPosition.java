@@ -31,16 +31,8 @@ public record BuyerPosition(
         Figure costPerUnitOfTailRelief) {
 
     public static BuyerPosition of(List<LayerFigures> layers, WholeStatistics whole) {
-        Figure upfront = Figure.exact(0);
-        Figure reinstatement = Figure.exact(0);
-        Figure recoveries = Figure.exact(0);
-        Figure cost = Figure.exact(0);
-        for (LayerFigures layer : layers) {
-            upfront = upfront.plus(layer.premium());
-            reinstatement = reinstatement.plus(layer.reinstatementPremium());
-            recoveries = recoveries.plus(layer.expectedLoss());
-            cost = cost.plus(layer.costOfCover());
-        }
+        ProgrammeCost programme = ProgrammeCost.of(layers);
+        Figure cost = programme.costOfCover();
         SortedMap<Double, Figure> relief = new TreeMap<>();
         for (Map.Entry<Double, Figure> gross : whole.gross().valueAtRisk().entrySet()) {
             relief.put(gross.getKey(), fall(gross.getValue(), whole.net().valueAtRisk().get(gross.getKey())));
@@ -49,7 +41,7 @@ public record BuyerPosition(
         Figure perUnit = tail.value() > 0 && tail.value() < Double.POSITIVE_INFINITY
                 ? new Figure(cost.value() / tail.value(), (cost.error() + Math.abs(cost.value() / tail.value()) * tail.error()) / tail.value())
                 : Figure.UNDEFINED;
-        return new BuyerPosition(upfront, reinstatement, recoveries, cost, whole.gross().mean().plus(cost),
+        return new BuyerPosition(programme.upfrontPremium(), programme.reinstatementPremium(), programme.expectedRecoveries(), cost, whole.gross().mean().plus(cost),
                 fall(whole.gross().standardDeviation(), whole.net().standardDeviation()), relief, tail, perUnit);
     }
 

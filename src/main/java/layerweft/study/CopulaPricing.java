@@ -114,17 +114,4 @@ final class CopulaPricing {
             throw new CancellationException("the study was stopped");
         }
     }
-
-    /** One of many simulations: it can be stopped, and its own progress is not that of the whole. */
-    private record Stoppable(RunControl whole) implements RunControl {
-        @Override
-        public void progress(long done, long total) {
-            // the study counts its own steps
-        }
-
-        @Override
-        public boolean cancelled() {
-            return whole.cancelled();
-        }
-    }
 }

@@ -147,4 +147,25 @@ class StudyCommandsTest {
         assertTrue(run.err.contains(message), run.err);
         assertFalse(run.err.contains("\tat "), run.err);
     }
+
+    @Test
+    void compareNamesEachStructureAndPair() throws IOException {
+        Path treaties = Path.of("treaties");
+        layerweft.command.Run run = layerweft.command.Run.of("compare", Path.of("demo-portfolios", "harrow-coast.json"), treaties.resolve("harrow-coast-one-layer.json"),
+                treaties.resolve("harrow-coast-two-layers.json"), "--years", 40_000, "--families", "gumbel", "--format", "json").done();
+        JsonNode tree = new ObjectMapper().readTree(run.out());
+        assertEquals(2, tree.get("structures").size());
+        JsonNode first = tree.get("structures").get(0);
+        assertEquals(first.get("upfrontPremium").doubleValue() + first.get("reinstatementPremium").doubleValue() - first.get("expectedRecoveries").doubleValue(),
+                first.get("costOfCover").doubleValue(), 1e-9);
+        assertEquals(first.get("net").get("mean").doubleValue(), tree.get("gross").get("mean").doubleValue() + first.get("costOfCover").doubleValue(), 1e-9);
+        assertEquals(2, tree.get("breakEven").size());
+        assertEquals("expectedCost", tree.get("breakEven").get(0).get("measure").asText());
+        assertEquals("costOfRisk", tree.get("breakEven").get(1).get("measure").asText());
+        assertEquals(2, tree.get("preferred").size());
+        String text = layerweft.command.Run.of("compare", Path.of("demo-portfolios", "harrow-coast.json"), treaties.resolve("harrow-coast-one-layer.json"),
+                treaties.resolve("harrow-coast-two-layers.json"), "--years", 40_000, "--families", "none").done().out();
+        assertTrue(text.contains("what each layer is worth"), text);
+        layerweft.command.Run.of("compare", Path.of("demo-portfolios", "harrow-coast.json"), treaties.resolve("harrow-coast-one-layer.json")).refused();
+    }
 }

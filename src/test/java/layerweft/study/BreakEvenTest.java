@@ -30,7 +30,7 @@ class BreakEvenTest {
         double events = expectedLoss(TwoPerils.eachEvent(), family, 0.5) + COST_OF_EACH_EVENT;
         Programme first = TwoPerils.programme("Year", TwoPerils.quoted(TwoPerils.stopLoss(), premiumOfStopLoss));
         Programme second = TwoPerils.programme("Event", TwoPerils.quoted(TwoPerils.eachEvent(), events));
-        return BreakEven.of(TwoPerils.portfolio(TwoPerils.GUMBEL), first, second, List.of(family), TwoPerils.SETTINGS, RunControl.NONE)
+        return BreakEven.of(TwoPerils.portfolio(TwoPerils.GUMBEL), first, second, BreakEven.Measure.EXPECTED_COST, List.of(family), TwoPerils.SETTINGS, RunControl.NONE)
                 .answers().get(0);
     }
 
@@ -62,7 +62,7 @@ class BreakEvenTest {
     @Test
     void aProgrammeAgainstItselfIsEqual() {
         Programme programme = TwoPerils.programme("Year", TwoPerils.quoted(TwoPerils.stopLoss(), 3));
-        BreakEven.Answer answer = BreakEven.of(TwoPerils.portfolio(TwoPerils.GUMBEL), programme, programme, List.of(CopulaFamily.parse("joe")),
+        BreakEven.Answer answer = BreakEven.of(TwoPerils.portfolio(TwoPerils.GUMBEL), programme, programme, BreakEven.Measure.EXPECTED_COST, List.of(CopulaFamily.parse("joe")),
                 TwoPerils.SETTINGS, RunControl.NONE).answers().get(0);
         assertEquals(BreakEven.Outcome.EQUAL, answer.outcome());
         assertNull(answer.cheaperBelow());
@@ -73,7 +73,7 @@ class BreakEvenTest {
         Layer paid = TwoPerils.quoted(TwoPerils.eachEvent().withReinstatements(List.of(1.0)), 4);
         Layer free = TwoPerils.quoted(TwoPerils.eachEvent().withReinstatements(List.of(0.0)), 4);
         BreakEven.Answer answer = BreakEven.of(TwoPerils.portfolio(TwoPerils.GUMBEL), TwoPerils.programme("Paid", paid),
-                TwoPerils.programme("Free", free), List.of(CopulaFamily.parse("gumbel")), TwoPerils.SETTINGS, RunControl.NONE).answers().get(0);
+                TwoPerils.programme("Free", free), BreakEven.Measure.EXPECTED_COST, List.of(CopulaFamily.parse("gumbel")), TwoPerils.SETTINGS, RunControl.NONE).answers().get(0);
         assertEquals(BreakEven.Outcome.NEVER, answer.outcome());
         assertEquals("Free", answer.cheaperBelow());
     }
@@ -82,7 +82,7 @@ class BreakEvenTest {
     void layersThatNeedSimulationAreComparedOnTheSameYears() {
         Programme first = TwoPerils.programme("Cheap", TwoPerils.quoted(TwoPerils.proRataTime(), 1));
         Programme second = TwoPerils.programme("Dear", TwoPerils.quoted(TwoPerils.proRataTime(), 30));
-        BreakEven.Answer answer = BreakEven.of(TwoPerils.portfolio(TwoPerils.GUMBEL), first, second, List.of(CopulaFamily.parse("gumbel")),
+        BreakEven.Answer answer = BreakEven.of(TwoPerils.portfolio(TwoPerils.GUMBEL), first, second, BreakEven.Measure.EXPECTED_COST, List.of(CopulaFamily.parse("gumbel")),
                 TwoPerils.SETTINGS, RunControl.NONE).answers().get(0);
         assertEquals(BreakEven.Outcome.ALWAYS, answer.outcome());
         assertEquals("Cheap", answer.cheaperBelow());

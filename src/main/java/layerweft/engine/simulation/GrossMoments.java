@@ -14,22 +14,17 @@ import layerweft.model.severity.SeverityModel;
 record GrossMoments(double mean, boolean finiteVariance) {
 
     static GrossMoments of(Portfolio portfolio) {
-        double mean = 0;
         boolean finite = true;
         for (Peril peril : portfolio.perils()) {
-            double n = peril.frequency().mean();
             if (peril.eventLoss() instanceof EventLoss.Split split) {
                 for (SubPeril part : split.subPerils()) {
-                    mean += n * part.chance() * part.severity().mean();
                     finite &= finiteVariance(part.severity());
                 }
             } else {
-                SeverityModel severity = ((EventLoss.Single) peril.eventLoss()).severity();
-                mean += n * severity.mean();
-                finite &= finiteVariance(severity);
+                finite &= finiteVariance(((EventLoss.Single) peril.eventLoss()).severity());
             }
         }
-        return new GrossMoments(mean, finite);
+        return new GrossMoments(portfolio.expectedLoss(), finite);
     }
 
     private static boolean finiteVariance(SeverityModel severity) {

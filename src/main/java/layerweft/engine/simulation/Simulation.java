@@ -5,11 +5,6 @@ import java.util.List;
 import java.util.Map;
 import java.util.TreeMap;
 import java.util.concurrent.CancellationException;
-import java.util.concurrent.ExecutionException;
-import java.util.concurrent.ExecutorService;
-import java.util.concurrent.Executors;
-import java.util.concurrent.Future;
-import java.util.concurrent.atomic.AtomicLong;
 import layerweft.engine.RunControl;
 import layerweft.figures.LayerStatistics;
 import layerweft.figures.WholeStatistics;
@@ -41,12 +36,9 @@ public final class Simulation {
     private final int bits;
     private final Estimates estimates;
 
-    private final AtomicLong nextBlock = new AtomicLong();
-    private final AtomicLong yearsDone = new AtomicLong();
     private final OrderedSums sums = new OrderedSums();
     private final Map<Long, List<LayerStatistics>> layersByBlock = new TreeMap<>();
     private final Map<Long, WholeStatistics> wholeByBlock = new TreeMap<>();
-    private volatile boolean failed;
 
     private Simulation(Treaty treaty, SimulationSettings settings, RunControl control) {
         this.treaty = treaty;
@@ -69,67 +61,38 @@ public final class Simulation {
     }
 
     private SimulationResult run() {
-        int threads = (int) Math.min(settings.threads(), blocks);
-        ExecutorService pool = Executors.newFixedThreadPool(threads, task -> {
-            Thread thread = new Thread(task, "simulation");
-            thread.setDaemon(true);
-            return thread;
-        });
         Sketches all = null;
-        try {
-            List<Future<Sketches>> running = new ArrayList<>();
-            for (int t = 0; t < threads; t++) {
-                running.add(pool.submit(this::work));
+        for (Workspace one : new Blocks(blocks, this::years, settings.years(), control).run(settings.threads(), this::workspace, this::block)) {
+            if (all == null) {
+                all = one.sketches;
+            } else {
+                all.merge(one.sketches);
             }
-            for (Future<Sketches> thread : running) {
-                Sketches one = thread.get();
-                if (all == null) {
-                    all = one;
-                } else {
-                    all.merge(one);
-                }
-            }
-        } catch (InterruptedException e) {
-            failed = true;
-            Thread.currentThread().interrupt();
-            throw new CancellationException("the simulation was interrupted");
-        } catch (ExecutionException e) {
-            failed = true;
-            if (e.getCause() instanceof RuntimeException cause) {
-                throw cause;
-            }
-            if (e.getCause() instanceof Error cause) {
-                throw cause;
-            }
-            throw new IllegalStateException(e.getCause());
-        } finally {
-            pool.shutdown();
         }
         return result(sums.total(), all);
     }
 
-    /** One thread: takes blocks until there are none left. */
-    private Sketches work() {
-        Worker worker = new Worker(treaty, draw, (int) Math.min(blockYears, settings.years()));
-        Sketches own = new Sketches(treaty, bits);
-        for (long block = nextBlock.getAndIncrement(); block < blocks; block = nextBlock.getAndIncrement()) {
-            if (failed || control.cancelled()) {
-                failed = true;
-                throw new CancellationException("the simulation was stopped");
-            }
-            int years = (int) Math.min(blockYears, settings.years() - block * blockYears);
-            if (draw.rearranges()) {
-                Sketches ofBlock = new Sketches(treaty, bits);
-                BlockSums blockSums = worker.simulate(block, years, ofBlock);
-                keepBatch(block, years, blockSums, ofBlock);
-                own.merge(ofBlock);
-                sums.add(block, blockSums);
-            } else {
-                sums.add(block, worker.simulate(block, years, own));
-            }
-            control.progress(yearsDone.addAndGet(years), settings.years());
+    private int years(long block) {
+        return (int) Math.min(blockYears, settings.years() - block * blockYears);
+    }
+
+    /** What one thread works with. */
+    private record Workspace(Worker worker, Sketches sketches) {}
+
+    private Workspace workspace() {
+        return new Workspace(new Worker(treaty, draw, (int) Math.min(blockYears, settings.years())), new Sketches(treaty, bits));
+    }
+
+    private void block(Workspace own, long block, int years) {
+        if (!draw.rearranges()) {
+            sums.add(block, own.worker.simulate(block, years, own.sketches));
+            return;
         }
-        return own;
+        Sketches ofBlock = new Sketches(treaty, bits);
+        BlockSums blockSums = own.worker.simulate(block, years, ofBlock);
+        keepBatch(block, years, blockSums, ofBlock);
+        own.sketches.merge(ofBlock);
+        sums.add(block, blockSums);
     }
 
     private void keepBatch(long block, int years, BlockSums blockSums, Sketches ofBlock) {

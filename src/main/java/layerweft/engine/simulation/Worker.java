@@ -22,19 +22,15 @@ final class Worker {
         int layers = treaty.layers();
         terms = new LayerTerms[layers];
         share = new double[layers];
-        boolean[] timed = new boolean[layers];
-        boolean ordered = false;
         for (int j = 0; j < layers; j++) {
             Layer layer = treaty.layer(j);
             terms[j] = layer.terms();
             share[j] = layer.share();
-            timed[j] = layer.proRataTime();
-            ordered |= timed[j] || !layer.inuring().isEmpty();
         }
         perils = draw.workspace(years);
         scores = new double[draw.perils()][years];
-        applied = ordered ? new TermsInOrder(treaty) : new TermsAtOnce(treaty);
-        amounts = new YearAmounts(years, timed);
+        applied = TermsApplied.of(treaty);
+        amounts = YearAmounts.of(treaty, years);
         ceded = new double[years];
         net = new double[years];
     }

@@ -1,6 +1,7 @@
 package layerweft.engine.simulation;
 
 import java.util.Arrays;
+import layerweft.model.treaty.Treaty;
 
 /**
  * The amounts of each year of a block, at 100 % of each layer: what the terms make of the events. A workspace, zeroed for each block.
@@ -26,7 +27,15 @@ final class YearAmounts {
     final double[] cededLargest;
     final double[] netLargest;
 
-    YearAmounts(int years, boolean[] proRataTime) {
+    static YearAmounts of(Treaty treaty, int years) {
+        boolean[] timed = new boolean[treaty.layers()];
+        for (int j = 0; j < timed.length; j++) {
+            timed[j] = treaty.layer(j).proRataTime();
+        }
+        return new YearAmounts(years, timed);
+    }
+
+    private YearAmounts(int years, boolean[] proRataTime) {
         int layers = proRataTime.length;
         sum = new double[layers][years];
         hits = new int[layers][years];

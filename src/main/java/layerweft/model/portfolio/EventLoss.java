@@ -11,10 +11,18 @@ import layerweft.model.severity.SeverityModel;
 /** What one event of a peril costs: a single loss, or a loss for each sub-peril. */
 public sealed interface EventLoss {
 
+    /** Expected loss of one event, of all its parts together; possibly infinite. */
+    double mean();
+
     /** One loss. */
     record Single(SeverityModel severity) implements EventLoss {
         public Single {
             new Check().that(severity != null, "severity", "nothing", "a severity model").orThrow();
+        }
+
+        @Override
+        public double mean() {
+            return severity.mean();
         }
     }
 
@@ -42,6 +50,11 @@ public sealed interface EventLoss {
                 }
             }
             check.orThrow();
+        }
+
+        @Override
+        public double mean() {
+            return subPerils.stream().mapToDouble(part -> part.chance() * part.severity().mean()).sum();
         }
     }
 }

@@ -16,4 +16,9 @@ public record Peril(String name, FrequencyModel frequency, EventLoss eventLoss) 
                 .that(eventLoss != null, "severity", "nothing", "a severity or sub-perils")
                 .orThrow();
     }
+
+    /** E[N]·E[X], the expected ground-up loss of a year; possibly infinite. */
+    public double expectedLoss() {
+        return frequency.mean() == 0 ? 0 : frequency.mean() * eventLoss.mean();
+    }
 }

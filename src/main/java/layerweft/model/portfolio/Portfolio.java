@@ -39,6 +39,11 @@ public record Portfolio(String name, String currency, String unit, List<Peril> p
         return new Portfolio(name, currency, unit, perils, other);
     }
 
+    /** Expected ground-up loss of a year, Σ E[N_i]·E[X_i], whatever the dependence; possibly infinite. */
+    public double expectedLoss() {
+        return perils.stream().mapToDouble(Peril::expectedLoss).sum();
+    }
+
     /** Position of the peril of that name, or -1. */
     public int indexOf(String perilName) {
         for (int i = 0; i < perils.size(); i++) {

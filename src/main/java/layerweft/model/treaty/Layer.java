@@ -63,6 +63,12 @@ public record Layer(
         return new Layer(name, List.of(names), occurrence, annual, reinstatements, quotaShare, share, proRataTime, inuring, premium);
     }
 
+    /** The same layer without the recoveries of a layer of that name taken off first. */
+    public Layer withoutInuring(String other) {
+        return new Layer(name, perils, occurrence, annual, reinstatements, quotaShare, share, proRataTime,
+                inuring.stream().filter(n -> !n.equals(other)).toList(), premium);
+    }
+
     /** The terms as arithmetic. */
     public LayerTerms terms() {
         return LayerTerms.of(this);

@@ -36,8 +36,8 @@ class TermsAppliedTest {
         YearDraw draw = new YearDraw(treaty.portfolio(), seed);
         PerilYears[] work = draw.workspace(YEARS);
         draw.draw(0, YEARS, work, new double[draw.perils()][YEARS]);
-        YearAmounts atOnce = new YearAmounts(YEARS, new boolean[treaty.layers()]);
-        YearAmounts inOrder = new YearAmounts(YEARS, new boolean[treaty.layers()]);
+        YearAmounts atOnce = YearAmounts.of(treaty, YEARS);
+        YearAmounts inOrder = YearAmounts.of(treaty, YEARS);
         new TermsAtOnce(treaty).apply(work, YEARS, draw, 0, atOnce);
         new TermsInOrder(treaty).apply(work, YEARS, draw, 0, inOrder);
         String message = "seed " + seed;
