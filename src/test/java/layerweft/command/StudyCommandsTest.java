@@ -168,4 +168,20 @@ class StudyCommandsTest {
         assertTrue(text.contains("what each layer is worth"), text);
         layerweft.command.Run.of("compare", Path.of("demo-portfolios", "harrow-coast.json"), treaties.resolve("harrow-coast-one-layer.json")).refused();
     }
+
+    @Test
+    void driversAddUpInEveryForm() throws IOException {
+        JsonNode tree = json("drivers", "--years", "20000", "--format", "json");
+        for (JsonNode layer : tree.get("layers")) {
+            double sum = 0;
+            for (JsonNode peril : layer.get("perils")) {
+                sum += peril.get("expectedShare").doubleValue();
+            }
+            assertEquals(1, sum, 1e-12);
+        }
+        assertTrue(tree.has("kept"));
+        List<CsvRecord> rows = csv("drivers", "--years", "20000", "--format", "csv");
+        assertEquals(1 + (tree.get("layers").size() + 1) * tree.get("kept").get("perils").size(), rows.size());
+        assertTrue(run("drivers", "--years", "20000").out.contains("share in bad years"));
+    }
 }

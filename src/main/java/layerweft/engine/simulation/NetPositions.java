@@ -12,12 +12,9 @@ import layerweft.model.treaty.Treaty;
 /**
  * The buyer's net positions under several programmes on one portfolio, from the same years: events, counts and times are those that
  * {@link Simulation} draws for the same seed, so that differences between programmes have only the noise of what differs.
- *
- * <p>Errors are by batch means (Law &amp; Kelton, "Simulation Modeling and Analysis", ch. 9): the years are cut into runs of whole blocks, and a
- * figure's error, or that of a difference of figures, is its standard deviation over the runs by the root of their number.
+ * Errors are by {@link Batches}.
  */
 public final class NetPositions {
-    private static final int MOST_BATCHES = 64;
     private static final int BITS = 11;
 
     /**
@@ -42,9 +39,7 @@ public final class NetPositions {
     private final SimulationSettings settings;
     private final RunControl control;
     private final YearDraw draw;
-    private final int blockYears;
-    private final long blocks;
-    private final int batches;
+    private final Batches batches;
     /** By batch: gross, then net position and recoveries of each programme. */
     private final YearTotals[][] byBatch;
 
@@ -57,10 +52,8 @@ public final class NetPositions {
         this.settings = settings;
         this.control = control;
         draw = new YearDraw(portfolio, settings.seed());
-        blockYears = draw.rearranges() ? Simulation.REARRANGED_BLOCK : Simulation.BLOCK;
-        blocks = (settings.years() + blockYears - 1) / blockYears;
-        batches = (int) Math.min(MOST_BATCHES, blocks);
-        byBatch = new YearTotals[batches][];
+        batches = Batches.of(settings.years(), draw);
+        byBatch = new YearTotals[batches.count()][];
     }
 
     /**
@@ -77,7 +70,7 @@ public final class NetPositions {
     }
 
     private Result run() {
-        new Blocks(batches, this::years, settings.years(), control).run(settings.threads(), this::workspace, this::batch);
+        new Blocks(batches.count(), batches::yearsOf, settings.years(), control).run(settings.threads(), this::workspace, this::batch);
         GrossMoments known = GrossMoments.of(portfolio);
         boolean infiniteMean = known.mean() == Double.POSITIVE_INFINITY;
         List<PositionSample> net = new ArrayList<>();
@@ -99,20 +92,12 @@ public final class NetPositions {
 
     private PositionSample sample(int position, boolean infiniteMean, boolean infiniteVariance) {
         YearTotals all = new YearTotals(BITS);
-        double[][] figures = new double[batches][];
-        for (int b = 0; b < batches; b++) {
+        double[][] figures = new double[batches.count()][];
+        for (int b = 0; b < figures.length; b++) {
             figures[b] = byBatch[b][position].figures(levels, tailLevel);
             all.add(byBatch[b][position]);
         }
         return new PositionSample(levels, all.figures(levels, tailLevel), figures, infiniteMean, infiniteVariance);
-    }
-
-    private long firstBlock(long batch) {
-        return batch * blocks / batches;
-    }
-
-    private int years(long batch) {
-        return (int) (Math.min(settings.years(), firstBlock(batch + 1) * blockYears) - firstBlock(batch) * blockYears);
     }
 
     /** What one thread works with. */
@@ -124,7 +109,7 @@ public final class NetPositions {
         private final NetYears[] net;
 
         Workspace() {
-            int years = (int) Math.min(blockYears, settings.years());
+            int years = batches.mostYears();
             perils = draw.workspace(years);
             scores = new double[draw.perils()][years];
             applied = structures.stream().map(s -> TermsApplied.of(s.treaty())).toArray(TermsApplied[]::new);
@@ -140,8 +125,8 @@ public final class NetPositions {
     private void batch(Workspace own, long batch, int yearsOfBatch) {
         YearTotals[] totals = new YearTotals[1 + 2 * structures.size()];
         Arrays.setAll(totals, s -> new YearTotals(BITS));
-        for (long block = firstBlock(batch); block < firstBlock(batch + 1); block++) {
-            int years = (int) Math.min(blockYears, settings.years() - block * blockYears);
+        for (long block = batches.firstBlock(batch); block < batches.firstBlock(batch + 1); block++) {
+            int years = batches.yearsOfBlock(block);
             draw.draw(block, years, own.perils, own.scores);
             for (int s = 0; s < own.net.length; s++) {
                 own.amounts[s].clear(years);

@@ -13,8 +13,6 @@ public final class PositionSample {
     static final int DEVIATION = 1;
     static final int TAIL = 2;
     static final int FIRST_LEVEL = 3;
-    /** With fewer batches their spread says nothing. */
-    private static final int FEWEST_BATCHES = 8;
 
     private final List<Double> levels;
     private final double[] pooled;
@@ -75,7 +73,7 @@ public final class PositionSample {
         for (int b = 0; b < each.length; b++) {
             each[b] = batches[b][TAIL] - batches[b][MEAN];
         }
-        return new Figure(pooled[TAIL] - pooled[MEAN], error(each));
+        return Batches.figure(pooled[TAIL] - pooled[MEAN], each);
     }
 
     /** This sample's figures less another's from the same years: the errors are those of the differences. */
@@ -117,22 +115,6 @@ public final class PositionSample {
         for (int b = 0; b < each.length; b++) {
             each[b] = batches[b][k];
         }
-        return new Figure(pooled[k], error(each));
-    }
-
-    private static double error(double[] each) {
-        int n = each.length;
-        if (n < FEWEST_BATCHES) {
-            return Double.POSITIVE_INFINITY;
-        }
-        double mean = 0;
-        for (double v : each) {
-            mean += v / n;
-        }
-        double square = 0;
-        for (double v : each) {
-            square += (v - mean) * (v - mean);
-        }
-        return Math.sqrt(square / (n - 1) / n);
+        return Batches.figure(pooled[k], each);
     }
 }

@@ -47,10 +47,16 @@ final class TermsAtOnce implements TermsApplied {
             reserve(work[i].events);
             years(work[i], years);
             int reaching = firstPass(work[i], threshold(i), out);
+            if (out.grossOf != null) {
+                add(groundUp(work[i]), yearOf, work[i].events, out.grossOf[i]);
+            }
             Arrays.fill(ceded, 0, reaching, 0);
             for (int j = 0; j < terms.length; j++) {
                 if (covers[j].covers(i)) {
                     layer(j, subject(work[i], i, j, reaching), reaching, out);
+                    if (out.sumOf != null) {
+                        add(occurrence, year, reaching, out.sumOf[j][i]);
+                    }
                 }
             }
             double[] cededLargest = out.cededLargest;
@@ -172,6 +178,12 @@ final class TermsAtOnce implements TermsApplied {
             hits[y]++;
             largest[y] = alone > largest[y] ? alone : largest[y];
             ceded[k] += s * alone;
+        }
+    }
+
+    private static void add(double[] amounts, int[] years, int events, double[] out) {
+        for (int e = 0; e < events; e++) {
+            out[years[e]] += amounts[e];
         }
     }
 

@@ -111,6 +111,9 @@ final class TermsInOrder implements TermsApplied {
                 double after = terms[j].annualLoss(soFar[j]);
                 recovered[j] = after - before;
                 out.sum[j][y] = soFar[j];
+                if (out.sumOf != null) {
+                    out.sumOf[j][peril][y] += o;
+                }
                 out.hits[j][y]++;
                 if (timed[j]) {
                     double piece = terms[j].reinstatementFactor(after) - terms[j].reinstatementFactor(before);
@@ -119,6 +122,9 @@ final class TermsInOrder implements TermsApplied {
             }
         }
         out.gross[y] += groundUp;
+        if (out.grossOf != null) {
+            out.grossOf[peril][y] += groundUp;
+        }
         out.grossLargest[y] = Math.max(out.grossLargest[y], groundUp);
         out.cededLargest[y] = Math.max(out.cededLargest[y], ceded);
         out.netLargest[y] = Math.max(out.netLargest[y], groundUp - ceded);

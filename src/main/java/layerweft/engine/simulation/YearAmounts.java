@@ -26,16 +26,28 @@ final class YearAmounts {
     /** The largest of one event's recoveries of all layers at their shares, and of what remains of an event. */
     final double[] cededLargest;
     final double[] netLargest;
+    /** Parts of {@link #sum} and {@link #gross} by peril, {@code [layer][peril][year]} and {@code [peril][year]}; null where nobody asks. */
+    final double[][][] sumOf;
+    final double[][] grossOf;
 
     static YearAmounts of(Treaty treaty, int years) {
+        return of(treaty, years, false);
+    }
+
+    /** With what each peril brings. */
+    static YearAmounts byPeril(Treaty treaty, int years) {
+        return of(treaty, years, true);
+    }
+
+    private static YearAmounts of(Treaty treaty, int years, boolean byPeril) {
         boolean[] timed = new boolean[treaty.layers()];
         for (int j = 0; j < timed.length; j++) {
             timed[j] = treaty.layer(j).proRataTime();
         }
-        return new YearAmounts(years, timed);
+        return new YearAmounts(years, timed, byPeril ? treaty.portfolio().perils().size() : 0);
     }
 
-    private YearAmounts(int years, boolean[] proRataTime) {
+    private YearAmounts(int years, boolean[] proRataTime, int perils) {
         int layers = proRataTime.length;
         sum = new double[layers][years];
         hits = new int[layers][years];
@@ -50,6 +62,8 @@ final class YearAmounts {
         grossLargest = new double[years];
         cededLargest = new double[years];
         netLargest = new double[years];
+        sumOf = perils == 0 ? null : new double[layers][perils][years];
+        grossOf = perils == 0 ? null : new double[perils][years];
     }
 
     /** Lists a year for a layer unless it is already; to be called before the layer's first amount of the year is put in. */
@@ -70,6 +84,12 @@ final class YearAmounts {
                 }
             }
             hitYears[j] = 0;
+        }
+        for (int i = 0; grossOf != null && i < grossOf.length; i++) {
+            Arrays.fill(grossOf[i], 0, years, 0);
+            for (double[][] layer : sumOf) {
+                Arrays.fill(layer[i], 0, years, 0);
+            }
         }
         Arrays.fill(gross, 0, years, 0);
         Arrays.fill(grossLargest, 0, years, 0);
