@@ -1,5 +1,7 @@
 package layerweft.file;
 
+import java.util.List;
+
 /** Paths of values in a file, e.g. {@code perils[1].severity.alpha}; the whole file is the empty path. */
 final class FieldPath {
     private FieldPath() {}
@@ -15,5 +17,18 @@ final class FieldPath {
     /** A path below another: a field, an item, or nothing. */
     static String below(String path, String rest) {
         return rest.isEmpty() || rest.startsWith("[") ? path + rest : field(path, rest);
+    }
+
+    /** The steps of a path: names of fields, and items as {@code [k]}. */
+    static List<String> steps(String path) {
+        return path.isEmpty() ? List.of() : List.of(path.split("\\.|(?=\\[)"));
+    }
+
+    static boolean isItem(String step) {
+        return step.startsWith("[");
+    }
+
+    static int index(String step) {
+        return Integer.parseInt(step.substring(1, step.length() - 1));
     }
 }
