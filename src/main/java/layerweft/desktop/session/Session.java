@@ -7,12 +7,14 @@ import java.util.List;
 import java.util.function.UnaryOperator;
 import javafx.beans.property.BooleanProperty;
 import javafx.beans.property.IntegerProperty;
+import javafx.beans.property.ObjectProperty;
 import javafx.beans.property.ReadOnlyBooleanProperty;
 import javafx.beans.property.ReadOnlyBooleanWrapper;
 import javafx.beans.property.ReadOnlyObjectProperty;
 import javafx.beans.property.ReadOnlyObjectWrapper;
 import javafx.beans.property.SimpleBooleanProperty;
 import javafx.beans.property.SimpleIntegerProperty;
+import javafx.beans.property.SimpleObjectProperty;
 import javafx.collections.FXCollections;
 import javafx.collections.ObservableList;
 import layerweft.file.Fault;
@@ -43,6 +45,7 @@ public final class Session {
     private final IntegerProperty selectedLayer = new SimpleIntegerProperty();
     private final BooleanProperty dark = new SimpleBooleanProperty();
     private final ReadOnlyObjectWrapper<Pin> pin = new ReadOnlyObjectWrapper<>();
+    private final ObjectProperty<DataRange> dataRange = new SimpleObjectProperty<>();
     private Document saved;
     /** The document from which the treaty was read. */
     private Document valid;
@@ -211,6 +214,33 @@ public final class Session {
 
     public void unpin() {
         pin.set(null);
+    }
+
+    /** Brings the pinned document back, as one step that can be undone. */
+    public void backToPin() {
+        Document base = pin.get().prices().document();
+        edit("return to the pinned state", present -> present.withPortfolio(p -> base.portfolio()).withProgramme(p -> base.programme()));
+    }
+
+    /** The range of τ that the data leave open; null where nothing is known. */
+    public ObjectProperty<DataRange> dataRange() {
+        return dataRange;
+    }
+
+    /** The families to choose from, in the order of the screen; a Student copula with the degrees of freedom of the file. */
+    public List<CopulaFamily> families() {
+        CopulaFamily now = tau.get() == null ? null : tau.get().family();
+        boolean student = now != null && now.kind() == CopulaFamily.Kind.STUDENT;
+        return FamilyName.IN_ORDER.stream().map(f -> student && f.kind() == CopulaFamily.Kind.STUDENT ? now : f).toList();
+    }
+
+    /** Takes the family that is so many places on in {@link #families}. */
+    public void stepFamily(int places) {
+        if (tau.get() != null && tau.get().turns()) {
+            List<CopulaFamily> all = families();
+            int at = all.indexOf(tau.get().family());
+            setFamily(all.get(Math.floorMod(at < 0 ? 0 : at + places, all.size())));
+        }
     }
 
     /**
