@@ -12,7 +12,6 @@ import layerweft.desktop.session.Document;
 import layerweft.desktop.session.Session;
 import layerweft.file.FaultyFileException;
 import layerweft.file.FileTree;
-import layerweft.file.SafeFile;
 import layerweft.file.TreatyCheck;
 
 /** Opening and saving: portfolio and programme are two files, opened together or one at a time. */
@@ -124,8 +123,8 @@ public final class DocumentFiles {
         }
         Document now = session.document().get();
         try {
-            SafeFile.write(portfolio.get(), now.portfolio().text());
-            SafeFile.write(programme.get(), now.programme().text());
+            WholeFile.write(portfolio.get(), now.portfolio().text());
+            WholeFile.write(programme.get(), now.programme().text());
         } catch (UncheckedIOException e) {
             dialogs.tell("The file was not saved", e.getMessage());
             return false;
