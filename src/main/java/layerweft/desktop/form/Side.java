@@ -1,7 +1,7 @@
 package layerweft.desktop.form;
 
-import java.util.List;
 import java.util.function.UnaryOperator;
+import javafx.collections.ObservableList;
 import layerweft.desktop.session.Document;
 import layerweft.desktop.session.Session;
 import layerweft.file.Fault;
@@ -16,7 +16,7 @@ public enum Side {
         }
 
         @Override
-        public List<Fault> faults(Session session) {
+        public ObservableList<Fault> faults(Session session) {
             return session.portfolioFaults();
         }
 
@@ -32,7 +32,7 @@ public enum Side {
         }
 
         @Override
-        public List<Fault> faults(Session session) {
+        public ObservableList<Fault> faults(Session session) {
             return session.programmeFaults();
         }
 
@@ -44,7 +44,7 @@ public enum Side {
 
     public abstract FileTree tree(Document document);
 
-    public abstract List<Fault> faults(Session session);
+    public abstract ObservableList<Fault> faults(Session session);
 
     public abstract Document with(Document document, UnaryOperator<FileTree> edit);
 }
