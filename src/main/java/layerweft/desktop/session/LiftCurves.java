@@ -71,6 +71,20 @@ public record LiftCurves(Treaty treaty, List<Double> taus, List<Curve> layers, b
                 .min().orElse(0));
     }
 
+    /** The layer that the dependence moves most, by the width of its curve. */
+    public int mostMoved() {
+        int most = 0;
+        double widest = 0;
+        for (int j = 0; j < layers.size(); j++) {
+            var lifts = layers.get(j).lifts().stream().filter(Double::isFinite).mapToDouble(Double::doubleValue).summaryStatistics();
+            if (lifts.getMax() - lifts.getMin() > widest) {
+                widest = lifts.getMax() - lifts.getMin();
+                most = j;
+            }
+        }
+        return most;
+    }
+
     /** Prices the curves; none where there is one peril. */
     static LiftCurves of(Treaty treaty, RunControl control) {
         DependenceStrength strength = DependenceStrength.of(treaty.portfolio().dependence().copula(), treaty.portfolio().perils().size());

@@ -1,0 +1,157 @@
+package layerweft.desktop;
+
+import java.awt.image.BufferedImage;
+import java.io.IOException;
+import java.io.UncheckedIOException;
+import java.nio.file.Files;
+import java.nio.file.Path;
+import java.util.List;
+import java.util.Locale;
+import java.util.concurrent.CountDownLatch;
+import java.util.concurrent.ExecutionException;
+import java.util.concurrent.FutureTask;
+import javafx.application.Platform;
+import javafx.embed.swing.SwingFXUtils;
+import javafx.scene.image.WritableImage;
+import javafx.stage.Stage;
+import javax.imageio.ImageIO;
+import layerweft.desktop.session.Background;
+import layerweft.desktop.session.Document;
+import layerweft.desktop.session.Session;
+
+/**
+ * Draws the window in memory, every room, light and dark, in three sizes, and writes the pictures to a folder:
+ * {@code Screenshots FOLDER [ROOM…]}. Needs no display.
+ */
+final class Screenshots {
+    private static final int[][] SIZES = {{1280, 800}, {1440, 900}, {1920, 1080}};
+    /** How long prices and curves may take. */
+    private static final long PATIENCE = 20_000;
+
+    private Screenshots() {}
+
+    public static void main(String[] args) throws Exception {
+        System.setProperty("glass.platform", "Monocle");
+        System.setProperty("monocle.platform", "Headless");
+        System.setProperty("headless.geometry", "2000x1300-32");
+        System.setProperty("prism.order", "sw");
+        System.setProperty("prism.text", "t2k");
+        System.setProperty("java.awt.headless", "true");
+        Path folder = Files.createDirectories(Path.of(args[0]));
+        List<String> rooms = args.length > 1 ? List.of(args).subList(1, args.length)
+                : Rooms.all().stream().filter(place -> place.reason().isEmpty()).map(Rooms.Place::name).toList();
+        CountDownLatch started = new CountDownLatch(1);
+        Platform.startup(started::countDown);
+        started.await();
+        Path preferences = Files.createTempDirectory("layerweft-screenshots");
+        DesktopWindow window = onWindow(() -> {
+            DesktopWindow made = new DesktopWindow(new Stage(), preferences, Background.ofWindow());
+            made.show();
+            return made;
+        });
+        Session session = window.session();
+        settle(session);
+        onWindow(() -> {
+            session.setTau(0.15, null);
+            return null;
+        });
+        settle(session);
+        onWindow(() -> {
+            session.pin();
+            session.setTau(0.3, null);
+            return null;
+        });
+        settle(session);
+        for (int[] size : SIZES) {
+            for (boolean dark : new boolean[] {false, true}) {
+                for (String room : rooms) {
+                    onWindow(() -> {
+                        window.theme().dark().set(dark);
+                        window.frame().getScene().getWindow().setWidth(size[0]);
+                        window.frame().getScene().getWindow().setHeight(size[1]);
+                        window.frame().goTo(room);
+                        return null;
+                    });
+                    settle(session);
+                    Thread.sleep(400);
+                    picture(window, folder.resolve(String.format(Locale.ROOT, "%s-%d-%s.png", room.toLowerCase(Locale.ROOT), size[0], dark ? "dark" : "light")));
+                }
+            }
+        }
+        variants(window, folder);
+        System.exit(0);
+    }
+
+    /** States of the strip that the rooms do not show: many layers, pairs that differ, faults, large text. */
+    private static void variants(DesktopWindow window, Path folder) throws Exception {
+        Session session = window.session();
+        Document demo = Document.demo();
+        variant(window, folder, "strip-twelve-layers", () -> {
+            window.theme().dark().set(false);
+            window.frame().getScene().getWindow().setWidth(1440);
+            window.frame().getScene().getWindow().setHeight(900);
+            for (int k = 0; k < 9; k++) {
+                session.edit("copy", d -> d.withProgramme(p -> layerweft.desktop.session.LayerEdit.duplicated(p, 2)));
+            }
+        });
+        variant(window, folder, "strip-matrix", () -> {
+            session.open(demo);
+            session.edit("matrix", d -> d.withPortfolio(p -> p.set("dependence.copula", java.util.Map.of("family", "gaussian", "correlation",
+                    List.of(List.of(1.0, 0.6, 0.2), List.of(0.6, 1.0, 0.4), List.of(0.2, 0.4, 1.0))))));
+        });
+        variant(window, folder, "strip-independent", () -> {
+            session.open(demo);
+            session.edit("no dependence", d -> d.withPortfolio(p -> p.remove("dependence")));
+        });
+        variant(window, folder, "strip-two-perils-negative", () -> {
+            session.open(demo);
+            session.edit("two perils", d -> d.withPortfolio(p -> p.remove("perils[2]").set("dependence.copula",
+                    java.util.Map.of("family", "frank", "kendallTau", -0.25))).withProgramme(p -> p.remove("layers[2].perils")));
+        });
+        variant(window, folder, "strip-fault", () -> {
+            session.open(demo);
+        });
+        variant(window, folder, "strip-fault", () -> session.edit("limit", d -> d.withProgramme(p -> p.set("layers[0].occurrence.limit", -5))));
+        variant(window, folder, "strip-inuring", () -> session.open(new Document(Document.demo("demo-portfolios/harrow-coast.json"),
+                Document.demo("treaties/harrow-coast-inuring.json"), null, null)));
+        variant(window, folder, "strip-large-text", () -> {
+            session.open(demo);
+            window.theme().textPercent().set(130);
+            window.frame().getScene().getWindow().setWidth(1920);
+            window.frame().getScene().getWindow().setHeight(1080);
+        });
+    }
+
+    private static void variant(DesktopWindow window, Path folder, String name, Runnable set) throws Exception {
+        onWindow(() -> {
+            set.run();
+            return null;
+        });
+        settle(window.session());
+        Thread.sleep(400);
+        picture(window, folder.resolve(name + ".png"));
+    }
+
+    private static void settle(Session session) throws Exception {
+        long end = System.currentTimeMillis() + PATIENCE;
+        while (System.currentTimeMillis() < end && !onWindow(() -> session.background().running().isEmpty())) {
+            Thread.sleep(50);
+        }
+    }
+
+    private static void picture(DesktopWindow window, Path file) throws Exception {
+        WritableImage image = onWindow(() -> window.frame().getScene().snapshot(null));
+        BufferedImage picture = SwingFXUtils.fromFXImage(image, null);
+        try {
+            ImageIO.write(picture, "png", file.toFile());
+        } catch (IOException e) {
+            throw new UncheckedIOException(e);
+        }
+    }
+
+    private static <T> T onWindow(java.util.concurrent.Callable<T> what) throws InterruptedException, ExecutionException {
+        FutureTask<T> task = new FutureTask<>(what);
+        Platform.runLater(task);
+        return task.get();
+    }
+}
