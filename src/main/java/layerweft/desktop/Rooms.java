@@ -2,6 +2,7 @@ package layerweft.desktop;
 
 import java.util.List;
 import java.util.function.Function;
+import layerweft.desktop.dependence.DependenceRoom;
 import layerweft.desktop.perils.PerilsRoom;
 import layerweft.desktop.quote.QuoteRoom;
 import layerweft.desktop.sensitivity.SensitivityRoom;
@@ -36,7 +37,7 @@ public final class Rooms {
     public static List<Place> all() {
         return List.of(
                 Place.of("Perils", Icons.PERILS, PerilsRoom::new),
-                Place.of("Dependence", Icons.DEPENDENCE, tools -> new EmptyRoom("Dependence")),
+                Place.of("Dependence", Icons.DEPENDENCE, DependenceRoom::new),
                 Place.of("Programme", Icons.PROGRAMME, tools -> new EmptyRoom("Programme")),
                 Place.of("Quote", Icons.QUOTE, QuoteRoom::new),
                 Place.of("Sensitivity", Icons.SENSITIVITY, SensitivityRoom::new),

@@ -85,7 +85,7 @@ public final class Theme {
 
     private void dressNow(Scene scene) {
         scene.setUserAgentStylesheet(dark.get() ? new PrimerDark().getUserAgentStylesheet() : new PrimerLight().getUserAgentStylesheet());
-        scene.getStylesheets().setAll(inline(text(dark.get() ? "dark.css" : "light.css")), inline(scaled(text("layerweft.css"))));
+        scene.getStylesheets().setAll(inline(text(dark.get() ? "dark.css" : "light.css")), inline(scaled(text("layerweft.css"))), inline(scaled(text("rooms.css"))));
     }
 
     private String scaled(String css) {
