@@ -4,6 +4,7 @@ import java.util.List;
 import java.util.function.Function;
 import layerweft.desktop.dependence.DependenceRoom;
 import layerweft.desktop.perils.PerilsRoom;
+import layerweft.desktop.programme.ProgrammeRoom;
 import layerweft.desktop.quote.QuoteRoom;
 import layerweft.desktop.sensitivity.SensitivityRoom;
 import layerweft.desktop.theme.Icons;
@@ -38,7 +39,7 @@ public final class Rooms {
         return List.of(
                 Place.of("Perils", Icons.PERILS, PerilsRoom::new),
                 Place.of("Dependence", Icons.DEPENDENCE, DependenceRoom::new),
-                Place.of("Programme", Icons.PROGRAMME, tools -> new EmptyRoom("Programme")),
+                Place.of("Programme", Icons.PROGRAMME, ProgrammeRoom::new),
                 Place.of("Quote", Icons.QUOTE, QuoteRoom::new),
                 Place.of("Sensitivity", Icons.SENSITIVITY, SensitivityRoom::new),
                 Place.later("Structures", Icons.STRUCTURES, "comes with the comparison of programmes"),

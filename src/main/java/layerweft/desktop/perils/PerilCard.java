@@ -56,11 +56,12 @@ final class PerilCard extends VBox {
         getStyleClass().addAll("lw-panel", "lw-peril-card");
         curve = new ChartView(tools.theme());
         curve.setMinHeight(150);
-        curve.setPrefHeight(170);
-        VBox.setVgrow(curve, Priority.ALWAYS);
+        curve.setPrefHeight(160);
+        Region spare = new Region();
+        VBox.setVgrow(spare, Priority.ALWAYS);
         HBox figures = new HBox(of("mean", mean), of("std dev", deviation), of("1 in 10", often), of("1 in 100", rare));
         figures.getStyleClass().add("lw-figures");
-        getChildren().addAll(head(), model("Frequency", path("frequency")), losses(), curve, figures);
+        getChildren().addAll(head(), model("Frequency", path("frequency")), losses(), spare, curve, figures);
     }
 
     private String path(String field) {
