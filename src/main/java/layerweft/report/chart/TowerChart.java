@@ -383,6 +383,7 @@ public record TowerChart(List<Block> layers, List<Cover> covers, List<String> pe
             }
             x = cell.getMaxX();
         }
+        x = Math.max(x, all.getMaxX());
         double room = Math.max(20, cellsRight(area) - x - 16);
         if (all.getHeight() >= 30) {
             Marks.left(g, Marks.fitting(g, block.name, ChartFonts.semibold(13), room), x + 10, all.getCenterY() - 8, ChartFonts.semibold(13), palette.ink());
