@@ -46,12 +46,12 @@ sealed interface Node {
      * A number, to the nearest double.
      *
      * @param value infinite where the number is beyond the range of a double
-     * @param written how it was written, kept only where {@code value} is infinite
+     * @param written how it was written, so that saving a file changes no number that nobody edited
      */
     record Decimal(Place place, double value, String written) implements Node {
         @Override
         public String shown() {
-            return written != null ? Excerpt.plain(written) : value == Math.rint(value) && Math.abs(value) < 1e15
+            return Double.isInfinite(value) ? Excerpt.plain(written) : value == Math.rint(value) && Math.abs(value) < 1e15
                     ? Long.toString((long) value) : Double.toString(value);
         }
     }

@@ -80,16 +80,11 @@ final class TreeParser {
             case START_OBJECT -> members(place);
             case START_ARRAY -> elements(place);
             case VALUE_STRING -> new Node.Text(place, parser.getText());
-            case VALUE_NUMBER_INT, VALUE_NUMBER_FLOAT -> number(place, parser.getText());
+            case VALUE_NUMBER_INT, VALUE_NUMBER_FLOAT -> new Node.Decimal(place, Double.parseDouble(parser.getText()), parser.getText());
             case VALUE_TRUE, VALUE_FALSE -> new Node.Truth(place, token == JsonToken.VALUE_TRUE);
             case VALUE_NULL -> new Node.Nothing(place);
             default -> throw new IllegalStateException("no value starts with " + token);
         };
-    }
-
-    private static Node number(Place place, String written) {
-        double value = Double.parseDouble(written);
-        return new Node.Decimal(place, value, Double.isInfinite(value) ? written : null);
     }
 
     private Node members(Place place) throws IOException {
