@@ -48,6 +48,10 @@ public final class FileTree {
         return new FileTree(fileName, (Node.Members) TreeValues.node(fields));
     }
 
+    static FileTree of(String fileName, Node root) {
+        return new FileTree(fileName, (Node.Members) root);
+    }
+
     Node.Members root() {
         return root;
     }
