@@ -20,7 +20,12 @@ final class ArchimedeanForm {
 
     static Double tau(ArchimedeanFamily family, Copula copula) {
         Double theta = theta(family, copula);
-        return theta == null ? null : (Double) family.tauOf(theta);
+        return theta == null ? null : (Double) tau(family, (double) theta);
+    }
+
+    /** Exactly 0 at independence, where the family's formula may round below it. */
+    static double tau(ArchimedeanFamily family, double theta) {
+        return theta == family.independentTheta() ? 0 : family.tauOf(theta);
     }
 
     static Boolean survival(Copula copula) {

@@ -6,8 +6,10 @@ import static layerweft.file.Field.required;
 
 import java.util.ArrayList;
 import java.util.HashSet;
+import java.util.LinkedHashMap;
 import java.util.List;
 import java.util.Locale;
+import java.util.Map;
 import java.util.Set;
 import java.util.stream.IntStream;
 import layerweft.file.Tagged.Kind;
@@ -27,6 +29,9 @@ import layerweft.model.copula.Student;
 
 /** A copula in a portfolio file, between perils that have names: its kinds, one line each, groups and mixtures. */
 final class CopulaMapping {
+    /** The kind that has no family. */
+    static final String MIXTURE = "mixture";
+
     private static final Field<Double> TAU = number("kendallTau");
     private static final Field<Double> THETA = number("theta");
     private static final Field<Double> DEGREES_OF_FREEDOM = number("degreesOfFreedom");
@@ -81,6 +86,22 @@ final class CopulaMapping {
         List<Shape<?>> shapes = new ArrayList<>(mapping.families.shapes());
         shapes.addAll(List.of(mapping.mixture, mapping.component, mapping.group(ArchimedeanFamily.CLAYTON)));
         return shapes;
+    }
+
+    /** The shapes of all kinds between perils of those names, by the kinds' names; that of a mixture too. */
+    static Map<String, Shape<Copula>> kinds(List<String> names) {
+        CopulaMapping mapping = new CopulaMapping(names);
+        Map<String, Shape<Copula>> kinds = new LinkedHashMap<>();
+        mapping.families.labels().keySet().forEach(kind -> kinds.put(kind, mapping.families.kind(kind)));
+        kinds.put(MIXTURE, mapping.mixture);
+        return kinds;
+    }
+
+    /** What people call the kinds. */
+    static Map<String, String> labels() {
+        Map<String, String> labels = new LinkedHashMap<>(new CopulaMapping(List.of()).families.labels());
+        labels.put(MIXTURE, "Mixture");
+        return labels;
     }
 
     private Copula read(Node node, String path, Faults faults) {
@@ -147,7 +168,8 @@ final class CopulaMapping {
         Part<Group, List<Integer>> members = optional("perils", Lists.of(member, Limits.PERILS), List.<Integer>of()).of(Group::members);
         Part<Group, List<Group>> inner = groups(family).of(Group::groups);
         return Shape.of("group",
-                Variant.of(TAU.of(g -> family.tauOf(g.theta())), members, inner, (tau, perils, groups) -> Group.ofKendallTau(family, tau, perils, groups)),
+                Variant.of(TAU.of(g -> ArchimedeanForm.tau(family, g.theta())), members, inner,
+                        (tau, perils, groups) -> Group.ofKendallTau(family, tau, perils, groups)),
                 Variant.of(THETA.of(Group::theta), members, inner, Group::new));
     }
 

@@ -73,12 +73,12 @@ public final class FileTree {
      * @throws IllegalArgumentException if the path is none
      */
     public Object get(String path) {
-        return TreeValues.plain(find(path));
+        return TreeValues.plain(node(path));
     }
 
     /** Whether there is a value, which may be null. */
     public boolean has(String path) {
-        return find(path) != null;
+        return node(path) != null;
     }
 
     /**
@@ -87,7 +87,7 @@ public final class FileTree {
      * @throws IllegalArgumentException if there is no object
      */
     public FileTree at(String path) {
-        if (find(path) instanceof Node.Members object) {
+        if (node(path) instanceof Node.Members object) {
             return new FileTree(fileName, object);
         }
         throw new IllegalArgumentException("no object at " + path);
@@ -95,7 +95,7 @@ public final class FileTree {
 
     /** How many items the list there has; 0 where there is no list. */
     public int size(String listPath) {
-        return find(listPath) instanceof Node.Elements list ? list.items().size() : 0;
+        return node(listPath) instanceof Node.Elements list ? list.items().size() : 0;
     }
 
     /**
@@ -109,7 +109,7 @@ public final class FileTree {
      */
     public FileTree set(String path, Object value) {
         Node node = TreeValues.node(value);
-        Node present = find(path);
+        Node present = node(path);
         if (present != null && TreeValues.plain(present) != null && TreeValues.plain(present).equals(TreeValues.plain(node))) {
             return this;
         }
@@ -155,7 +155,8 @@ public final class FileTree {
         return TreeText.of(root);
     }
 
-    private Node find(String path) {
+    /** Null where there is nothing. */
+    Node node(String path) {
         Node at = root;
         for (Object step : TreePath.steps(path)) {
             at = TreePath.next(at, step);
@@ -164,7 +165,7 @@ public final class FileTree {
     }
 
     private List<Node> items(String listPath) {
-        return new ArrayList<>(TreeEdit.elements(find(listPath)).items());
+        return new ArrayList<>(TreeEdit.elements(node(listPath)).items());
     }
 
     private FileTree setList(String listPath, List<Node> items) {
