@@ -56,12 +56,12 @@ record CopulaMatch(int dimension) {
             double[][] rows = present == null ? correlationOfTau(from) : present.matrix(dimension);
             try {
                 return new Match<>(student ? Student.ofCorrelation(rows, degrees) : Gaussian.ofCorrelation(rows),
-                        from instanceof MixtureCopula ? "The mean of the parts' Kendall's tau is now that of every pair."
-                                : present == null ? "Kendall's tau of every pair is kept." : "The correlation of every pair is kept.");
+                        from instanceof MixtureCopula ? "The mean of the parts' Kendall's τ is now that of every pair."
+                                : present == null ? "Kendall's τ of every pair is kept." : "The correlation of every pair is kept.");
             } catch (InadmissibleException e) {
                 double[][] equal = new Gaussian(Gaussian.ofKendallTau(mean(from)).correlation()).correlation().matrix(dimension);
                 return new Match<>(student ? Student.ofCorrelation(equal, degrees) : Gaussian.ofCorrelation(equal),
-                        "The pairs' own values of Kendall's tau are no correlation matrix together; their mean is now that of every pair.");
+                        "The pairs' own values of Kendall's τ are no correlation matrix together; their mean is now that of every pair.");
             }
         }
         double tau = inRange(new CopulaFamily(student ? CopulaFamily.Kind.STUDENT : CopulaFamily.Kind.GAUSSIAN, false, student ? degrees : 0), mean(from));
@@ -73,7 +73,7 @@ record CopulaMatch(int dimension) {
         if (from instanceof GroupedArchimedean grouped) {
             Group root = grouped.root();
             Group other = new Group(strength(grouped.family(), family, root.theta()), List.of(), groups(grouped.family(), family, root.groups()));
-            return new Match<>(GroupedArchimedean.of(family, survival, other), "Groups and Kendall's tau of every pair are kept.");
+            return new Match<>(GroupedArchimedean.of(family, survival, other), "Groups and Kendall's τ of every pair are kept.");
         }
         CopulaFamily.Kind kind = CopulaFamily.Kind.valueOf(family.name());
         double tau = inRange(new CopulaFamily(kind, survival, 0), mean(from));
@@ -100,13 +100,13 @@ record CopulaMatch(int dimension) {
     private String said(Copula from, double tau) {
         double mean = mean(from);
         if (!Shown.same(mean, tau)) {
-            return "Kendall's tau was " + Shown.number(mean) + " and is now " + Shown.number(tau) + ", the nearest of this family.";
+            return "Kendall's τ was " + Shown.number(mean) + " and is now " + Shown.number(tau) + ", the nearest of this family.";
         }
         if (from instanceof MixtureCopula) {
-            return "The mean of the parts' Kendall's tau, " + Shown.number(tau) + ", is now that of every pair.";
+            return "The mean of the parts' Kendall's τ, " + Shown.number(tau) + ", is now that of every pair.";
         }
-        return spread(from) < 1e-9 ? "Kendall's tau, " + Shown.number(tau) + ", is kept."
-                : "The mean of the pairs' Kendall's tau, " + Shown.number(tau) + ", is now that of every pair.";
+        return spread(from) < 1e-9 ? "Kendall's τ, " + Shown.number(tau) + ", is kept."
+                : "The mean of the pairs' Kendall's τ, " + Shown.number(tau) + ", is now that of every pair.";
     }
 
     private double mean(Copula copula) {

@@ -40,7 +40,7 @@ final class FrequencyMatch {
         return new Binomial(whole, Math.min(1, mean / whole));
     }
 
-    /** Its own probabilities as a list, the mean of what is too rare to list put right on the last count. */
+    /** Its own probabilities as a list; what is too rare to list, or too many, is taken for the last count. */
     private static FrequencyModel listed(FrequencyModel from) {
         int last = Math.min(LONGEST_LIST, from.quantile(1 - UNLISTED));
         List<Double> probabilities = new ArrayList<>();

@@ -82,8 +82,17 @@ record KindTable<T>(Map<String, Shape<T>> shapes, Map<String, String> labels, Tw
         if (FormKinds.choice(tree, path).kind().equals(kind) && variant.values().apply(present) != null) {
             return converted(tree, path, variant, present, comparison);
         }
-        Match<T> matched = matcher.to(present, kind, variant);
+        Match<T> matched = matched(present, kind, variant);
         return converted(tree, path, variant, matched.model(), (from, to) -> matched.kept());
+    }
+
+    private Match<T> matched(T present, String kind, Variant<T> variant) {
+        try {
+            return matcher.to(present, kind, variant);
+        } catch (InadmissibleException e) { // a mean of 0, say, that the kind cannot have
+            return new Match<>(matcher.to(usual.get(), kind, variant).model(),
+                    "The kind can have none of its figures; these are usual values to start from.");
+        }
     }
 
     /** Gives the model in that way: exactly, else to rounding, else not at all. */
@@ -92,7 +101,7 @@ record KindTable<T>(Map<String, Shape<T>> shapes, Map<String, String> labels, Tw
         Values values = exact == null ? variant.values().apply(model) : exact;
         try {
             T there = exact == null ? variant.build().apply(values) : model;
-            return new Converted(tree.set(path, Shape.members(variant, values)), exact != null && kept == comparison ? SAME : kept.apply(model, there));
+            return new Converted(tree.set(path, Shape.members(variant, values)), kept.apply(model, there));
         } catch (InadmissibleException e) {
             return new Converted(tree, "Nothing is changed: in this way the parameters would be out of their range.");
         }

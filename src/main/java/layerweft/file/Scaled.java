@@ -86,7 +86,9 @@ record Scaled(Maker make, double usual, double low, double high) {
     /** With the mean that the losses have once they are capped. */
     SeverityModel ofCappedMean(double mean, double cap) {
         DoubleUnaryOperator miss = scale -> make.of(usual, Math.exp(scale)).limitedMean(cap) - mean;
-        return make.of(usual, Math.exp(root(miss, Math.log(mean / WIDE), Math.log(cap * WIDE))));
+        double high = Math.log(cap * WIDE);
+        // so many losses at the cap that no scale brings more to it
+        return miss.applyAsDouble(high) <= 0 ? ofMedian(cap) : make.of(usual, Math.exp(root(miss, Math.log(mean / WIDE), high)));
     }
 
     private static double root(DoubleUnaryOperator function, double low, double high) {

@@ -81,7 +81,9 @@ final class SeverityMatch {
                 && Shown.same(general.scale(), general.shape() * general.threshold())) {
             return new Pareto(general.threshold(), 1 / general.shape());
         }
-        return law instanceof DiscreteLosses && kind.equals("discrete") ? law : null;
+        boolean listed = law instanceof DiscreteLosses losses
+                && (kind.equals("discrete") || kind.equals("empirical") && DiscreteLosses.ofEquallyLikely(losses.losses()).equals(losses));
+        return listed ? law : null;
     }
 
     private static SeverityModel target(SeverityModel law, String kind, Double cap) {
