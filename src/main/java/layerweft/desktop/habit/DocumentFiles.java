@@ -1,6 +1,5 @@
 package layerweft.desktop.habit;
 
-import java.io.UncheckedIOException;
 import java.nio.file.Path;
 import java.util.List;
 import java.util.Locale;
@@ -12,6 +11,8 @@ import layerweft.desktop.session.Document;
 import layerweft.desktop.session.Session;
 import layerweft.file.FaultyFileException;
 import layerweft.file.FileTree;
+import layerweft.file.SafeFile;
+import layerweft.file.UnsavedException;
 import layerweft.file.TreatyCheck;
 
 /** Opening and saving: portfolio and programme are two files, opened together or one at a time. */
@@ -86,7 +87,7 @@ public final class DocumentFiles {
 
     /** A programme without layers, for a portfolio that the present programme does not fit. */
     private static FileTree newProgramme() {
-        return FileTree.of(Map.of("format", "layerweft/programme/1")).set("name", "New programme").set("layers", List.of());
+        return FileTree.of("new", Map.of("format", "layerweft/programme/1")).set("name", "New programme").set("layers", List.of());
     }
 
     private void remember() {
@@ -123,9 +124,9 @@ public final class DocumentFiles {
         }
         Document now = session.document().get();
         try {
-            WholeFile.write(portfolio.get(), now.portfolio().text());
-            WholeFile.write(programme.get(), now.programme().text());
-        } catch (UncheckedIOException e) {
+            SafeFile.write(portfolio.get(), now.portfolio().text());
+            SafeFile.write(programme.get(), now.programme().text());
+        } catch (UnsavedException e) {
             dialogs.tell("The file was not saved", e.getMessage());
             return false;
         }

@@ -16,6 +16,7 @@ import java.util.stream.Stream;
 import layerweft.desktop.session.Document;
 import layerweft.file.FaultyFileException;
 import layerweft.file.FileTree;
+import layerweft.file.SafeFile;
 
 /**
  * Copies of unsaved documents, for the next start after a crash. Each running program has a folder of its own, named after its process;
@@ -60,8 +61,8 @@ public final class Recovery {
             try (Writer writer = Files.newBufferedWriter(mine.resolve(WHERE))) {
                 where.store(writer, null);
             }
-            WholeFile.write(mine.resolve(PORTFOLIO), document.portfolio().text());
-            WholeFile.write(mine.resolve(PROGRAMME), document.programme().text());
+            SafeFile.write(mine.resolve(PORTFOLIO), document.portfolio().text());
+            SafeFile.write(mine.resolve(PROGRAMME), document.programme().text());
         } catch (IOException e) {
             throw new UncheckedIOException("keeping a recovery copy in " + mine, e);
         }

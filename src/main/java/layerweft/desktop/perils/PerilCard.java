@@ -4,6 +4,7 @@ import java.util.ArrayList;
 import java.util.List;
 import java.util.Locale;
 import java.util.Map;
+import java.util.function.Consumer;
 import javafx.geometry.Pos;
 import javafx.scene.control.Label;
 import javafx.scene.control.MenuButton;
@@ -22,7 +23,9 @@ import layerweft.desktop.form.Side;
 import layerweft.desktop.form.TreeNumber;
 import layerweft.desktop.session.FigureShown;
 import layerweft.desktop.session.Session;
+import layerweft.file.FieldType;
 import layerweft.file.FileTree;
+import layerweft.file.FormKinds;
 import layerweft.figures.Figure;
 import layerweft.figures.FigureText;
 import layerweft.report.chart.EventsAboveChart;
@@ -32,27 +35,25 @@ import layerweft.study.PerilTotals;
 final class PerilCard extends VBox {
     /** Numbers of a model that are money. */
     private static final List<String> MONEY = List.of("threshold", "scale", "exposedValue", "cap", "theta");
-    private static final Map<String, String> WORDS = Map.ofEntries(Map.entry("poisson", "Poisson"), Map.entry("negativeBinomial", "Negative binomial"),
-            Map.entry("binomial", "Binomial"), Map.entry("empirical", "Empirical"), Map.entry("lognormal", "Lognormal"), Map.entry("pareto", "Pareto"),
-            Map.entry("generalizedPareto", "Generalized Pareto"), Map.entry("gamma", "Gamma"), Map.entry("weibull", "Weibull"), Map.entry("burr", "Burr"),
-            Map.entry("loglogistic", "Loglogistic"), Map.entry("exponential", "Exponential"), Map.entry("inverseGaussian", "Inverse Gaussian"), Map.entry("beta", "Beta"),
-            Map.entry("mbbefd", "MBBEFD"), Map.entry("discrete", "Discrete"), Map.entry("spliced", "Spliced body and tail"), Map.entry("mixture", "Mixture"),
-            Map.entry("mean", "Mean"), Map.entry("varianceToMean", "Var / mean"), Map.entry("trials", "Trials"), Map.entry("chance", "Chance"), Map.entry("cv", "CV"),
-            Map.entry("threshold", "Threshold"), Map.entry("alpha", "α"), Map.entry("sigma", "σ"), Map.entry("mu", "μ"), Map.entry("shape", "Shape"),
-            Map.entry("scale", "Scale"), Map.entry("cap", "Cap"), Map.entry("gamma.field", "γ"), Map.entry("theta", "θ"), Map.entry("exposedValue", "Exposed value"),
-            Map.entry("tailWeight", "Tail weight"));
+    private static final Map<String, String> WORDS = Map.ofEntries(Map.entry("mean", "Mean"), Map.entry("varianceToMean", "Var / mean"), Map.entry("trials", "Trials"),
+            Map.entry("chance", "Chance"), Map.entry("cv", "CV"), Map.entry("threshold", "Threshold"), Map.entry("alpha", "α"), Map.entry("sigma", "σ"),
+            Map.entry("mu", "μ"), Map.entry("shape", "Shape"), Map.entry("scale", "Scale"), Map.entry("cap", "Cap"), Map.entry("gamma", "γ"), Map.entry("theta", "θ"),
+            Map.entry("exposedValue", "Exposed value"), Map.entry("tailWeight", "Tail weight"));
 
     private final Session session;
     private final int place;
+    private final Consumer<String> said;
     private final ChartView curve;
     private final FigureLabel mean = new FigureLabel("lw-figure-18");
     private final FigureLabel deviation = new FigureLabel("lw-figure-18");
     private final FigureLabel often = new FigureLabel("lw-figure-18");
     private final FigureLabel rare = new FigureLabel("lw-figure-18");
 
-    PerilCard(RoomTools tools, int place) {
+    /** @param said receives what a change of model kept and what not, in words */
+    PerilCard(RoomTools tools, int place, Consumer<String> said) {
         this.session = tools.session();
         this.place = place;
+        this.said = said;
         getStyleClass().addAll("lw-panel", "lw-peril-card");
         curve = new ChartView(tools.theme());
         curve.setMinHeight(150);
@@ -124,22 +125,61 @@ final class PerilCard extends VBox {
     private VBox model(String words, String at) {
         Label label = new Label(words);
         label.getStyleClass().add("lw-label");
-        Label kind = new Label(WORDS.getOrDefault(String.valueOf(tree().text(at + ".model")), "—"));
-        kind.getStyleClass().add("lw-model");
+        MenuButton kind = kinds(at);
         FlowPane numbers = new FlowPane();
         numbers.getStyleClass().add("lw-numbers");
-        for (String field : tree().fields(at)) {
-            if (tree().get(at + "." + field) instanceof Double) {
-                boolean money = MONEY.contains(field) || field.equals("mean") && words.equals("Severity");
-                String name = WORDS.getOrDefault(field.equals("gamma") ? "gamma.field" : field, field);
-                TreeNumber number = new TreeNumber(session, Side.PORTFOLIO, at + "." + field, name, name.toLowerCase(Locale.ROOT), money ? AmountText.Kind.AMOUNT : AmountText.Kind.NUMBER);
-                number.field().setPrefWidth(88);
-                numbers.getChildren().add(number.field());
+        for (String field : numbers(at)) {
+            boolean money = MONEY.contains(field) || field.equals("mean") && !words.equals("Frequency");
+            String name = WORDS.getOrDefault(field, field);
+            TreeNumber number = new TreeNumber(session, Side.PORTFOLIO, at + "." + field, name, name.toLowerCase(Locale.ROOT), money ? AmountText.Kind.AMOUNT : AmountText.Kind.NUMBER);
+            number.field().setPrefWidth(88);
+            if (field.equals("cap")) {
+                number.field().orBlank("none");
             }
+            numbers.getChildren().add(number.field());
         }
         VBox box = new VBox(new HBox(8, label, kind), numbers);
         box.getStyleClass().add("lw-model-box");
         return box;
+    }
+
+    /** The fields of a model that are numbers, those that may be left out too. */
+    private List<String> numbers(String at) {
+        FormKinds.Choice now = FormKinds.choice(tree(), at);
+        if (now == null) {
+            return tree().fields(at).stream().filter(f -> tree().get(at + "." + f) instanceof Double).toList();
+        }
+        return FormKinds.kinds(FormKinds.Subject.at(at)).stream().filter(k -> k.name().equals(now.kind())).flatMap(k -> k.ways().get(now.way()).fields().stream())
+                .filter(f -> f.type() == FieldType.NUMBER || f.type() == FieldType.WHOLE_NUMBER).map(FormKinds.FormField::name).toList();
+    }
+
+    /** The kinds that a model can be, and the ways to give the one it is; a change says what it kept. */
+    private MenuButton kinds(String at) {
+        FormKinds.Choice now = FormKinds.choice(tree(), at);
+        MenuButton menu = new MenuButton("—");
+        menu.getStyleClass().addAll("lw-choice", "lw-kind");
+        menu.setAccessibleText("Kind of model");
+        for (FormKinds.Kind kind : FormKinds.kinds(FormKinds.Subject.at(at))) {
+            boolean present = now != null && now.kind().equals(kind.name());
+            if (present) {
+                menu.setText(kind.label());
+            }
+            for (int way = 0; way < kind.ways().size(); way++) {
+                int chosen = way;
+                String name = kind.ways().size() > 1 ? kind.label() + ", by " + kind.ways().get(way).name() : kind.label();
+                MenuItem item = new MenuItem(name);
+                item.setDisable(present && now.way() == way);
+                item.setOnAction(asked -> change(at, kind.name(), chosen));
+                menu.getItems().add(item);
+            }
+        }
+        return menu;
+    }
+
+    private void change(String at, String kind, int way) {
+        FormKinds.Converted converted = FormKinds.convert(tree(), at, kind, way);
+        said.accept(converted.kept());
+        session.edit("change of a model", d -> d.withPortfolio(t -> converted.tree()));
     }
 
     private VBox losses() {

@@ -89,12 +89,17 @@ public final class PerilsRoom implements Room {
         shape = now;
         shownCards.clear();
         for (int i = 0; i < now.size(); i++) {
-            shownCards.add(new PerilCard(tools, i));
+            shownCards.add(new PerilCard(tools, i, this::say));
         }
         cards.getChildren().setAll(shownCards);
         shownCards.forEach(card -> card.setMinWidth(Region.USE_PREF_SIZE));
         drawCurves();
         showTotals();
+    }
+
+    /** What a change of model kept, until the next reading. */
+    private void say(String words) {
+        reading.set(Reading.of(words));
     }
 
     @Override
