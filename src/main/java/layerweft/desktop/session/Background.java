@@ -3,6 +3,7 @@ package layerweft.desktop.session;
 import java.time.Duration;
 import java.util.HashMap;
 import java.util.Map;
+import java.util.Set;
 import java.util.concurrent.Executor;
 import java.util.concurrent.Executors;
 import java.util.function.Consumer;
@@ -43,6 +44,11 @@ public final class Background {
         return new Background(Runnable::run, name -> Runnable::run);
     }
 
+    /** The same, but work of these names never begins. */
+    static Background immediateWithout(Set<String> names) {
+        return new Background(Runnable::run, name -> names.contains(name) ? work -> {} : Runnable::run);
+    }
+
     private static Executor thread(String name) {
         return Executors.newSingleThreadExecutor(work -> {
             Thread thread = new Thread(work, name);
@@ -76,13 +82,14 @@ public final class Background {
      * its result, since otherwise nothing would be seen as long as the hand moves.
      *
      * @param patience how long, from its start, an older one may be at work once there is a newer one
+     * @param rest before it begins
      */
-    public <T> Task follow(String name, Duration patience, Function<RunControl, T> work, Consumer<T> onDone) {
+    public <T> Task follow(String name, Duration patience, Duration rest, Function<RunControl, T> work, Consumer<T> onDone) {
         Task older = newest.get(name);
         if (older != null) {
             older.supersede();
         }
-        return start(new Task(name, publish, Duration.ZERO, patience), work, onDone);
+        return start(new Task(name, publish, rest, patience), work, onDone);
     }
 
     private <T> Task start(Task task, Function<RunControl, T> work, Consumer<T> onDone) {
