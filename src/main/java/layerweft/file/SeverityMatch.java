@@ -120,7 +120,8 @@ final class SeverityMatch {
             case "inverseGaussian" -> new InverseGaussian(mean, mean / (cv * cv));
             case "exponential" -> new Exponential(mean);
             case "beta" -> beta(mean, cv, law.upperEnd());
-            case "discrete", "empirical" -> losses(mean, cv);
+            case "discrete" -> new DiscreteLosses(List.of(low(mean, cv), high(mean, cv)), List.of(1 - 1 / count(cv), 1 / count(cv)));
+            case "empirical" -> count(cv) > MOST_LOSSES ? null : DiscreteLosses.ofEquallyLikely(losses(mean, cv));
             default -> Scaled.of(kind).ofMeanAndCv(mean, cv);
         };
     }
@@ -149,16 +150,26 @@ final class SeverityMatch {
         return new Beta(part * total, (1 - part) * total, end);
     }
 
-    /** n equally likely losses of which one is larger: spread over √(n − 1) below and spread·√(n − 1) above the mean. */
-    private static SeverityModel losses(double mean, double cv) {
-        double others = Math.max(1, Math.ceil(cv * cv));
-        if (others >= MOST_LOSSES) {
-            return null;
-        }
-        double low = Math.max(0, mean * (1 - cv / Math.sqrt(others)));
-        List<Double> losses = new ArrayList<>(Collections.nCopies((int) others, low));
-        losses.add(mean * (1 + cv * Math.sqrt(others)));
-        return DiscreteLosses.ofEquallyLikely(losses);
+    /** Low losses and one high one. */
+    private static List<Double> losses(double mean, double cv) {
+        List<Double> losses = new ArrayList<>(Collections.nCopies((int) count(cv) - 1, low(mean, cv)));
+        losses.add(high(mean, cv));
+        return losses;
+    }
+
+    /** The least n such that n losses, all but one of them alike, can have that coefficient of variation: cv² ≤ n − 1. */
+    private static double count(double cv) {
+        return 1 + Math.max(1, Math.ceil(cv * cv));
+    }
+
+    /** The alike ones stand cv/√(n − 1) of the mean below it, … */
+    private static double low(double mean, double cv) {
+        return Math.max(0, mean * (1 - cv / Math.sqrt(count(cv) - 1)));
+    }
+
+    /** … the other cv·√(n − 1) above. */
+    private static double high(double mean, double cv) {
+        return mean * (1 + cv * Math.sqrt(count(cv) - 1));
     }
 
     /** The law as the body, and above its 90 % point a Pareto tail with the mean of its losses there, or the heaviest common one. */

@@ -14,6 +14,10 @@ import layerweft.model.treaty.Treaty;
  * @param programmeFaults the same of the programme, with what it names and the portfolio does not have
  */
 public record TreatyCheck(Treaty treaty, List<Fault> portfolioFaults, List<Fault> programmeFaults) {
+    public TreatyCheck {
+        portfolioFaults = List.copyOf(portfolioFaults);
+        programmeFaults = List.copyOf(programmeFaults);
+    }
 
     /** Checks two trees, each by itself and the programme against the portfolio. */
     public static TreatyCheck of(FileTree portfolio, FileTree programme) {

@@ -11,6 +11,7 @@ import static org.junit.jupiter.api.Assertions.assertTrue;
 import java.nio.charset.StandardCharsets;
 import java.util.List;
 import java.util.Map;
+import java.util.stream.IntStream;
 import org.junit.jupiter.api.Test;
 import org.junit.jupiter.params.ParameterizedTest;
 import org.junit.jupiter.params.provider.MethodSource;
@@ -85,7 +86,9 @@ class FileTreeTest {
         FileTree tree = parse("{\"a\": 1.0, \"b\": [14, 1e3, 0.10], \"c\": 1e999}");
         assertEquals("{\n  \"a\": 1.0,\n  \"b\": [14, 1e3, 0.10],\n  \"c\": 1e999\n}\n", tree.text());
         assertSame(tree, tree.set("b[1]", 1000));
-        assertEquals(tree.text(), tree.set("a", 2).set("b", List.of(14.0, 1000.0, 0.1)).set("a", 1.0).text().replace("\"a\": 1,", "\"a\": 1.0,"));
+        assertSame(tree, tree.set("b", List.of(14.0, 1000.0, 0.1)));
+        assertEquals("[14, 1e3, 0.10]", tree.set("a", 2).text().lines().filter(l -> l.contains("b")).findAny().orElseThrow()
+                .replaceAll(".*: |,$", ""));
     }
 
     @Test
@@ -106,8 +109,7 @@ class FileTreeTest {
                 .set("layers[0].perils", List.of("hail")), "layers[0]"));
         assertEquals("[name, chance, severity]", fields(COAST.set("perils[0].subPerils[0].chance", 0.5), "perils[0].subPerils[0]"));
         assertEquals("[model, threshold, alpha, cap]",
-                fields(parse("{\"severity\": {\"model\": \"pareto\", \"alpha\": 2, \"cap\": 5}}").set("severity.threshold", 1), "severity")
-                        .replace("alpha, cap, threshold", ""));
+                fields(parse("{\"severity\": {\"model\": \"pareto\", \"alpha\": 2, \"cap\": 5}}").set("severity.threshold", 1), "severity"));
         assertEquals("[a, z]", fields(parse("{\"a\": 1}").set("z", 1), ""));
     }
 
@@ -181,7 +183,7 @@ class FileTreeTest {
 
     @Test
     void longListsFillTheirLines() {
-        List<Double> losses = java.util.stream.IntStream.range(0, 200).mapToObj(k -> k / 8.0).toList();
+        List<Double> losses = IntStream.range(0, 200).mapToObj(k -> k / 8.0).toList();
         FileTree tree = FileTree.of("test.json", Map.of("a", Map.of("losses", losses)));
         List<String> lines = tree.text().lines().toList();
         assertTrue(lines.stream().allMatch(line -> line.length() <= 121), tree.text());

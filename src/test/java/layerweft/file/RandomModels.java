@@ -1,6 +1,7 @@
 package layerweft.file;
 
 import java.util.ArrayList;
+import java.util.Arrays;
 import java.util.Collections;
 import java.util.List;
 import java.util.Random;
@@ -115,8 +116,8 @@ final class RandomModels {
     /** Above 0, sum 1 within rounding. */
     private List<Double> weights(int n) {
         double[] raw = IntStream.range(0, n).mapToDouble(k -> number(0.05, 1)).toArray();
-        double sum = java.util.Arrays.stream(raw).sum();
-        return java.util.Arrays.stream(raw).mapToObj(w -> w / sum).toList();
+        double sum = Arrays.stream(raw).sum();
+        return Arrays.stream(raw).mapToObj(w -> w / sum).toList();
     }
 
     FrequencyModel frequency(int kind) {
