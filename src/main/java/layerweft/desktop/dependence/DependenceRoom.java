@@ -229,7 +229,8 @@ public final class DependenceRoom implements Room {
             LivePricing pricing = new LivePricing(treaty, LivePricing.shortRun());
             for (CopulaFamily family : TILES) {
                 if (can(family, at, treaty.portfolio().perils().size())) {
-                    List<LiveLayer> priced = pricing.with(family.hasStrength() ? family.at(at) : new Independence()).price(control);
+                    Dependence joined = new Dependence(treaty.portfolio().dependence().links(), family.hasStrength() ? family.at(at) : new Independence());
+                    List<LiveLayer> priced = pricing.of(treaty.on(treaty.portfolio().with(joined))).price(control);
                     found.put(family, priced.get(layer).figures().lossOnLine());
                 }
             }
