@@ -187,7 +187,8 @@ public final class DesktopWindow {
 
     /** Keys without Ctrl belong to whoever is being typed into, and to the window otherwise. */
     private void plainKey(KeyEvent event, String typed) {
-        if (stage.getScene().getFocusOwner() instanceof TextInputControl || event.isShortcutDown() || event.isAltDown()) {
+        boolean chord = typed.isEmpty() && (event.isShortcutDown() || event.isAltDown()); // a sign may itself need Alt on a keyboard
+        if (stage.getScene().getFocusOwner() instanceof TextInputControl || chord) {
             return;
         }
         Command command = commands.ofPlainKey(typed, event.getCode());
