@@ -1,6 +1,7 @@
 package layerweft.desktop.form;
 
 import javafx.collections.ListChangeListener;
+import javafx.collections.ObservableList;
 import layerweft.desktop.control.AmountField;
 import layerweft.desktop.control.AmountText;
 import layerweft.desktop.session.Session;
@@ -13,6 +14,8 @@ public final class TreeNumber {
     private final Side side;
     private final String path;
     private final AmountField field;
+    /** Kept, since a view of a list that nobody holds tells nothing. */
+    private final ObservableList<Fault> faults;
 
     /**
      * @param what for the menu: "Undo change of …"
@@ -22,11 +25,12 @@ public final class TreeNumber {
         this.session = session;
         this.side = side;
         this.path = path;
+        this.faults = side.faults(session);
         this.field = new AmountField(label, kind, session.document().get().unit());
         field.onCommit(value -> session.edit("change of " + what, document -> side.with(document, tree -> value == null ? tree.remove(path) : tree.set(path, value))));
         refresh();
         session.document().addListener((is, was, now) -> refresh());
-        side.faults(session).addListener((ListChangeListener<Fault>) change -> faults());
+        faults.addListener((ListChangeListener<Fault>) change -> faults());
     }
 
     public AmountField field() {
@@ -41,7 +45,7 @@ public final class TreeNumber {
     }
 
     private void faults() {
-        field.fault().set(side.faults(session).stream().filter(f -> f.path().equals(path)).findFirst()
+        field.fault().set(faults.stream().filter(f -> f.path().equals(path)).findFirst()
                 .map(f -> "Admissible: " + f.admissible() + ". The last valid value still prices.").orElse(""));
     }
 }

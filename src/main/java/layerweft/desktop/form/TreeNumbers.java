@@ -4,6 +4,7 @@ import java.util.ArrayList;
 import java.util.List;
 import java.util.stream.Collectors;
 import javafx.collections.ListChangeListener;
+import javafx.collections.ObservableList;
 import javafx.css.PseudoClass;
 import javafx.scene.control.Label;
 import javafx.scene.control.TextField;
@@ -23,6 +24,8 @@ public final class TreeNumbers extends VBox {
     private final AmountText.Kind kind;
     private final TextField field = new TextField();
     private final Label message = new Label();
+    /** Kept, since a view of a list that nobody holds tells nothing. */
+    private final ObservableList<Fault> faults;
 
     /**
      * @param blank what a blank field means, e.g. {@code no limit on their number}
@@ -33,6 +36,7 @@ public final class TreeNumbers extends VBox {
         this.side = side;
         this.path = path;
         this.kind = kind;
+        this.faults = side.faults(session);
         getStyleClass().add("lw-amount-field");
         Label name = new Label(label);
         name.getStyleClass().add("lw-label");
@@ -49,7 +53,7 @@ public final class TreeNumbers extends VBox {
             }
         });
         session.document().addListener((is, was, now) -> refresh());
-        side.faults(session).addListener((ListChangeListener<Fault>) change -> faults());
+        faults.addListener((ListChangeListener<Fault>) change -> faults());
         refresh();
     }
 
@@ -86,7 +90,7 @@ public final class TreeNumbers extends VBox {
     }
 
     private void faults() {
-        say(side.faults(session).stream().filter(f -> f.path().startsWith(path)).findFirst().map(f -> "Admissible: " + f.admissible() + ".").orElse(""));
+        say(faults.stream().filter(f -> f.path().startsWith(path)).findFirst().map(f -> "Admissible: " + f.admissible() + ".").orElse(""));
     }
 
     private void say(String words) {

@@ -1,34 +1,33 @@
 package layerweft.desktop.programme;
 
-import java.awt.geom.Rectangle2D;
 import java.time.Duration;
 import java.util.ArrayList;
 import java.util.List;
 import java.util.SortedMap;
-import java.util.TreeMap;
+import java.util.function.UnaryOperator;
+import java.util.stream.IntStream;
+import javafx.beans.binding.Bindings;
 import javafx.beans.property.ReadOnlyObjectWrapper;
 import javafx.beans.value.ObservableValue;
-import javafx.scene.Cursor;
 import javafx.scene.Node;
 import javafx.scene.control.Button;
 import javafx.scene.control.ScrollPane;
-import javafx.scene.input.KeyCode;
-import javafx.scene.input.KeyEvent;
-import javafx.scene.input.MouseEvent;
 import javafx.scene.layout.HBox;
 import javafx.scene.layout.Priority;
 import javafx.scene.layout.VBox;
 import layerweft.desktop.Reading;
 import layerweft.desktop.Room;
 import layerweft.desktop.RoomTools;
-import layerweft.desktop.control.ChartView;
 import layerweft.desktop.control.Panel;
 import layerweft.desktop.control.SegmentedSwitch;
+import layerweft.desktop.picture.Tower;
+import layerweft.desktop.picture.TowerActions;
+import layerweft.desktop.picture.TowerChange;
+import layerweft.desktop.picture.TowerPicture;
 import layerweft.desktop.session.FigureShown;
 import layerweft.desktop.session.LayerEdit;
 import layerweft.desktop.session.LivePrices;
 import layerweft.desktop.session.Session;
-import layerweft.desktop.theme.Theme;
 import layerweft.engine.simulation.PerilShares;
 import layerweft.engine.simulation.SimulationSettings;
 import layerweft.figures.Figure;
@@ -38,7 +37,6 @@ import layerweft.model.portfolio.Peril;
 import layerweft.model.treaty.Layer;
 import layerweft.model.treaty.LayerTerms;
 import layerweft.model.treaty.Treaty;
-import layerweft.report.chart.TowerChart;
 import layerweft.study.Drivers;
 import layerweft.study.ExceedanceCurves;
 import layerweft.study.LimitUse;
@@ -47,14 +45,9 @@ import layerweft.study.LimitUse;
 public final class ProgrammeRoom implements Room {
     private static final SimulationSettings YEARS = new SimulationSettings(100_000, SimulationSettings.usual().seed(), SimulationSettings.usual().threads());
     private static final Duration REST = Duration.ofMillis(200);
-    private static final double GRIP = 6;
-
-    /** What a hand moves. */
-    private enum Grip { NONE, TOP, BOTTOM, BODY }
 
     private final Session session;
-    private final Theme theme;
-    private final ChartView tower;
+    private final TowerPicture tower;
     private final SegmentedSwitch<Boolean> scale = new SegmentedSwitch<>(List.of(false, true), log -> log ? "Log" : "Linear");
     private final SegmentedSwitch<Boolean> forms = new SegmentedSwitch<>(List.of(false, true), p -> p ? "Pricing and buyer" : "Layer");
     private final VBox formBox = new VBox();
@@ -62,36 +55,18 @@ public final class ProgrammeRoom implements Room {
     private final ReadOnlyObjectWrapper<Reading> reading = new ReadOnlyObjectWrapper<>(Reading.EMPTY);
     private LayerForm form;
     private String formShape = "";
-    private SortedMap<Double, Double> haze = new TreeMap<>();
+    private List<Tower.Mark> haze = List.of();
     private Treaty hazeOf;
     private Drivers drivers;
     private List<LimitUse> uses = List.of();
     private Treaty usesOf;
     private boolean shown;
-    private Grip grip = Grip.NONE;
-    private int held;
-    private double from;
-    private FileTree before;
-    private Object gesture;
+    private Object gesture = new Object();
+    private boolean moving;
 
     public ProgrammeRoom(RoomTools tools) {
         this.session = tools.session();
-        this.theme = tools.theme();
-        tower = new ChartView(tools.theme());
-        tower.addEventFilter(MouseEvent.MOUSE_MOVED, moved -> tower.setCursor(cursor(moved)));
-        tower.addEventFilter(MouseEvent.MOUSE_PRESSED, this::take);
-        tower.addEventFilter(MouseEvent.MOUSE_DRAGGED, this::move);
-        tower.addEventFilter(MouseEvent.MOUSE_RELEASED, released -> grip = Grip.NONE);
-        tower.addEventHandler(KeyEvent.KEY_PRESSED, key -> {
-            if (key.getCode() == KeyCode.ESCAPE && grip != Grip.NONE) {
-                session.giveUp(gesture);
-                grip = Grip.NONE;
-                key.consume();
-            } else if (key.getCode() == KeyCode.UP || key.getCode() == KeyCode.DOWN) {
-                nudge(key.getCode() == KeyCode.UP ? 1 : -1, key.isShiftDown());
-                key.consume();
-            }
-        });
+        tower = new TowerPicture(tools.theme(), new Hand());
         Button add = new Button("New layer");
         add.setOnAction(asked -> session.edit("a new layer",
                 d -> d.withProgramme(t -> LayerEdit.addedAbove(t, Math.min(session.selectedLayer().get(), LayerEdit.count(t) - 1)))));
@@ -120,7 +95,7 @@ public final class ProgrammeRoom implements Room {
         formPanel.setMaxWidth(392);
         view = new HBox(towerPanel, formPanel);
         view.getStyleClass().add("lw-row");
-        scale.value().addListener((is, was, now) -> draw());
+        tower.logarithmic().bind(Bindings.createBooleanBinding(() -> scale.value().get(), scale.value()));
         forms.value().addListener((is, was, now) -> buildForm());
         session.prices().addListener((is, was, now) -> changed());
         session.document().addListener((is, was, now) -> buildForm());
@@ -175,10 +150,10 @@ public final class ProgrammeRoom implements Room {
                 draw();
             });
         }
-        if (shown && hazeOf != treaty && grip == Grip.NONE) {
+        if (shown && hazeOf != treaty && !moving) {
             session.background().runAfter(REST, "Largest events and drivers", control -> {
-                SortedMap<Double, Double> largest = new TreeMap<>();
-                ExceedanceCurves.of(treaty, YEARS, control).gross().largestEvent().forEach((years, amount) -> largest.put(years, amount.value()));
+                List<Tower.Mark> largest = new ArrayList<>();
+                ExceedanceCurves.of(treaty, YEARS, control).gross().largestEvent().forEach((years, amount) -> addRising(largest, new Tower.Mark(amount.value(), years)));
                 return new Behind(largest, Drivers.of(treaty, YEARS, control));
             }, found -> {
                 haze = found.largest;
@@ -192,7 +167,14 @@ public final class ProgrammeRoom implements Room {
         read();
     }
 
-    private record Behind(SortedMap<Double, Double> largest, Drivers drivers) {}
+    private record Behind(List<Tower.Mark> largest, Drivers drivers) {}
+
+    /** Amounts have to rise: of several return periods with one amount the first stands. */
+    private static void addRising(List<Tower.Mark> marks, Tower.Mark next) {
+        if (next.amount() > 0 && Double.isFinite(next.amount()) && (marks.isEmpty() || next.amount() > marks.get(marks.size() - 1).amount())) {
+            marks.add(next);
+        }
+    }
 
     private void read() {
         LivePrices prices = session.prices().get();
@@ -216,38 +198,32 @@ public final class ProgrammeRoom implements Room {
             return;
         }
         Treaty treaty = prices.treaty();
-        List<TowerChart.Block> blocks = new ArrayList<>();
-        List<TowerChart.Cover> covers = new ArrayList<>();
-        for (int j = 0; j < treaty.layers(); j++) {
-            Layer layer = treaty.layer(j);
-            LayerTerms terms = layer.terms();
-            if (terms.occurrenceLimit() < Double.POSITIVE_INFINITY) {
-                blocks.add(block(treaty, j, layer, terms, prices));
-            } else {
-                covers.add(new TowerChart.Cover(layer.name(), words(layer, terms), terms.deductible(), terms.annualLimit(), prices.layers().get(j).lossOnLine().value(),
-                        !layer.inuring().isEmpty()));
-            }
-        }
-        int chosen = Math.max(0, Math.min(treaty.layers() - 1, session.selectedLayer().get()));
-        tower.picture().set(new TowerChart(blocks, covers, treaty.portfolio().perils().stream().map(Peril::name).toList(), haze, scale.value().get(), treaty.layer(chosen).name()));
+        List<Tower.Layer> layers = IntStream.range(0, treaty.layers()).mapToObj(j -> layer(treaty, j, prices)).toList();
+        tower.show(new Tower(treaty.portfolio().perils().stream().map(Peril::name).toList(), layers, haze),
+                Math.max(0, Math.min(treaty.layers() - 1, session.selectedLayer().get())));
     }
 
-    private TowerChart.Block block(Treaty treaty, int j, Layer layer, LayerTerms terms, LivePrices prices) {
-        List<Double> use = uses.stream().filter(u -> u.name().equals(layer.name())).findFirst().map(u -> u.uses().stream().map(Figure::value).toList()).orElse(List.of());
-        if (use.isEmpty() || usesOf != treaty) {
-            use = List.of(prices.layers().get(j).lossOnLine().value());
-        }
+    private Tower.Layer layer(Treaty treaty, int j, LivePrices prices) {
+        Layer layer = treaty.layer(j);
+        LayerTerms terms = layer.terms();
+        boolean ofYear = Double.isInfinite(terms.occurrenceLimit());
+        List<Double> use = usesOf == treaty ? uses.get(j).uses().stream().map(Figure::value).toList() : List.of();
         List<Double> shares = new ArrayList<>();
-        PerilShares known = drivers != null && j < drivers.layers().size() && drivers.treaty().layer(Math.min(j, drivers.treaty().layers() - 1)).name().equals(layer.name())
+        PerilShares known = drivers != null && j < drivers.layers().size() && drivers.treaty().layer(j).name().equals(layer.name())
                 && drivers.treaty().portfolio().perils().size() == treaty.portfolio().perils().size() ? drivers.layers().get(j) : null;
         for (int i = 0; i < treaty.portfolio().perils().size(); i++) {
             boolean covered = treaty.cover(j).covers(i);
-            shares.add(covered && known != null ? known.expectedShare().get(i).value() : covered ? 0.1 : Double.NaN);
+            double share = covered && known != null ? known.expectedShare().get(i).value() : 0;
+            shares.add(covered ? Double.isNaN(share) ? 0 : share : Double.NaN);
         }
-        double retention = terms.hasFranchise() ? terms.franchise() : terms.retention();
-        double q = terms.quotaShare();
-        return new TowerChart.Block(layer.name(), words(layer, terms), retention / q, terms.occurrenceLimit() / q, terms.deductible() / terms.occurrenceLimit(), use,
-                terms.annualLimit() / terms.occurrenceLimit(), shares);
+        double start = ofYear ? terms.deductible() : terms.hasFranchise() ? 0 : terms.retention();
+        double limit = ofYear ? terms.annualLimit() : terms.occurrenceLimit();
+        int reinstatements = layer.reinstatements() != null && layer.annual().limit() == Double.POSITIVE_INFINITY ? layer.reinstatements().size()
+                : terms.annualLimit() == Double.POSITIVE_INFINITY ? Tower.UNLIMITED : Tower.BY_ANNUAL_LIMIT;
+        double lossOnLine = prices.layers().get(j).lossOnLine().value();
+        return new Tower.Layer(layer.name(), words(layer, terms), ofYear, start, limit, terms.hasFranchise() ? terms.franchise() : Double.NaN,
+                ofYear ? 0 : terms.deductible() / limit, ofYear ? 1 : terms.annualLimit() / limit, reinstatements, use, shares,
+                Double.isFinite(lossOnLine) ? lossOnLine : Double.NaN, layer.inuring().stream().map(n -> treaty.programme().indexOf(n)).toList());
     }
 
     /** The terms as one says them: 60 xs 40, 2 at 100 %. */
@@ -270,82 +246,46 @@ public final class ProgrammeRoom implements Room {
         return words.toString();
     }
 
-    /** The area that the picture is drawn in, in its own lengths. */
-    private Rectangle2D area() {
-        double size = theme.scale().get();
-        return new Rectangle2D.Double(0, 0, tower.getWidth() / size, tower.getHeight() / size);
-    }
+    /** What a hand does to the tower, written into the programme: one movement is one step of undo. */
+    private final class Hand implements TowerActions {
 
-    private TowerChart chart() {
-        return tower.picture().get() instanceof TowerChart chart ? chart : null;
-    }
-
-    private record Held(int layer, Grip grip) {}
-
-    private double x(MouseEvent at) {
-        return at.getX() / theme.scale().get();
-    }
-
-    private double y(MouseEvent at) {
-        return at.getY() / theme.scale().get();
-    }
-
-    /** What is under the hand. */
-    private Held under(MouseEvent at) {
-        TowerChart chart = chart();
-        LivePrices prices = session.prices().get();
-        if (chart == null || prices == null) {
-            return new Held(-1, Grip.NONE);
+        @Override
+        public void select(int layer) {
+            session.selectedLayer().set(layer);
         }
-        for (TowerChart.Place place : chart.places(area())) {
-            Rectangle2D cells = place.cells();
-            int layer = prices.treaty().programme().indexOf(place.name());
-            boolean across = place.cover() ? x(at) >= cells.getX() && x(at) <= cells.getMaxX() : x(at) <= cells.getMaxX() && x(at) >= cells.getX() - 220;
-            if (across && y(at) >= cells.getY() - GRIP && y(at) <= cells.getMaxY() + GRIP) {
-                boolean top = Math.abs(y(at) - cells.getY()) <= GRIP && cells.getHeight() > 2 * GRIP;
-                boolean bottom = Math.abs(y(at) - cells.getMaxY()) <= GRIP && cells.getHeight() > 2 * GRIP;
-                return new Held(layer, place.cover() ? Grip.NONE : top ? Grip.TOP : bottom ? Grip.BOTTOM : Grip.BODY);
+
+        @Override
+        public void terms(List<TowerChange> changes, Phase phase) {
+            edit(phase, "drag of a layer", tree -> {
+                FileTree changed = tree;
+                for (TowerChange c : changes) {
+                    changed = LayerTermsEdit.moved(changed, c.layer(), c.retention(), c.limit());
+                }
+                return changed;
+            });
+        }
+
+        @Override
+        public void reinstatements(int layer, int number, Phase phase) {
+            edit(phase, "change of reinstatements", tree -> LayerTermsEdit.reinstated(tree, layer, number));
+        }
+
+        @Override
+        public void drawn(double retention, double limit) {
+            session.edit("a new layer", d -> d.withProgramme(t -> LayerEdit.added(t, 0, retention, limit)));
+        }
+
+        private void edit(Phase phase, String what, UnaryOperator<FileTree> change) {
+            moving = phase == Phase.MOVING;
+            if (phase == Phase.GIVEN_UP) {
+                session.giveUp(gesture);
+            } else {
+                session.edit(what, gesture, d -> d.withProgramme(change));
             }
-        }
-        return new Held(-1, Grip.NONE);
-    }
-
-    private Cursor cursor(MouseEvent at) {
-        return switch (under(at).grip) {
-            case TOP, BOTTOM -> Cursor.V_RESIZE;
-            case BODY -> Cursor.OPEN_HAND;
-            case NONE -> Cursor.DEFAULT;
-        };
-    }
-
-    private void take(MouseEvent pressed) {
-        Held now = under(pressed);
-        if (now.layer >= 0) {
-            session.selectedLayer().set(now.layer);
-            grip = now.grip;
-            held = now.layer;
-            from = chart().amount(y(pressed), area());
-            before = session.document().get().programme();
-            gesture = new Object();
-        }
-    }
-
-    private void move(MouseEvent drag) {
-        if (grip == Grip.NONE || chart() == null) {
-            return;
-        }
-        double change = chart().amount(y(drag), area()) - from;
-        double snap = drag.isAltDown() ? 0 : chart().snap();
-        FileTree moved = LayerDrag.moved(before, held, grip == Grip.TOP, grip == Grip.BOTTOM, change, snap);
-        session.edit("drag of a layer", gesture, d -> d.withProgramme(t -> moved));
-        drag.consume();
-    }
-
-    /** Arrow keys move the selected layer's upper edge, with Shift the whole layer. */
-    private void nudge(int steps, boolean body) {
-        if (chart() != null) {
-            double snap = chart().snap();
-            session.edit("move of a layer", d -> d.withProgramme(t -> LayerDrag.moved(t, session.selectedLayer().get(), !body, false, steps * snap, snap)));
+            if (!moving) {
+                gesture = new Object();
+                changed();
+            }
         }
     }
 

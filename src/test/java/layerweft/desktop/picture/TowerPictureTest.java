@@ -50,11 +50,11 @@ class TowerPictureTest {
     }
 
     private void press(FxRobot hand, double x, double y) {
-        hand.moveTo(at(x, y), Motion.TELEPORT).press(MouseButton.PRIMARY);
+        hand.moveTo(at(x, y), Motion.DIRECT).press(MouseButton.PRIMARY);
     }
 
     private void dragTo(FxRobot hand, double x, double y) {
-        hand.moveTo(at(x, y), Motion.TELEPORT);
+        hand.moveTo(at(x, y), Motion.DIRECT);
         WaitForAsyncUtils.waitForFxEvents();
     }
 
