@@ -9,6 +9,7 @@ import java.awt.geom.Rectangle2D;
 import java.nio.file.Files;
 import java.nio.file.Path;
 import java.util.List;
+import java.util.Set;
 import java.util.concurrent.Callable;
 import java.util.concurrent.TimeUnit;
 import java.util.concurrent.TimeoutException;
@@ -48,6 +49,8 @@ import org.testfx.util.WaitForAsyncUtils;
 class RoomsTest {
     private static final SimulationSettings SHORT = new SimulationSettings(2_000, 1, 1);
 
+    private static final Set<String> OF_PRICES = Set.of("Pricing", "First answer", "Curves against τ", "Simulating the whole treaty");
+
     private final ScriptedDialogs dialogs = new ScriptedDialogs();
     private DesktopWindow window;
     private Session session;
@@ -64,10 +67,9 @@ class RoomsTest {
         WaitForAsyncUtils.waitFor(60, TimeUnit.SECONDS, () -> WaitForAsyncUtils.asyncFx(condition).get());
     }
 
-    /** The prices are those of the document on screen; what rooms compute behind may still be on its way. */
+    /** Prices, curves and the long run are those of the document on screen; what rooms compute behind may still be on its way. */
     private void settled() throws TimeoutException {
-        until(() -> session.prices().get() != null && (!session.prices().get().valid() || session.prices().get().treaty() == session.treaty().get())
-                && session.prices().get().valid() == session.faults().isEmpty());
+        until(() -> session.prices().get() != null && session.background().running().stream().noneMatch(t -> OF_PRICES.contains(t.name())));
         WaitForAsyncUtils.waitForFxEvents();
     }
 
@@ -237,6 +239,7 @@ class RoomsTest {
         type(robot, field(robot, "Retention", 0), "30");
         settled();
         enter(robot, "Quote");
+        assertEquals(100, picture(robot, ExceedanceChart.class).markAt());
         Path folder = Files.createTempDirectory("layerweft-journey");
         robot.interact(() -> viewOf(robot, ExceedanceChart.class).write(folder.resolve("curves.svg").toFile()));
         robot.interact(() -> viewOf(robot, ExceedanceChart.class).write(folder.resolve("curves.png").toFile()));
