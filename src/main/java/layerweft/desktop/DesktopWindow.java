@@ -113,7 +113,7 @@ public final class DesktopWindow {
         stage.titleProperty().bind(session.document().map(document -> document.name() + " – Layerweft"));
         stage.setMaximized(Boolean.parseBoolean(preferences.get("maximized", "false")));
         stage.setOnCloseRequest(this::closing);
-        frame.goTo(preferences.get("room", Rooms.FIRST));
+        frame.open(preferences.get("room", Rooms.FIRST));
         stage.show();
         if (first) {
             welcome();

@@ -228,4 +228,37 @@ class WindowTest {
         assertTrue(Files.readString(folder.resolve("window.properties")).contains("room=Perils"));
         assertTrue(dialogs.said().get(0).contains("Save changes?"));
     }
+
+    @Test
+    void whatACrashLostIsOfferedAtTheNextStart(FxRobot robot) throws Exception {
+        settled();
+        robot.interact(() -> session.setTau(0.5, null));
+        Path copies = folder.resolve("recovery");
+        Path mine = copies.resolve(String.valueOf(ProcessHandle.current().pid()));
+        until(() -> Files.exists(mine.resolve("programme.json")));
+        settled();
+        // no process has the largest number
+        Files.move(mine, copies.resolve("999999999999999999"));
+        dialogs.answer("Recover");
+        robot.interact(() -> {
+            DesktopWindow next = new DesktopWindow(new Stage(), folder, Background.ofWindow(), SHORT, dialogs);
+            next.show();
+            assertEquals(0.5, next.session().tau().get().tau(), 1e-9);
+            assertTrue(next.session().unsaved().get());
+            assertFalse(Files.exists(copies.resolve("999999999999999999")));
+            next.frame().getScene().getWindow().hide();
+        });
+        assertEquals("Recover unsaved changes?", dialogs.said().get(0));
+    }
+
+    @Test
+    void aFaultGreysTheFiguresUntilItIsUndone(FxRobot robot) throws Exception {
+        settled();
+        robot.interact(() -> session.edit("limit", d -> d.withProgramme(p -> p.set("layers[0].occurrence.limit", -5))));
+        Node cell = robot.lookup("#layer-cell-0").query();
+        assertTrue(cell.getPseudoClassStates().stream().anyMatch(state -> state.getPseudoClassName().equals("last-valid")));
+        assertEquals("13.58", lossOnLine(robot, 0));
+        robot.press(KeyCode.CONTROL).type(KeyCode.Z).release(KeyCode.CONTROL);
+        assertFalse(cell.getPseudoClassStates().stream().anyMatch(state -> state.getPseudoClassName().equals("last-valid")));
+    }
 }
