@@ -136,8 +136,10 @@ public final class DesktopWindow {
         session.tau().addListener(new ChangeListener<>() {
             @Override
             public void changed(ObservableValue<? extends TauState> is, TauState was, TauState now) {
-                session.tau().removeListener(this);
-                frame.hint().set("");
+                if (was != null && now != null) { // turned, not another document
+                    session.tau().removeListener(this);
+                    frame.hint().set("");
+                }
             }
         });
     }
