@@ -9,6 +9,8 @@ import java.util.concurrent.Executors;
 import java.util.function.Consumer;
 import java.util.function.Function;
 import javafx.application.Platform;
+import javafx.beans.property.ReadOnlyObjectProperty;
+import javafx.beans.property.ReadOnlyObjectWrapper;
 import javafx.collections.FXCollections;
 import javafx.collections.ObservableList;
 import layerweft.engine.RunControl;
@@ -22,6 +24,7 @@ public final class Background {
     private final Function<String, Executor> lanes;
     private final Map<String, Task> newest = new HashMap<>();
     private final ObservableList<Task> running = FXCollections.observableArrayList();
+    private final ReadOnlyObjectWrapper<Task> failed = new ReadOnlyObjectWrapper<>();
 
     private Background(Executor publish, Function<String, Executor> lanes) {
         this.publish = publish;
@@ -95,7 +98,12 @@ public final class Background {
     private <T> Task start(Task task, Function<RunControl, T> work, Consumer<T> onDone) {
         newest.put(task.name(), task);
         running.add(task);
-        task.onEnd(() -> running.remove(task));
+        task.onEnd(() -> {
+            running.remove(task);
+            if (task.state().get() == Task.State.FAILED) {
+                failed.set(task);
+            }
+        });
         lanes.apply(task.name()).execute(task.job(work, onDone));
         return task;
     }
@@ -106,6 +114,11 @@ public final class Background {
         if (task != null) {
             task.stop();
         }
+    }
+
+    /** The last task that failed, for telling the user; null as long as none has. */
+    public ReadOnlyObjectProperty<Task> failed() {
+        return failed.getReadOnlyProperty();
     }
 
     /** What is waiting or at work, oldest first. */
