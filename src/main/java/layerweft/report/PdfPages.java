@@ -4,6 +4,9 @@ import java.awt.Color;
 import java.io.IOException;
 import java.util.ArrayList;
 import java.util.List;
+import org.apache.fontbox.ttf.TTFParser;
+import org.apache.fontbox.ttf.TrueTypeFont;
+import org.apache.pdfbox.io.RandomAccessReadBuffer;
 import org.apache.pdfbox.pdmodel.PDDocument;
 import org.apache.pdfbox.pdmodel.PDPage;
 import org.apache.pdfbox.pdmodel.PDPageContentStream;
@@ -22,6 +25,7 @@ final class PdfPages {
     private static final float BOTTOM = PDRectangle.A4.getHeight() - 56;
     private static final float FOOT = PDRectangle.A4.getHeight() - 32;
     private static final float FOOT_SIZE = 8;
+    private static final List<String> LIGATURES = List.of("liga", "clig", "ccmp");
     private static final float INDENT = 10;
     private static final Color INK = new Color(0x16232A);
     private static final Color INK_2 = new Color(0x51626B);
@@ -35,8 +39,15 @@ final class PdfPages {
 
     PdfPages(PDDocument document) throws IOException {
         this.document = document;
-        this.regular = PDType0Font.load(document, Typeface.REGULAR.open(), true);
-        this.semibold = PDType0Font.load(document, Typeface.SEMIBOLD.open(), true);
+        this.regular = load(document, Typeface.REGULAR);
+        this.semibold = load(document, Typeface.SEMIBOLD);
+    }
+
+    /** Without ligatures, which could be neither searched nor copied. The font is read while the document is saved, so it is left open: it is in memory. */
+    private static PDType0Font load(PDDocument document, Typeface face) throws IOException {
+        TrueTypeFont font = new TTFParser().parse(new RandomAccessReadBuffer(face.open()));
+        LIGATURES.forEach(font::disableGsubFeature);
+        return PDType0Font.load(document, font, true);
     }
 
     void startPage() throws IOException {

@@ -11,6 +11,7 @@ import java.util.Comparator;
 import java.util.List;
 import layerweft.figures.Figure;
 import layerweft.figures.FigureText;
+import layerweft.figures.LayerFigures;
 import layerweft.figures.LayerTermsText;
 import layerweft.model.treaty.Layer;
 import layerweft.model.treaty.LayerTerms;
@@ -58,7 +59,7 @@ final class Tower {
     private Tower(Quote quote, List<LimitUse> uses) {
         List<Band> found = new ArrayList<>();
         for (int j = 0; j < quote.layers().size(); j++) {
-            found.add(band(quote.treaty().layer(j), quote.layers().get(j).lossOnLine(), uses.get(j)));
+            found.add(band(quote.treaty().layer(j), quote.layers().get(j), uses.get(j)));
         }
         found.sort(Comparator.comparing(Band::annual).thenComparingDouble(Band::from));
         for (Band band : found) {
@@ -80,14 +81,17 @@ final class Tower {
                 + "on average, darker where more is used.", Picture.PAGE_WIDTH, HEIGHT, tower::draw);
     }
 
-    private static Band band(Layer layer, Figure lossOnLine, LimitUse use) {
+    private static Band band(Layer layer, LayerFigures figures, LimitUse use) {
         LayerTerms t = layer.terms();
-        boolean each = t.occurrenceLimit() < Double.POSITIVE_INFINITY || t.retention() > 0 || t.hasFranchise();
-        double from = each ? t.hasFranchise() ? t.franchise() : t.retention() : t.deductible();
-        double size = each ? t.occurrenceLimit() : t.annualLimit();
-        double to = each && t.hasFranchise() ? Math.max(t.occurrenceLimit(), from) : from + size;
-        List<Figure> uses = use.uses().isEmpty() ? List.of(lossOnLine) : use.uses();
-        return new Band(layer.name(), LayerTermsText.of(t), from, to, !each, 0, uses, each && use.limits() > uses.size());
+        boolean ofTheYear = t.deductible() > 0 || t.occurrenceLimit() == Double.POSITIVE_INFINITY && t.retention() == 0 && !t.hasFranchise();
+        if (ofTheYear) {
+            Figure used = figures.expectedLoss().times(1 / layer.share()).over(t.annualLimit());
+            return new Band(layer.name(), LayerTermsText.of(t), t.deductible(), t.deductible() + t.annualLimit(), true, 0, List.of(used), false);
+        }
+        double from = t.hasFranchise() ? t.franchise() : t.retention();
+        double to = t.hasFranchise() ? Math.max(t.occurrenceLimit(), from) : from + t.occurrenceLimit();
+        List<Figure> uses = use.uses().isEmpty() ? List.of(figures.lossOnLine()) : use.uses();
+        return new Band(layer.name(), LayerTermsText.of(t), from, to, false, 0, uses, use.limits() > uses.size());
     }
 
     private boolean taken(Band band, int column) {
