@@ -25,7 +25,6 @@ final class PdfPages {
     private static final float BOTTOM = PDRectangle.A4.getHeight() - 56;
     private static final float FOOT = PDRectangle.A4.getHeight() - 32;
     private static final float FOOT_SIZE = 8;
-    private static final List<String> LIGATURES = List.of("liga", "clig", "ccmp");
     private static final float INDENT = 10;
     private static final Color INK = new Color(0x16232A);
     private static final Color INK_2 = new Color(0x51626B);
@@ -46,7 +45,7 @@ final class PdfPages {
     /** Without ligatures, which could be neither searched nor copied. The font is read while the document is saved, so it is left open: it is in memory. */
     private static PDType0Font load(PDDocument document, Typeface face) throws IOException {
         TrueTypeFont font = new TTFParser().parse(new RandomAccessReadBuffer(face.open()));
-        LIGATURES.forEach(font::disableGsubFeature);
+        font.setEnableGsub(false);
         return PDType0Font.load(document, font, true);
     }
 

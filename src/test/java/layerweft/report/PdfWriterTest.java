@@ -91,6 +91,15 @@ class PdfWriterTest {
     }
 
     @Test
+    void wordsCanBeSearchedLetterByLetter() throws IOException {
+        String words = "Layerweft, fit, office, flood, after";
+        ReportModel model = new ReportModel("t", "", List.of(new ReportModel.Section("s", List.of(new Block.Heading(words), new Block.Paragraph(words)))));
+        try (PDDocument document = Loader.loadPDF(PdfWriter.write(model))) {
+            assertEquals(2, new PDFTextStripper().getText(document).split(words, -1).length - 1);
+        }
+    }
+
+    @Test
     void sameModelGivesTheSameBytes() {
         assertArrayEquals(PdfWriter.write(Sample.model()), PdfWriter.write(Sample.model()));
     }
