@@ -37,6 +37,14 @@ public sealed interface Cell {
 
     /** A number with its error. */
     record Number(Figure figure, Form form) implements Cell {
+        /** Where no error can be given, less than this is what rounding leaves of a 0. */
+        private static final double ROUNDING = 1e-12;
+
+        public Number {
+            if (Double.isInfinite(figure.error()) && Math.abs(figure.value()) < ROUNDING) {
+                figure = new Figure(0, figure.error());
+            }
+        }
 
         @Override
         public String text() {

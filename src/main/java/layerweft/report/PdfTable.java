@@ -93,26 +93,36 @@ final class PdfTable {
     }
 
     private void draw() throws IOException {
-        pages.need(4 * line() + 24);
+        // never a header without a row below it
+        pages.need((most(titles()) + (table.rows().isEmpty() ? 0 : most(cells(table.rows().get(0))))) * line() + 30);
         if (!table.title().isEmpty()) {
             pages.text(table.title(), Typeface.REGULAR, SIZE + 0.5f, false);
             pages.space(3);
         }
         header();
         for (List<Cell> row : table.rows()) {
-            List<List<String>> cells = new ArrayList<>();
-            for (int k = 0; k < row.size(); k++) {
-                cells.add(row.get(k) instanceof Cell.Words ? pages.wrap(row.get(k).text(), Typeface.REGULAR, size, widths[k] - 2 * PAD) : List.of(shown(row.get(k))));
-            }
-            row(cells);
+            row(cells(row));
         }
     }
 
-    private void header() throws IOException {
+    private List<List<String>> cells(List<Cell> row) throws IOException {
+        List<List<String>> cells = new ArrayList<>();
+        for (int k = 0; k < row.size(); k++) {
+            cells.add(row.get(k) instanceof Cell.Words ? pages.wrap(row.get(k).text(), Typeface.REGULAR, size, widths[k] - 2 * PAD) : List.of(shown(row.get(k))));
+        }
+        return cells;
+    }
+
+    private List<List<String>> titles() throws IOException {
         List<List<String>> cells = new ArrayList<>();
         for (int k = 0; k < widths.length; k++) {
             cells.add(pages.wrap(table.header().get(k), Typeface.SEMIBOLD, size, widths[k] - 2 * PAD));
         }
+        return cells;
+    }
+
+    private void header() throws IOException {
+        List<List<String>> cells = titles();
         lines(cells, 0, most(cells), Typeface.SEMIBOLD);
         pages.rule(true);
     }
