@@ -36,6 +36,7 @@ class TowerPictureTest {
     void start(Stage stage) {
         picture = new TowerPicture(new Theme(), owner);
         stage.setScene(new Scene(new StackPane(picture), WIDTH, HEIGHT));
+        stage.sizeToScene(); // another test may have left the stage larger
         stage.show();
         picture.show(TowerExamples.five(), 0);
     }
