@@ -18,7 +18,7 @@ import picocli.CommandLine.Spec;
  */
 @Command(name = "layerweft", mixinStandardHelpOptions = true, versionProvider = Version.class,
         subcommands = {QuoteCommand.class, SweepCommand.class, BoundsCommand.class, BreakEvenCommand.class, CompareCommand.class, DriversCommand.class,
-            RankCommand.class, CheckCommand.class},
+            RankCommand.class, ReportCommand.class, CheckCommand.class},
         description = "Prices reinsurance layers over dependent perils.",
         footer = {"", "A price supports qualified judgement; it does not replace it, and it defers to local regulation and licensed practice."})
 public final class CommandLineProgram implements Runnable {

@@ -1,12 +1,8 @@
 package layerweft.command;
 
-import java.io.IOException;
 import java.io.PrintWriter;
 import java.nio.charset.StandardCharsets;
-import java.nio.file.AtomicMoveNotSupportedException;
-import java.nio.file.Files;
 import java.nio.file.Path;
-import java.nio.file.StandardCopyOption;
 import picocli.CommandLine.Option;
 
 /** Where the answer goes and in which form. */
@@ -31,41 +27,18 @@ final class OutputOptions {
 
     /** Refuses a target that cannot be written before time is spent on computing. */
     void checkTarget() {
-        if (out == null) {
-            return;
-        }
-        Path folder = out.toAbsolutePath().getParent();
-        if (Files.isDirectory(out) || folder == null || !Files.isDirectory(folder) || !Files.isWritable(folder)) {
-            throw new RunFailedException("--out: cannot write " + out + ": admissible is a file in a folder that exists and can be written to");
+        if (out != null) {
+            new OutputFile(out).check();
         }
     }
 
-    /** Writes the whole answer, or nothing: a file is first written beside its name, then moved onto it. */
+    /** Writes the whole answer, or nothing. */
     void write(String answer, PrintWriter standardOutput) {
         if (out == null) {
             standardOutput.print(answer);
             standardOutput.flush();
             return;
         }
-        try {
-            Path target = out.toAbsolutePath();
-            Path beside = Files.createTempFile(target.getParent(), target.getFileName().toString(), ".part");
-            try {
-                Files.writeString(beside, answer, StandardCharsets.UTF_8);
-                move(beside, target);
-            } finally {
-                Files.deleteIfExists(beside);
-            }
-        } catch (IOException e) {
-            throw new RunFailedException("--out: cannot write " + out + ": " + e.getMessage());
-        }
-    }
-
-    private static void move(Path from, Path to) throws IOException {
-        try {
-            Files.move(from, to, StandardCopyOption.ATOMIC_MOVE);
-        } catch (AtomicMoveNotSupportedException e) {
-            Files.move(from, to, StandardCopyOption.REPLACE_EXISTING);
-        }
+        new OutputFile(out).write(answer.getBytes(StandardCharsets.UTF_8));
     }
 }

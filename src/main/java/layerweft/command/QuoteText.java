@@ -5,16 +5,18 @@ import java.util.List;
 import java.util.Locale;
 import java.util.SortedMap;
 import layerweft.figures.BuyerPosition;
+import layerweft.figures.Dependences;
 import layerweft.figures.Engine;
 import layerweft.figures.Figure;
 import layerweft.figures.FigureText;
 import layerweft.figures.LayerFigures;
+import layerweft.figures.LayerTermsText;
+import layerweft.figures.Loadings;
 import layerweft.figures.PositionStatistics;
 import layerweft.figures.ReturnPeriods;
 import layerweft.model.portfolio.Portfolio;
 import layerweft.model.treaty.Buyer;
 import layerweft.model.treaty.Layer;
-import layerweft.model.treaty.LayerTerms;
 import layerweft.model.treaty.Loading;
 import layerweft.model.treaty.Pricing;
 import layerweft.study.Quote;
@@ -60,7 +62,7 @@ final class QuoteText {
         for (int j = 0; j < quote.layers().size(); j++) {
             LayerFigures f = quote.layers().get(j);
             Layer layer = quote.treaty().layer(j);
-            table.row(f.name(), terms(layer.terms()), FigureText.plainPercent(layer.share()), FigureText.value(f.expectedLoss()),
+            table.row(f.name(), LayerTermsText.of(layer.terms()), FigureText.plainPercent(layer.share()), FigureText.value(f.expectedLoss()),
                     FigureText.error(f.expectedLoss()), FigureText.value(f.standardDeviation()), FigureText.error(f.standardDeviation()),
                     FigureText.percent(f.lossOnLine()), FigureText.percentError(f.lossOnLine()), FigureText.oneIn(f.attachmentProbability()),
                     FigureText.oneIn(f.exhaustionProbability()), FigureText.value(f.expectedEvents()), f.engine().label());
@@ -171,26 +173,6 @@ final class QuoteText {
             }
         }
         line("* A price supports qualified judgement; it does not replace it, and it defers to local regulation and licensed practice.");
-    }
-
-    /** E.g. "90 % of 60 xs 40, 180 a year"; "60 xs 120 a year" for a stop loss. */
-    private static String terms(LayerTerms t) {
-        List<String> parts = new ArrayList<>();
-        boolean each = t.occurrenceLimit() < Double.POSITIVE_INFINITY || t.retention() > 0 || t.hasFranchise();
-        String share = t.quotaShare() < 1 ? FigureText.plainPercent(t.quotaShare()) + " of " : "";
-        if (t.hasFranchise()) {
-            parts.add(amount(t.occurrenceLimit()) + " franchise " + amount(t.franchise()));
-        } else if (each) {
-            parts.add(amount(t.occurrenceLimit()) + (t.retention() > 0 ? " xs " + amount(t.retention()) : " each"));
-        }
-        if (t.hasAnnualTerms()) {
-            parts.add(amount(t.annualLimit()) + (t.deductible() > 0 ? " xs " + amount(t.deductible()) : "") + " a year");
-        }
-        return share + (parts.isEmpty() ? "all losses" : String.join(", ", parts));
-    }
-
-    private static String amount(double value) {
-        return Double.isInfinite(value) ? "∞" : FigureText.groupedPlain(value);
     }
 
     private String money() {

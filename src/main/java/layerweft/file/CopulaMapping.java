@@ -6,8 +6,12 @@ import static layerweft.file.Field.required;
 
 import java.util.ArrayList;
 import java.util.HashSet;
+import java.util.LinkedHashMap;
 import java.util.List;
+import java.util.Locale;
+import java.util.Map;
 import java.util.Set;
+import java.util.stream.IntStream;
 import layerweft.file.Tagged.Kind;
 import layerweft.model.Finding;
 import layerweft.model.InadmissibleException;
@@ -25,6 +29,9 @@ import layerweft.model.copula.Student;
 
 /** A copula in a portfolio file, between perils that have names: its kinds, one line each, groups and mixtures. */
 final class CopulaMapping {
+    /** The kind that has no family. */
+    static final String MIXTURE = "mixture";
+
     private static final Field<Double> TAU = number("kendallTau");
     private static final Field<Double> THETA = number("theta");
     private static final Field<Double> DEGREES_OF_FREEDOM = number("degreesOfFreedom");
@@ -38,12 +45,17 @@ final class CopulaMapping {
     private final List<String> names;
     private final Set<String> grouped = new HashSet<>();
     private final Tagged<Copula> families = Tagged.of("copula", "family", List.of(
-            Kind.of("independence", Variant.of(v -> new Independence())),
-            Kind.of("comonotonic", Variant.of(v -> new Comonotonic())),
-            Kind.of("countermonotonic", Variant.of(v -> new Countermonotonic())),
-            Kind.of("gaussian", Variant.of(TAU, Gaussian::ofKendallTau), Variant.of(CORRELATION, rows -> Gaussian.ofCorrelation(matrix(rows)))),
-            Kind.of("student", Variant.of(TAU, DEGREES_OF_FREEDOM, Student::ofKendallTau),
-                    Variant.of(CORRELATION, DEGREES_OF_FREEDOM, (rows, nu) -> Student.ofCorrelation(matrix(rows), nu))),
+            Kind.of("independence", "Independence", Independence.class, Variant.of(v -> new Independence())),
+            Kind.of("comonotonic", "Comonotonic", Comonotonic.class, Variant.of(v -> new Comonotonic())),
+            Kind.of("countermonotonic", "Countermonotonic", Countermonotonic.class, Variant.of(v -> new Countermonotonic())),
+            Kind.of("gaussian", "Gaussian", Gaussian.class,
+                    Variant.of(TAU.of(c -> EllipticalForm.tau(c.correlation())), Gaussian::ofKendallTau),
+                    Variant.of(CORRELATION.of(c -> EllipticalForm.rows(c.correlation())), rows -> Gaussian.ofCorrelation(matrix(rows)))),
+            Kind.of("student", "Student t", Student.class,
+                    Variant.of(TAU.of(c -> EllipticalForm.tau(c.correlation())), DEGREES_OF_FREEDOM.of(Student::degreesOfFreedom),
+                            Student::ofKendallTau),
+                    Variant.of(CORRELATION.of(c -> EllipticalForm.rows(c.correlation())), DEGREES_OF_FREEDOM.of(Student::degreesOfFreedom),
+                            (rows, nu) -> Student.ofCorrelation(matrix(rows), nu))),
             archimedean(ArchimedeanFamily.CLAYTON),
             archimedean(ArchimedeanFamily.GUMBEL),
             archimedean(ArchimedeanFamily.FRANK),
@@ -53,16 +65,19 @@ final class CopulaMapping {
 
     private CopulaMapping(List<String> names) {
         this.names = new ArrayList<>(names);
-        this.component = Shape.of("mixtureComponent", Variant.of(number("weight"), required("copula", of(names)), Component::new));
-        this.mixture = Shape.of("copula.mixture", Variant.of(required("mixture", Lists.of(component, Limits.LIST)),
+        this.component = Shape.of("mixtureComponent",
+                Variant.of(number("weight").of(Component::weight), required("copula", of(names)).of(Component::copula), Component::new));
+        this.mixture = Shape.of("copula.mixture", Variant.of(
+                required("mixture", Lists.of(component, Limits.LIST).as(FieldType.COPULAS)).of(CopulaMapping::components),
                 parts -> new MixtureCopula(parts.stream().map(Component::weight).toList(), parts.stream().map(Component::copula).toList())));
     }
 
     /**
      * @param names of the perils joined, in order; null for a name that could not be read
      */
-    static Reading<Copula> of(List<String> names) {
-        return (node, path, faults) -> new CopulaMapping(names).read(node, path, faults);
+    static TwoWay<Copula> of(List<String> names) {
+        return TwoWay.of(FieldType.OBJECT, (node, path, faults) -> new CopulaMapping(names).read(node, path, faults),
+                copula -> new CopulaMapping(names).write(copula));
     }
 
     /** The shapes of all objects that a copula may consist of. */
@@ -71,6 +86,22 @@ final class CopulaMapping {
         List<Shape<?>> shapes = new ArrayList<>(mapping.families.shapes());
         shapes.addAll(List.of(mapping.mixture, mapping.component, mapping.group(ArchimedeanFamily.CLAYTON)));
         return shapes;
+    }
+
+    /** The shapes of all kinds between perils of those names, by the kinds' names; that of a mixture too. */
+    static Map<String, Shape<Copula>> kinds(List<String> names) {
+        CopulaMapping mapping = new CopulaMapping(names);
+        Map<String, Shape<Copula>> kinds = new LinkedHashMap<>();
+        mapping.families.labels().keySet().forEach(kind -> kinds.put(kind, mapping.families.kind(kind)));
+        kinds.put(MIXTURE, mapping.mixture);
+        return kinds;
+    }
+
+    /** What people call the kinds. */
+    static Map<String, String> labels() {
+        Map<String, String> labels = new LinkedHashMap<>(new CopulaMapping(List.of()).families.labels());
+        labels.put(MIXTURE, "Mixture");
+        return labels;
     }
 
     private Copula read(Node node, String path, Faults faults) {
@@ -95,6 +126,15 @@ final class CopulaMapping {
         }
     }
 
+    private Node write(Copula copula) {
+        return (copula instanceof MixtureCopula ? mixture : families).write(copula);
+    }
+
+    private static List<Component> components(Copula copula) {
+        return copula instanceof MixtureCopula mixed ? IntStream.range(0, mixed.weights().size())
+                .mapToObj(k -> new Component(mixed.weights().get(k), mixed.components().get(k))).toList() : null;
+    }
+
     /** Where the strength was given as theta, findings are about that field. */
     private static InadmissibleException asGiven(Node.Members object, InadmissibleException e) {
         if (object.get("theta") == null) {
@@ -107,23 +147,30 @@ final class CopulaMapping {
 
     private Kind<Copula> archimedean(ArchimedeanFamily family) {
         Field<List<Group>> groups = groups(family);
-        return Kind.of(family.label(),
-                Variant.of(TAU, SURVIVAL, groups, (tau, survival, inner) -> inner.isEmpty() ? Archimedean.ofKendallTau(family, survival, tau)
-                        : GroupedArchimedean.of(family, survival, Group.ofKendallTau(family, tau, List.of(), inner))),
-                Variant.of(THETA, SURVIVAL, groups, (theta, survival, inner) -> inner.isEmpty() ? Archimedean.ofTheta(family, survival, theta)
-                        : GroupedArchimedean.of(family, survival, new Group(theta, List.of(), inner))));
+        return Kind.of(family.label(), family.label().substring(0, 1).toUpperCase(Locale.ROOT) + family.label().substring(1), Copula.class,
+                Variant.of(TAU.of(c -> ArchimedeanForm.tau(family, c)), SURVIVAL.of(ArchimedeanForm::survival), groups.of(ArchimedeanForm::groups),
+                        (tau, survival, inner) -> inner.isEmpty() ? Archimedean.ofKendallTau(family, survival, tau)
+                                : GroupedArchimedean.of(family, survival, Group.ofKendallTau(family, tau, List.of(), inner))),
+                Variant.of(THETA.of(c -> ArchimedeanForm.theta(family, c)), SURVIVAL.of(ArchimedeanForm::survival),
+                        groups.of(ArchimedeanForm::groups),
+                        (theta, survival, inner) -> inner.isEmpty() ? Archimedean.ofTheta(family, survival, theta)
+                                : GroupedArchimedean.of(family, survival, new Group(theta, List.of(), inner))));
     }
 
     private Field<List<Group>> groups(ArchimedeanFamily family) {
-        return optional("groups", Lists.of((node, path, faults) -> group(family).read(node, path, faults), Limits.PERILS), List.of());
+        TwoWay<Group> group = TwoWay.of(FieldType.OBJECT, (node, path, faults) -> group(family).read(node, path, faults),
+                value -> group(family).write(value));
+        return optional("groups", Lists.of(group, Limits.PERILS).as(FieldType.GROUPS), List.of());
     }
 
     private Shape<Group> group(ArchimedeanFamily family) {
-        Field<List<Integer>> members = optional("perils", Lists.of(this::member, Limits.PERILS), List.of());
-        Field<List<Group>> inner = groups(family);
+        TwoWay<Integer> member = TwoWay.of(FieldType.TEXT, this::member, names::get);
+        Part<Group, List<Integer>> members = optional("perils", Lists.of(member, Limits.PERILS), List.<Integer>of()).of(Group::members);
+        Part<Group, List<Group>> inner = groups(family).of(Group::groups);
         return Shape.of("group",
-                Variant.of(TAU, members, inner, (tau, perils, groups) -> Group.ofKendallTau(family, tau, perils, groups)),
-                Variant.of(THETA, members, inner, Group::new));
+                Variant.of(TAU.of(g -> ArchimedeanForm.tau(family, g.theta())), members, inner,
+                        (tau, perils, groups) -> Group.ofKendallTau(family, tau, perils, groups)),
+                Variant.of(THETA.of(Group::theta), members, inner, Group::new));
     }
 
     /** Index of a peril that a group names; each may be named once in all groups. */

@@ -2,222 +2,223 @@ package layerweft.file;
 
 import java.nio.file.Path;
 import java.util.ArrayList;
-import java.util.LinkedHashMap;
 import java.util.List;
 import java.util.Map;
 
 /**
- * A portfolio or programme file as it is written, valid or not: an immutable tree of values. Edits give a new tree that shares what they do not
- * touch; fields keep their order and numbers the digits they were written with, so that a file that is opened, edited in one place and
- * saved differs in that place only.
+ * The JSON object of a file, of whatever format and however faulty, for editing: immutable, with its fields in order and its numbers as they
+ * were written. Every edit gives a new tree that shares with the old one what it did not touch.
  *
- * <p>Paths are those of {@link Fault#path}: {@code perils[1].severity.alpha}. Values are plain ones: {@code String}, {@code Double},
- * {@code Boolean}, {@code List}, {@code Map} from names to values, or null.
+ * <p>Values have paths, e.g. {@code perils[1].severity.alpha}; the whole object is the empty path. They go in and out as plain Java values:
+ * String, Double, Boolean, List and Map with String keys. Two trees are equal if they hold the same fields and values: neither the order of
+ * fields, nor how a number is written, nor the name of the file counts.
  */
 public final class FileTree {
+    private final String fileName;
     private final Node.Members root;
 
-    FileTree(Node.Members root) {
+    private FileTree(String fileName, Node.Members root) {
+        this.fileName = fileName;
         this.root = root;
     }
 
     /**
-     * Reads a file.
-     *
-     * @throws FaultyFileException if there is no such file, it cannot be read, or it is not a JSON object
+     * @throws FaultyFileException if the file cannot be read or is not a JSON object; of its format nothing is checked
      */
     public static FileTree read(Path path) {
-        Faults faults = new Faults(path.toString());
-        return of(Format.parse(path, faults), faults);
+        return parse(path.toString(), SourceText.read(path));
     }
 
     /**
-     * @param fileName what to call the text in faults
-     * @throws FaultyFileException if it is not a JSON object
+     * @param fileName what to call the file in faults
+     * @throws FaultyFileException if the text is not a JSON object; of its format nothing is checked
      */
     public static FileTree parse(String fileName, String text) {
         Faults faults = new Faults(fileName);
-        return of(TreeParser.parse(text, faults), faults);
-    }
-
-    /** From plain values, in the order of the map. */
-    public static FileTree of(Map<String, ?> fields) {
-        return new FileTree((Node.Members) PlainValues.node(fields));
-    }
-
-    private static FileTree of(Node.Members root, Faults faults) {
+        Node.Members root = TreeParser.parse(text, faults);
         faults.orThrow();
-        return new FileTree(root);
+        return new FileTree(fileName, (Node.Members) TreeValues.unplaced(root));
+    }
+
+    /**
+     * @param fileName what to call the file in faults
+     * @param fields plain Java values by name
+     */
+    public static FileTree of(String fileName, Map<String, ?> fields) {
+        return new FileTree(fileName, (Node.Members) TreeValues.node(fields));
+    }
+
+    static FileTree of(String fileName, Node root) {
+        return new FileTree(fileName, (Node.Members) root);
     }
 
     Node.Members root() {
         return root;
     }
 
-    /** The value at a path; null where there is none or it is null. The empty path is the whole file. */
-    public Object get(String path) {
-        Node node = node(path);
-        return node == null ? null : PlainValues.plain(node);
+    /** What the file is called in faults. */
+    public String fileName() {
+        return fileName;
     }
 
-    /** Whether there is a value at a path. */
+    /** The same tree under another name, as after saving it elsewhere. */
+    public FileTree named(String name) {
+        return new FileTree(name, root);
+    }
+
+    /**
+     * The value there: String, Double (infinite where the number written is beyond its range), Boolean, unmodifiable List or Map; null where
+     * there is nothing, or null.
+     *
+     * @throws IllegalArgumentException if the path is none
+     */
+    public Object get(String path) {
+        return TreeValues.plain(node(path));
+    }
+
+    /** Whether there is a value, which may be null. */
     public boolean has(String path) {
         return node(path) != null;
     }
 
-    /** The number at a path; NaN where there is none. */
+    /**
+     * The object there as a tree of its own, which {@link #set} and {@link #insert} take with its numbers as they were written.
+     *
+     * @throws IllegalArgumentException if there is no object
+     */
+    public FileTree at(String path) {
+        if (node(path) instanceof Node.Members object) {
+            return new FileTree(fileName, object);
+        }
+        throw new IllegalArgumentException("no object at " + path);
+    }
+
+    /** The number there; NaN where there is none. */
     public double number(String path) {
         return node(path) instanceof Node.Decimal number ? number.value() : Double.NaN;
     }
 
-    /** The text at a path; null where there is none. */
+    /** The text there; null where there is none. */
     public String text(String path) {
         return node(path) instanceof Node.Text text ? text.text() : null;
     }
 
-    /** Items of the list at a path; 0 where there is none. */
-    public int size(String path) {
-        return node(path) instanceof Node.Elements list ? list.items().size() : 0;
-    }
-
-    /** Names of the fields of the object at a path, in the order of the file; none where there is no object. */
+    /** Names of the fields of the object there, in the order of the file; none where there is no object. */
     public List<String> fields(String path) {
         return node(path) instanceof Node.Members object ? List.copyOf(object.fields().keySet()) : List.of();
     }
 
-    private Node node(String path) {
-        Node at = root;
-        for (String step : FieldPath.steps(path)) {
-            at = child(at, step);
-        }
-        return at;
-    }
-
-    private static Node child(Node at, String step) {
-        if (FieldPath.isItem(step)) {
-            int k = FieldPath.index(step);
-            return at instanceof Node.Elements list && k < list.items().size() ? list.items().get(k) : null;
-        }
-        return at instanceof Node.Members object ? object.get(step) : null;
+    /** How many items the list there has; 0 where there is no list. */
+    public int size(String listPath) {
+        return node(listPath) instanceof Node.Elements list ? list.items().size() : 0;
     }
 
     /**
-     * The tree with a value at a path: in place of the one there, or as a new field at the place that the format gives it. Objects on the way
-     * that are not there are made.
+     * The value put there, and objects and lists on the way made where they are not there. A new field goes where the format has it; a number
+     * that is there already stays as it is written.
      *
-     * @throws IllegalArgumentException if the path leads through an item that is not there, or a value of another kind
+     * @param path an item of a list may be the one behind its end
+     * @param value a String, Number, Boolean or FileTree, or a List or Map with String keys of such
+     * @throws IllegalArgumentException for null and other values, numbers that are not finite, and paths that lead through a plain value or
+     *     beyond the end of a list
      */
     public FileTree set(String path, Object value) {
-        return new FileTree((Node.Members) set(root, FieldPath.steps(path), 0, PlainValues.node(value)));
+        Node node = TreeValues.node(value);
+        Node present = node(path);
+        if (present != null && TreeValues.plain(present) != null && TreeValues.plain(present).equals(TreeValues.plain(node))) {
+            return this;
+        }
+        return edited(TreeEdit.set(root, TreePath.steps(path), node));
     }
 
-    private static Node set(Node at, List<String> steps, int depth, Node value) {
-        if (depth == steps.size()) {
-            return value;
+    /** What stands at one path put at another as well, with its numbers as they are written. */
+    public FileTree copy(String from, String to) {
+        Node node = node(from);
+        if (node == null) {
+            throw new IllegalArgumentException("nothing at " + from);
         }
-        String step = steps.get(depth);
-        if (FieldPath.isItem(step)) {
-            int k = FieldPath.index(step);
-            require(at instanceof Node.Elements list && k < list.items().size(), steps, depth);
-            List<Node> items = new ArrayList<>(((Node.Elements) at).items());
-            items.set(k, set(items.get(k), steps, depth + 1, value));
-            return new Node.Elements(at.place(), items);
-        }
-        require(at == null || at instanceof Node.Members, steps, depth);
-        Map<String, Node.Member> fields = at == null ? new LinkedHashMap<>() : new LinkedHashMap<>(((Node.Members) at).fields());
-        Node.Member old = fields.get(step);
-        Node.Member member = new Node.Member(old == null ? Place.NONE : old.namePlace(), set(old == null ? null : old.value(), steps, depth + 1, value));
-        Place place = at == null ? Place.NONE : at.place();
-        if (old != null) {
-            fields.put(step, member);
-            return new Node.Members(place, fields);
-        }
-        return new Node.Members(place, FieldOrder.insert(fields, step, member));
+        return edited(TreeEdit.set(root, TreePath.steps(to), node));
     }
 
-    /** The tree without the field or item at a path; the same tree where there is none. */
+    /** Without the value there; the same where there is none. */
     public FileTree remove(String path) {
-        List<String> steps = FieldPath.steps(path);
-        return steps.isEmpty() || !has(path) ? this : new FileTree((Node.Members) remove(root, steps, 0));
-    }
-
-    private static Node remove(Node at, List<String> steps, int depth) {
-        String step = steps.get(depth);
-        boolean last = depth + 1 == steps.size();
-        if (at instanceof Node.Elements list) {
-            List<Node> items = new ArrayList<>(list.items());
-            int k = FieldPath.index(step);
-            if (last) {
-                items.remove(k);
-            } else {
-                items.set(k, remove(items.get(k), steps, depth + 1));
-            }
-            return new Node.Elements(at.place(), items);
+        List<Object> steps = TreePath.steps(path);
+        if (steps.isEmpty()) {
+            throw new IllegalArgumentException("the whole file cannot be removed from itself");
         }
-        Map<String, Node.Member> fields = new LinkedHashMap<>(((Node.Members) at).fields());
-        Node.Member old = fields.get(step);
-        if (last) {
-            fields.remove(step);
-        } else {
-            fields.put(step, new Node.Member(old.namePlace(), remove(old.value(), steps, depth + 1)));
-        }
-        return new Node.Members(at.place(), fields);
+        int last = steps.size() - 1;
+        return edited(TreeEdit.within(root, steps.subList(0, last), holder -> TreeEdit.without(holder, steps.get(last))));
     }
 
     /**
-     * The tree with an item more in a list, which is made where there is none.
+     * A list with one item more; a list of one where there is none.
      *
-     * @param index from 0 to the number of items
+     * @param index the item's position afterwards, from 0 to the present length
+     * @param value as for {@link #set}
      */
     public FileTree insert(String listPath, int index, Object value) {
-        FileTree with = has(listPath) ? this : set(listPath, List.of());
-        Node node = with.node(listPath);
-        require(node instanceof Node.Elements list && index >= 0 && index <= list.items().size(), List.of(listPath), 0);
-        List<Node> items = new ArrayList<>(((Node.Elements) node).items());
-        items.add(index, PlainValues.node(value));
-        return with.replace(listPath, new Node.Elements(node.place(), items));
+        List<Node> items = has(listPath) ? items(listPath) : new ArrayList<>();
+        items.add(checked(index, items.size() + 1), TreeValues.node(value));
+        return setList(listPath, items);
     }
 
-    /** The tree with one item of a list moved to another place. */
+    /**
+     * A list with one item elsewhere.
+     *
+     * @param to its position afterwards
+     */
     public FileTree move(String listPath, int from, int to) {
-        Node node = node(listPath);
-        require(node instanceof Node.Elements list && Math.min(from, to) >= 0 && Math.max(from, to) < list.items().size(), List.of(listPath), 0);
-        List<Node> items = new ArrayList<>(((Node.Elements) node).items());
-        items.add(to, items.remove(from));
-        return replace(listPath, new Node.Elements(node.place(), items));
+        List<Node> items = items(listPath);
+        Node moved = items.remove(checked(from, items.size()));
+        items.add(checked(to, items.size() + 1), moved);
+        return setList(listPath, items);
     }
 
-    /** The tree with the value at one path copied, as it is written, to another. */
-    public FileTree copy(String from, String to) {
-        Node node = node(from);
-        require(node != null, List.of(from), 0);
-        return new FileTree((Node.Members) set(root, FieldPath.steps(to), 0, node));
-    }
-
-    private FileTree replace(String path, Node value) {
-        return new FileTree((Node.Members) set(root, FieldPath.steps(path), 0, value));
-    }
-
-    private static void require(boolean there, List<String> steps, int depth) {
-        if (!there) {
-            throw new IllegalArgumentException("no such place in the file: " + String.join(".", steps) + " at " + steps.get(depth));
-        }
-    }
-
-    /** The file as JSON, laid out as the files that come with the program. */
+    /** The JSON as people lay it out, ending with a line break. */
     public String text() {
         return TreeText.of(root);
     }
 
-    /** Whether two files say the same in the same order, numbers by their digits. */
+    /** Null where there is nothing. */
+    Node node(String path) {
+        Node at = root;
+        for (Object step : TreePath.steps(path)) {
+            at = TreePath.next(at, step);
+        }
+        return at;
+    }
+
+    private List<Node> items(String listPath) {
+        return new ArrayList<>(TreeEdit.elements(node(listPath)).items());
+    }
+
+    private FileTree setList(String listPath, List<Node> items) {
+        return edited(TreeEdit.set(root, TreePath.steps(listPath), new Node.Elements(Place.NONE, items)));
+    }
+
+    private FileTree edited(Node changed) {
+        if (changed instanceof Node.Members object) {
+            return object == root ? this : new FileTree(fileName, object);
+        }
+        throw new IllegalArgumentException("a file is an object, not " + changed.shown());
+    }
+
+    private static int checked(int index, int count) {
+        if (index < 0 || index >= count) {
+            throw new IllegalArgumentException("position " + index + " is not from 0 to " + (count - 1));
+        }
+        return index;
+    }
+
     @Override
     public boolean equals(Object other) {
-        return other instanceof FileTree tree && (tree.root == root || tree.text().equals(text()));
+        return this == other || other instanceof FileTree tree
+                && (root == tree.root || TreeValues.plain(root).equals(TreeValues.plain(tree.root)));
     }
 
     @Override
     public int hashCode() {
-        return text().hashCode();
+        return TreeValues.plain(root).hashCode();
     }
 
     @Override

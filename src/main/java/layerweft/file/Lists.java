@@ -5,13 +5,13 @@ import java.util.HashSet;
 import java.util.List;
 import java.util.Set;
 
-/** Readings of lists. */
+/** Lists of values. */
 final class Lists {
     private Lists() {}
 
     /** A list of at most so many items; every faulty item is found, up to the first thousand. */
-    static <T> Reading<List<T>> of(Reading<T> item, int most) {
-        return (node, path, faults) -> {
+    static <T> TwoWay<List<T>> of(TwoWay<T> item, int most) {
+        return TwoWay.of(item.type().list(), (node, path, faults) -> {
             if (!(node instanceof Node.Elements list)) {
                 faults.wrongType(node, path, "a list");
                 return null;
@@ -26,23 +26,23 @@ final class Lists {
                 values.add(item.read(list.items().get(k), FieldPath.item(path, k), faults));
             }
             return faults.count() == before ? values : null;
-        };
+        }, values -> values.stream().map(item::write).toList());
     }
 
     /** A list that is not empty. */
-    static <T> Reading<List<T>> notEmpty(Reading<List<T>> list, String admissible) {
-        return (node, path, faults) -> {
+    static <T> TwoWay<List<T>> notEmpty(TwoWay<List<T>> list, String admissible) {
+        return list.reading((node, path, faults) -> {
             if (node instanceof Node.Elements elements && elements.items().isEmpty()) {
                 faults.wrongType(node, path, admissible);
                 return null;
             }
             return list.read(node, path, faults);
-        };
+        });
     }
 
     /** A list that names nothing twice. */
-    static Reading<List<String>> distinct(Reading<List<String>> list) {
-        return (node, path, faults) -> {
+    static TwoWay<List<String>> distinct(TwoWay<List<String>> list) {
+        return list.reading((node, path, faults) -> {
             List<String> values = list.read(node, path, faults);
             Set<String> seen = new HashSet<>();
             int before = faults.count();
@@ -52,7 +52,7 @@ final class Lists {
                 }
             }
             return faults.count() == before ? values : null;
-        };
+        });
     }
 
     /** The numbers of a list as an array. */

@@ -46,28 +46,13 @@ sealed interface Node {
      * A number, to the nearest double.
      *
      * @param value infinite where the number is beyond the range of a double
-     * @param written how it was written, null where that is {@link #plain}
+     * @param written how it was written, so that saving a file changes no number that nobody edited
      */
     record Decimal(Place place, double value, String written) implements Node {
-
-        static Decimal of(Place place, String written) {
-            double value = Double.parseDouble(written);
-            return new Decimal(place, value, Double.isInfinite(value) || !plain(value).equals(written) ? written : null);
-        }
-
-        /** The shortest text of a finite number that reads back the same. */
-        static String plain(double value) {
-            return value == Math.rint(value) && Math.abs(value) < 1e15 && !(value == 0 && 1 / value < 0) ? Long.toString((long) value) : Double.toString(value);
-        }
-
-        /** As written in the file, for writing it again. */
-        String literal() {
-            return written != null ? written : plain(value);
-        }
-
         @Override
         public String shown() {
-            return Double.isInfinite(value) ? Excerpt.plain(written) : plain(value);
+            return Double.isInfinite(value) ? Excerpt.plain(written) : value == Math.rint(value) && Math.abs(value) < 1e15
+                    ? Long.toString((long) value) : Double.toString(value);
         }
     }
 
@@ -90,8 +75,8 @@ sealed interface Node {
      */
     default Place placeOf(String path) {
         Node at = this;
-        for (String step : FieldPath.steps(path)) {
-            Node next = FieldPath.isItem(step) ? item(at, FieldPath.index(step)) : at instanceof Members m ? m.get(step) : null;
+        for (String step : path.split("\\.|(?=\\[)")) {
+            Node next = step.isEmpty() ? at : step.startsWith("[") ? item(at, step) : at instanceof Members m ? m.get(step) : null;
             if (next == null) {
                 break;
             }
@@ -100,7 +85,8 @@ sealed interface Node {
         return at.place();
     }
 
-    private static Node item(Node list, int k) {
+    private static Node item(Node list, String step) {
+        int k = Integer.parseInt(step.substring(1, step.length() - 1));
         return list instanceof Elements elements && k < elements.items().size() ? elements.items().get(k) : null;
     }
 }

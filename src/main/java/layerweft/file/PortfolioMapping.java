@@ -24,12 +24,25 @@ final class PortfolioMapping {
     private static final Field<String> NAME = required("name", Scalars.TEXT);
 
     private static final Shape<SubPeril> SUB_PERIL = Shape.of("subPeril",
-            Variant.of(NAME, number("chance", 1.0), required("severity", SeverityMapping.SEVERITY), SubPeril::new));
+            Variant.of(NAME.of(SubPeril::name), number("chance", 1.0).of(SubPeril::chance),
+                    required("severity", SeverityMapping.SEVERITY).of(SubPeril::severity), SubPeril::new));
+    private static final TwoWay<Peril> PERIL = TwoWay.of(FieldType.OBJECT, PortfolioMapping::peril, PortfolioMapping::write);
+    private static final TwoWay<Dependence.Links> LINKS = TwoWay.of(FieldType.TEXT, PortfolioMapping::links,
+            links -> links == Dependence.Links.COUNTS ? "counts" : "annualTotals");
 
     private PortfolioMapping() {}
 
     static Portfolio read(Node.Members root, Faults faults) {
         return portfolio(names(root.get("perils"), Limits.PERILS)).read(root, "", faults);
+    }
+
+    static Node write(Portfolio portfolio) {
+        return portfolio(portfolio.perils().stream().map(Peril::name).toList()).write(portfolio);
+    }
+
+    private static Node write(Peril peril) {
+        return peril(peril.eventLoss() instanceof EventLoss.Split split ? split.subPerils().stream().map(SubPeril::name).toList() : List.of())
+                .write(peril);
     }
 
     /** The shapes of all objects of the file. */
@@ -44,11 +57,12 @@ final class PortfolioMapping {
     private static Shape<Portfolio> portfolio(List<String> perils) {
         Field<String> currency = required("currency", Scalars.TEXT);
         Field<String> unit = required("unit", Scalars.TEXT);
-        Field<List<Peril>> list = required("perils", Lists.notEmpty(Lists.of(PortfolioMapping::peril, Limits.PERILS), "at least one peril"));
+        Field<List<Peril>> list = required("perils", Lists.notEmpty(Lists.of(PERIL, Limits.PERILS), "at least one peril"));
         Field<Dependence> dependence = optional("dependence", dependence(perils), Dependence.NONE);
         return Shape.of("portfolio", Variant.of(
                 v -> new Portfolio(v.get(NAME), v.get(currency), v.get(unit), v.get(list), v.get(dependence)),
-                required("format", Scalars.constant(FORMAT)), NAME, currency, unit, list, dependence));
+                required("format", Scalars.constant(FORMAT)).of(portfolio -> FORMAT), NAME.of(Portfolio::name), currency.of(Portfolio::currency),
+                unit.of(Portfolio::unit), list.of(Portfolio::perils), dependence.of(Portfolio::dependence)));
     }
 
     private static Peril peril(Node node, String path, Faults faults) {
@@ -71,14 +85,18 @@ final class PortfolioMapping {
         var parts = required("subPerils", Lists.notEmpty(Lists.of(SUB_PERIL, Limits.SUB_PERILS), "at least one sub-peril"));
         Field<Copula> copula = optional("subPerilCopula", CopulaMapping.of(subPerils), new Independence());
         return Shape.of("peril",
-                Variant.of(NAME, frequency, severity, (name, counts, losses) -> new Peril(name, counts, new EventLoss.Single(losses))),
-                Variant.of(NAME, frequency, parts, copula,
+                Variant.of(NAME.of(Peril::name), frequency.of(Peril::frequency),
+                        severity.of(p -> p.eventLoss() instanceof EventLoss.Single single ? single.severity() : null),
+                        (name, counts, losses) -> new Peril(name, counts, new EventLoss.Single(losses))),
+                Variant.of(NAME.of(Peril::name), frequency.of(Peril::frequency),
+                        parts.of(p -> p.eventLoss() instanceof EventLoss.Split split ? split.subPerils() : null),
+                        copula.of(p -> p.eventLoss() instanceof EventLoss.Split split ? split.copula() : null),
                         (name, counts, split, joined) -> new Peril(name, counts, new EventLoss.Split(split, joined))));
     }
 
     private static Shape<Dependence> dependence(List<String> perils) {
-        return Shape.of("dependence", Variant.of(required("links", PortfolioMapping::links), required("copula", CopulaMapping.of(perils)),
-                Dependence::new));
+        return Shape.of("dependence", Variant.of(required("links", LINKS).of(Dependence::links),
+                required("copula", CopulaMapping.of(perils)).of(Dependence::copula), Dependence::new));
     }
 
     private static Dependence.Links links(Node node, String path, Faults faults) {

@@ -1,8 +1,8 @@
 package layerweft.file;
 
-/** Readings of single values: types are taken as they stand, nothing is converted. */
+/** Single values: types are taken as they stand, nothing is converted. */
 final class Scalars {
-    static final Reading<Double> NUMBER = (node, path, faults) -> {
+    static final TwoWay<Double> NUMBER = TwoWay.of(FieldType.NUMBER, (node, path, faults) -> {
         if (!(node instanceof Node.Decimal number)) {
             faults.wrongType(node, path, "a number");
             return null;
@@ -12,26 +12,26 @@ final class Scalars {
             return null;
         }
         return number.value();
-    };
+    }, value -> value);
 
-    static final Reading<Integer> INTEGER = (node, path, faults) -> {
+    static final TwoWay<Integer> INTEGER = TwoWay.of(FieldType.WHOLE_NUMBER, (node, path, faults) -> {
         if (!(node instanceof Node.Decimal number) || number.value() != (int) number.value()) {
             faults.wrongType(node, path, "a whole number, at most " + Integer.MAX_VALUE + " in size");
             return null;
         }
         return (int) number.value();
-    };
+    }, value -> value);
 
-    static final Reading<Boolean> TRUTH = (node, path, faults) -> {
+    static final TwoWay<Boolean> TRUTH = TwoWay.of(FieldType.TRUTH, (node, path, faults) -> {
         if (!(node instanceof Node.Truth truth)) {
             faults.wrongType(node, path, "true or false");
             return null;
         }
         return truth.value();
-    };
+    }, value -> value);
 
     /** A name or label: short enough to show, without characters that a terminal would act on. */
-    static final Reading<String> TEXT = (node, path, faults) -> {
+    static final TwoWay<String> TEXT = TwoWay.of(FieldType.TEXT, (node, path, faults) -> {
         if (!(node instanceof Node.Text text)) {
             faults.wrongType(node, path, "a text in double quotes");
             return null;
@@ -41,18 +41,18 @@ final class Scalars {
             return null;
         }
         return text.text();
-    };
+    }, value -> value);
 
     private Scalars() {}
 
     /** Exactly this text. */
-    static Reading<String> constant(String expected) {
-        return (node, path, faults) -> {
+    static TwoWay<String> constant(String expected) {
+        return TwoWay.of(FieldType.TEXT, (node, path, faults) -> {
             if (!(node instanceof Node.Text text) || !text.text().equals(expected)) {
                 faults.wrongType(node, path, Excerpt.quoted(expected));
                 return null;
             }
             return expected;
-        };
+        }, value -> value);
     }
 }

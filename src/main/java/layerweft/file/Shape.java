@@ -2,11 +2,14 @@ package layerweft.file;
 
 import java.util.ArrayList;
 import java.util.HashMap;
+import java.util.LinkedHashMap;
 import java.util.LinkedHashSet;
 import java.util.List;
 import java.util.Map;
 import java.util.Set;
 import java.util.function.BiFunction;
+import java.util.function.Function;
+import java.util.function.UnaryOperator;
 import java.util.stream.Collectors;
 import layerweft.model.InadmissibleException;
 
@@ -16,7 +19,7 @@ import layerweft.model.InadmissibleException;
  *
  * @param name of this kind of object, as the JSON Schema calls it, e.g. {@code severity.pareto}
  */
-record Shape<T>(String name, List<Variant<T>> variants) implements Reading<T> {
+record Shape<T>(String name, List<Variant<T>> variants) implements TwoWay<T> {
     /** Unknown fields of one object that are held against the known ones: more are no misspellings. */
     private static final int MOST_HINTS = 20;
 
@@ -26,26 +29,82 @@ record Shape<T>(String name, List<Variant<T>> variants) implements Reading<T> {
         return new Shape<>(name, List.of(variants));
     }
 
-    /** The same with one field more in every variant, which may change what is built. */
-    <U> Shape<T> with(Field<U> extra, BiFunction<T, U, T> change) {
+    /**
+     * The same with one field more in every variant.
+     *
+     * @param change what the field changes in what is built
+     * @param inner undoes the change
+     * @param value of the field
+     */
+    <U> Shape<T> with(Field<U> extra, BiFunction<T, U, T> change, UnaryOperator<T> inner, Function<T, U> value) {
         List<Variant<T>> extended = new ArrayList<>();
         for (Variant<T> variant : variants) {
             List<Field<?>> fields = new ArrayList<>(variant.fields());
             fields.add(extra);
-            extended.add(new Variant<>(List.copyOf(fields), v -> change.apply(variant.build().apply(v), v.get(extra))));
+            extended.add(new Variant<>(List.copyOf(fields), v -> change.apply(variant.build().apply(v), v.get(extra)), t -> {
+                Values values = variant.values().apply(inner.apply(t));
+                return values == null ? null : values.with(extra, value.apply(t));
+            }));
         }
         return new Shape<>(name, List.copyOf(extended));
     }
 
     /** The same with the field that names the kind, before the others. */
-    Shape<T> tagged(Field<String> tag) {
+    Shape<T> tagged(Field<String> tag, String kind) {
         List<Variant<T>> extended = new ArrayList<>();
         for (Variant<T> variant : variants) {
             List<Field<?>> fields = new ArrayList<>(List.of(tag));
             fields.addAll(variant.fields());
-            extended.add(new Variant<>(List.copyOf(fields), variant.build()));
+            extended.add(new Variant<>(List.copyOf(fields), variant.build(), t -> {
+                Values values = variant.values().apply(t);
+                return values == null ? null : values.with(tag, kind);
+            }));
         }
         return new Shape<>(name, List.copyOf(extended));
+    }
+
+    /** In the way that gives exactly the value in the fewest digits, else in the first that gives it to rounding. */
+    @Override
+    public Node write(T value) {
+        Node node = attempt(value);
+        if (node == null) {
+            throw new IllegalArgumentException("no " + name + " of a file is " + value);
+        }
+        return node;
+    }
+
+    /** Null where this shape has no way to give the value. */
+    Node attempt(T value) {
+        Node shortest = null;
+        int least = Integer.MAX_VALUE;
+        for (Variant<T> variant : variants) {
+            Values exact = variant.exact(value);
+            if (exact != null && variant.digits(exact) < least) {
+                shortest = members(variant, exact);
+                least = variant.digits(exact);
+            }
+        }
+        if (shortest != null) {
+            return shortest;
+        }
+        for (Variant<T> variant : variants) {
+            Values near = variant.values().apply(value);
+            if (near != null) {
+                return members(variant, near);
+            }
+        }
+        return null;
+    }
+
+    static Node members(Variant<?> variant, Values values) {
+        Map<String, Node.Member> fields = new LinkedHashMap<>();
+        for (Field<?> field : variant.fields()) {
+            Node node = field.write(values);
+            if (node != null) {
+                fields.put(field.name(), new Node.Member(Place.NONE, node));
+            }
+        }
+        return new Node.Members(Place.NONE, fields);
     }
 
     /** Names of all fields of all variants, in order. */

@@ -80,7 +80,7 @@ final class TreeParser {
             case START_OBJECT -> members(place);
             case START_ARRAY -> elements(place);
             case VALUE_STRING -> new Node.Text(place, parser.getText());
-            case VALUE_NUMBER_INT, VALUE_NUMBER_FLOAT -> Node.Decimal.of(place, parser.getText());
+            case VALUE_NUMBER_INT, VALUE_NUMBER_FLOAT -> new Node.Decimal(place, Double.parseDouble(parser.getText()), parser.getText());
             case VALUE_TRUE, VALUE_FALSE -> new Node.Truth(place, token == JsonToken.VALUE_TRUE);
             case VALUE_NULL -> new Node.Nothing(place);
             default -> throw new IllegalStateException("no value starts with " + token);

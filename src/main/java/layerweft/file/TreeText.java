@@ -2,99 +2,124 @@ package layerweft.file;
 
 import com.fasterxml.jackson.core.io.JsonStringEncoder;
 import java.util.Iterator;
+import java.util.List;
 import java.util.Map;
 
-/** A file's values as JSON text: what fits stands on one line, the rest is broken, two spaces for each level. */
+/**
+ * JSON as people lay it out: two spaces for a level; the file's object, and its lists of objects, over several lines, of everything else what
+ * fits on one line; lists of plain values fill their lines.
+ */
 final class TreeText {
-    private static final int WIDTH = 120;
-    private static final String STEP = "  ";
-    private final StringBuilder text = new StringBuilder();
+    /** Characters of a value on one line, with what it is indented by. */
+    private static final int WIDTH = 112;
+    private static final int INDENT = 2;
+
+    private final StringBuilder out = new StringBuilder();
 
     private TreeText() {}
 
     static String of(Node.Members root) {
         TreeText text = new TreeText();
-        text.broken(root, "");
-        return text.text.append('\n').toString();
+        text.object(root, 0);
+        return text.out.append('\n').toString();
     }
 
-    /** @param behind characters that follow on the same line */
-    private void value(Node node, String indent, int column, int behind) {
-        String line = line(node);
-        boolean fits = line != null && column + line.length() + behind <= WIDTH;
-        if (fits || !(node instanceof Node.Members || node instanceof Node.Elements)) {
-            text.append(line);
-        } else {
-            broken(node, indent);
-        }
-    }
-
-    private void broken(Node node, String indent) {
-        boolean members = node instanceof Node.Members;
-        if (members && ((Node.Members) node).fields().isEmpty() || node instanceof Node.Elements list && list.items().isEmpty()) {
-            text.append(members ? "{}" : "[]");
+    private void value(Node node, int level) {
+        boolean rootList = level == 1 && node instanceof Node.Elements list && list.items().stream().anyMatch(Node.Members.class::isInstance);
+        int start = out.length();
+        if (!rootList && compact(node, start + WIDTH - level * INDENT)) {
             return;
         }
-        String inner = indent + STEP;
-        text.append(members ? "{\n" : "[\n");
+        out.setLength(start);
         if (node instanceof Node.Members object) {
-            for (Iterator<Map.Entry<String, Node.Member>> it = object.fields().entrySet().iterator(); it.hasNext();) {
-                Map.Entry<String, Node.Member> field = it.next();
-                String name = quoted(field.getKey()) + ": ";
-                text.append(inner).append(name);
-                value(field.getValue().value(), inner, inner.length() + name.length(), it.hasNext() ? 1 : 0);
-                text.append(it.hasNext() ? ",\n" : "\n");
-            }
-        } else if (node instanceof Node.Elements list) {
-            for (Iterator<Node> it = list.items().iterator(); it.hasNext();) {
-                text.append(inner);
-                value(it.next(), inner, inner.length(), it.hasNext() ? 1 : 0);
-                text.append(it.hasNext() ? ",\n" : "\n");
-            }
+            object(object, level);
+        } else if (node instanceof Node.Elements list && !list.items().isEmpty()) {
+            list(list.items(), level);
+        } else {
+            compact(node, Integer.MAX_VALUE);
         }
-        text.append(indent).append(members ? '}' : ']');
     }
 
-    /** On one line; null where that is surely too long. */
-    private static String line(Node node) {
-        StringBuilder line = new StringBuilder();
-        return line(node, line) ? line.toString() : null;
+    private void object(Node.Members object, int level) {
+        out.append('{');
+        for (Iterator<Map.Entry<String, Node.Member>> fields = object.fields().entrySet().iterator(); fields.hasNext();) {
+            Map.Entry<String, Node.Member> field = fields.next();
+            line(level + 1);
+            quoted(field.getKey());
+            out.append(": ");
+            value(field.getValue().value(), level + 1);
+            out.append(fields.hasNext() ? "," : "");
+        }
+        line(level);
+        out.append('}');
     }
 
-    private static boolean line(Node node, StringBuilder line) {
-        if (node instanceof Node.Text text) {
-            line.append(quoted(text.text()));
-        } else if (node instanceof Node.Decimal number) {
-            line.append(number.literal());
-        } else if (node instanceof Node.Truth truth) {
-            line.append(truth.value());
-        } else if (node instanceof Node.Nothing) {
-            line.append("null");
-        } else if (node instanceof Node.Elements list) {
-            line.append('[');
-            for (int k = 0; k < list.items().size(); k++) {
-                line.append(k > 0 ? ", " : "");
-                if (!line(list.items().get(k), line) || line.length() > WIDTH) {
-                    return false;
-                }
+    private void list(List<Node> items, int level) {
+        boolean plain = items.stream().noneMatch(item -> item instanceof Node.Members || item instanceof Node.Elements);
+        out.append('[');
+        int lineStart = Integer.MIN_VALUE / 2;
+        for (int k = 0; k < items.size(); k++) {
+            int before = out.length();
+            out.append(' ');
+            compact(items.get(k), Integer.MAX_VALUE);
+            if (!plain || out.length() - lineStart >= WIDTH) {
+                out.setLength(before);
+                line(level + 1);
+                lineStart = before + 1;
+                value(items.get(k), level + 1);
             }
-            line.append(']');
-        } else if (node instanceof Node.Members object) {
-            line.append('{');
-            boolean first = true;
+            out.append(k + 1 < items.size() ? "," : "");
+        }
+        line(level);
+        out.append(']');
+    }
+
+    /** All on one line; false if that reaches beyond the given length of the output. */
+    private boolean compact(Node node, int end) {
+        if (node instanceof Node.Members object) {
+            String separator = "{";
             for (Map.Entry<String, Node.Member> field : object.fields().entrySet()) {
-                line.append(first ? "" : ", ").append(quoted(field.getKey())).append(": ");
-                first = false;
-                if (!line(field.getValue().value(), line) || line.length() > WIDTH) {
+                out.append(separator);
+                quoted(field.getKey());
+                out.append(": ");
+                if (!compact(field.getValue().value(), end)) {
                     return false;
                 }
+                separator = ", ";
             }
-            line.append('}');
+            out.append(object.fields().isEmpty() ? "{}" : "}");
+        } else if (node instanceof Node.Elements list) {
+            String separator = "[";
+            for (Node item : list.items()) {
+                out.append(separator);
+                if (!compact(item, end)) {
+                    return false;
+                }
+                separator = ", ";
+            }
+            out.append(list.items().isEmpty() ? "[]" : "]");
+        } else if (node instanceof Node.Text text) {
+            quoted(text.text());
+        } else {
+            out.append(node instanceof Node.Decimal number ? number.written() : node.shown());
         }
-        return true;
+        return out.length() <= end;
     }
 
-    private static String quoted(String text) {
-        return '"' + String.valueOf(JsonStringEncoder.getInstance().quoteAsString(text)) + '"';
+    private void line(int level) {
+        out.append('\n').append(" ".repeat(level * INDENT));
+    }
+
+    private void quoted(String text) {
+        out.append('"');
+        int start = out.length();
+        JsonStringEncoder.getInstance().quoteAsString(text, out);
+        for (int i = start; i < out.length(); i += Character.charCount(out.codePointAt(i))) {
+            int c = out.codePointAt(i);
+            if (Character.getType(c) == Character.SURROGATE) { // unpaired: UTF-8 has no form for it
+                out.replace(i, i + 1, String.format("\\u%04X", c));
+            }
+        }
+        out.append('"');
     }
 }

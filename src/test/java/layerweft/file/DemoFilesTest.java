@@ -9,7 +9,6 @@ import java.io.IOException;
 import java.nio.file.Files;
 import java.nio.file.Path;
 import java.util.List;
-import java.util.stream.Stream;
 import layerweft.model.treaty.Layer;
 import layerweft.model.treaty.Treaty;
 import org.junit.jupiter.api.Test;
@@ -19,21 +18,15 @@ import org.junit.jupiter.params.provider.MethodSource;
 /** The demo files are valid, belong together and travel with the program. */
 class DemoFilesTest {
 
-    static List<String> treaties() throws IOException {
-        return files("treaties");
-    }
-
-    private static List<String> files(String folder) throws IOException {
-        try (Stream<Path> files = Files.list(Path.of(folder))) {
-            return files.map(f -> folder + "/" + f.getFileName()).filter(f -> f.endsWith(".json")).sorted().toList();
-        }
+    static List<String> treaties() {
+        return Examples.demoFiles("treaties");
     }
 
     @ParameterizedTest
     @MethodSource("treaties")
     void everyProgrammeFormsATreatyWithTheBookOfItsName(String programme) throws IOException {
         String name = programme.substring("treaties/".length());
-        List<String> books = files("demo-portfolios").stream()
+        List<String> books = Examples.demoFiles("demo-portfolios").stream()
                 .filter(p -> name.startsWith(p.substring("demo-portfolios/".length()).replace(".json", "-"))).toList();
         assertEquals(1, books.size(), "books for " + programme);
         assertTrue(TreatyReader.read(Path.of(books.get(0)), Path.of(programme)).layers() > 0);
@@ -51,7 +44,7 @@ class DemoFilesTest {
     void layersQuotePremiumsAndReadmesNameEveryFile() throws IOException {
         for (String folder : List.of("demo-portfolios", "treaties")) {
             String readme = Files.readString(Path.of(folder, "README.md"));
-            files(folder).forEach(f -> assertTrue(readme.contains("`" + f.substring(f.indexOf('/') + 1) + "`"), f));
+            Examples.demoFiles(folder).forEach(f -> assertTrue(readme.contains("`" + f.substring(f.indexOf('/') + 1) + "`"), f));
         }
         assertTrue(DemoFiles.treaty().programme().layers().stream().map(Layer::premium).anyMatch(p -> p != null));
     }

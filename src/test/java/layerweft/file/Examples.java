@@ -3,8 +3,13 @@ package layerweft.file;
 import static org.junit.jupiter.api.Assertions.assertThrows;
 import static org.junit.jupiter.api.Assertions.assertTrue;
 
+import java.io.IOException;
+import java.io.UncheckedIOException;
 import java.nio.charset.StandardCharsets;
+import java.nio.file.Files;
+import java.nio.file.Path;
 import java.util.List;
+import java.util.stream.Stream;
 
 /** Dull valid files, and the faults of what a test makes of them. */
 final class Examples {
@@ -45,6 +50,25 @@ final class Examples {
 
     static byte[] bytes(String text) {
         return text.getBytes(StandardCharsets.UTF_8);
+    }
+
+    /** The demo files of that folder of the source, as {@link DemoFiles} names them. */
+    static List<String> demoFiles(String folder) {
+        try (Stream<Path> files = Files.list(Path.of(folder))) {
+            return files.map(f -> folder + "/" + f.getFileName()).filter(f -> f.endsWith(".json")).sorted().toList();
+        } catch (IOException e) {
+            throw new UncheckedIOException(e);
+        }
+    }
+
+    /** All demo files. */
+    static List<String> demoFiles() {
+        return Stream.of("demo-portfolios", "treaties").flatMap(folder -> demoFiles(folder).stream()).toList();
+    }
+
+    /** A demo file as it is, for editing. */
+    static FileTree demo(String name) {
+        return FileTree.parse(name, new String(DemoFiles.bytes(name), StandardCharsets.UTF_8));
     }
 
     /** The text with one piece changed, which must be there once. */

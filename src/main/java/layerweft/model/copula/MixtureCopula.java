@@ -13,6 +13,7 @@ import layerweft.model.InadmissibleException;
  * @param components as many; mixtures may hold mixtures
  */
 public record MixtureCopula(List<Double> weights, List<Copula> components) implements Copula {
+    private static final double ROUNDING = 8 * Math.ulp(1.0);
 
     public MixtureCopula {
         Check check = new Check();
@@ -26,7 +27,9 @@ public record MixtureCopula(List<Double> weights, List<Copula> components) imple
             check.that(Math.abs(sum - 1) <= 1e-9, "mixture", "weights with the sum " + sum, "weights with the sum 1");
         }
         check.orThrow();
-        weights = weights.stream().map(w -> w / sum).toList();
+        // weights with the sum 1 to rounding stay digit by digit as they are, so that scaling twice is scaling once
+        double scale = Math.abs(sum - 1) <= ROUNDING ? 1 : sum;
+        weights = weights.stream().map(w -> w / scale).toList();
         components = List.copyOf(components);
     }
 

@@ -1,14 +1,13 @@
-package layerweft.command;
+package layerweft.figures;
 
-import layerweft.figures.FigureText;
 import layerweft.model.treaty.Loading;
 
 /** The loading principles in words. */
-final class Loadings {
+public final class Loadings {
 
     private Loadings() {}
 
-    static String inWords(Loading loading) {
+    public static String inWords(Loading loading) {
         if (loading instanceof Loading.StandardDeviation sd) {
             return "loading " + FigureText.plain(sd.factor()) + " × standard deviation";
         }

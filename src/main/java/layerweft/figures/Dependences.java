@@ -1,18 +1,16 @@
-package layerweft.command;
+package layerweft.figures;
 
-import layerweft.figures.Figure;
-import layerweft.figures.FigureText;
 import layerweft.model.copula.Copula;
 import layerweft.model.copula.Independence;
 import layerweft.model.portfolio.Dependence;
 import layerweft.model.portfolio.Portfolio;
 
 /** The dependence of a portfolio in words. */
-final class Dependences {
+public final class Dependences {
 
     private Dependences() {}
 
-    static String inWords(Portfolio portfolio) {
+    public static String inWords(Portfolio portfolio) {
         Copula copula = portfolio.dependence().copula();
         int perils = portfolio.perils().size();
         if (perils == 1) {

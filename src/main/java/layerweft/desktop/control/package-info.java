@@ -1,0 +1,2 @@
+/** Controls of the window that know nothing of treaties: fields, switches, figures, panels. */
+package layerweft.desktop.control;

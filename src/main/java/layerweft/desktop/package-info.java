@@ -1,0 +1,2 @@
+/** The window: frame, rail, strip, rooms and commands. */
+package layerweft.desktop;
