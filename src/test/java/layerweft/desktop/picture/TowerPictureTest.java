@@ -21,7 +21,6 @@ import org.junit.jupiter.api.extension.ExtendWith;
 import org.testfx.api.FxRobot;
 import org.testfx.framework.junit5.ApplicationExtension;
 import org.testfx.framework.junit5.Start;
-import org.testfx.robot.Motion;
 import org.testfx.util.WaitForAsyncUtils;
 
 /** A real hand and real keys on a tower of 884 × 600, where the layout says that things are. */
@@ -50,11 +49,12 @@ class TowerPictureTest {
     }
 
     private void press(FxRobot hand, double x, double y) {
-        hand.moveTo(at(x, y), Motion.TELEPORT).press(MouseButton.PRIMARY);
+        dragTo(hand, x, y);
+        hand.press(MouseButton.PRIMARY);
     }
 
     private void dragTo(FxRobot hand, double x, double y) {
-        hand.moveTo(at(x, y), Motion.TELEPORT);
+        hand.robotContext().getBaseRobot().moveMouse(at(x, y));
         WaitForAsyncUtils.waitForFxEvents();
     }
 
