@@ -28,6 +28,7 @@ import layerweft.desktop.session.LiftCurves;
 import layerweft.desktop.session.Session;
 import layerweft.desktop.session.TauState;
 import layerweft.desktop.theme.Theme;
+import layerweft.engine.simulation.SimulationSettings;
 
 /** The program's window with all its habits: what it remembers, what it asks before it closes, what it keeps in case of a crash. */
 public final class DesktopWindow {
@@ -54,18 +55,23 @@ public final class DesktopWindow {
 
     /** @param folder of preferences and recovery copies */
     public DesktopWindow(Stage stage, Path folder, Background background) {
-        this(stage, folder, background, null);
+        this(stage, folder, background, SimulationSettings.usual(), null);
     }
 
-    /** With other dialogs than the window's own: for tests. */
-    DesktopWindow(Stage stage, Path folder, Background background, Dialogs given) {
+    /**
+     * With parts of its own.
+     *
+     * @param longRun the simulation that is run behind each treaty
+     * @param given the dialogs; null for those of the window
+     */
+    DesktopWindow(Stage stage, Path folder, Background background, SimulationSettings longRun, Dialogs given) {
         this.stage = stage;
         preferences = new Preferences(folder);
         first = preferences.first();
         recovery = new Recovery(folder);
         theme.dark().set(Boolean.parseBoolean(preferences.get("dark", "false")));
         theme.textPercent().set((int) Math.max(Theme.SMALLEST_TEXT, Math.min(Theme.LARGEST_TEXT, preferences.number("text", 100))));
-        session = new Session(Document.demo(), background);
+        session = new Session(Document.demo(), background, longRun);
         session.dark().bindBidirectional(theme.dark());
         dialogs = given == null ? new WindowDialogs(stage, theme) : given;
         files = new DocumentFiles(session, dialogs, preferences);

@@ -2,6 +2,11 @@ package layerweft.desktop;
 
 import java.util.List;
 import java.util.function.Function;
+import layerweft.desktop.dependence.DependenceRoom;
+import layerweft.desktop.perils.PerilsRoom;
+import layerweft.desktop.programme.ProgrammeRoom;
+import layerweft.desktop.quote.QuoteRoom;
+import layerweft.desktop.sensitivity.SensitivityRoom;
 import layerweft.desktop.theme.Icons;
 
 /** The rooms, in the order of the rail: one line each. */
@@ -32,11 +37,11 @@ public final class Rooms {
 
     public static List<Place> all() {
         return List.of(
-                Place.of("Perils", Icons.PERILS, tools -> new EmptyRoom("Perils")),
-                Place.of("Dependence", Icons.DEPENDENCE, tools -> new EmptyRoom("Dependence")),
-                Place.of("Programme", Icons.PROGRAMME, tools -> new EmptyRoom("Programme")),
-                Place.of("Quote", Icons.QUOTE, tools -> new EmptyRoom("Quote")),
-                Place.of("Sensitivity", Icons.SENSITIVITY, tools -> new EmptyRoom("Sensitivity")),
+                Place.of("Perils", Icons.PERILS, PerilsRoom::new),
+                Place.of("Dependence", Icons.DEPENDENCE, DependenceRoom::new),
+                Place.of("Programme", Icons.PROGRAMME, ProgrammeRoom::new),
+                Place.of("Quote", Icons.QUOTE, QuoteRoom::new),
+                Place.of("Sensitivity", Icons.SENSITIVITY, SensitivityRoom::new),
                 Place.later("Structures", Icons.STRUCTURES, "comes with the comparison of programmes"),
                 Place.later("Evidence", Icons.EVIDENCE, "comes with the fitting of loss histories"));
     }

@@ -7,6 +7,8 @@ import java.nio.file.Files;
 import java.nio.file.Path;
 import java.util.List;
 import java.util.Locale;
+import java.util.Map;
+import java.util.concurrent.Callable;
 import java.util.concurrent.CountDownLatch;
 import java.util.concurrent.ExecutionException;
 import java.util.concurrent.FutureTask;
@@ -17,6 +19,7 @@ import javafx.stage.Stage;
 import javax.imageio.ImageIO;
 import layerweft.desktop.session.Background;
 import layerweft.desktop.session.Document;
+import layerweft.desktop.session.LayerEdit;
 import layerweft.desktop.session.Session;
 
 /**
@@ -43,12 +46,27 @@ final class Screenshots {
         CountDownLatch started = new CountDownLatch(1);
         Platform.startup(started::countDown);
         started.await();
+        DesktopWindow last = null;
+        for (int[] size : SIZES) {
+            last = rooms(size[0], size[1], rooms, folder);
+        }
+        variants(last, folder);
+        System.exit(0);
+    }
+
+    /** A new window for each size: one that is resized in memory may be drawn in a buffer that is too small. */
+    private static DesktopWindow open(int width, int height) throws Exception {
         Path preferences = Files.createTempDirectory("layerweft-screenshots");
-        DesktopWindow window = onWindow(() -> {
+        Files.writeString(preferences.resolve("window.properties"), "width=" + width + "\nheight=" + height + "\n");
+        return onWindow(() -> {
             DesktopWindow made = new DesktopWindow(new Stage(), preferences, Background.ofWindow());
             made.show();
             return made;
         });
+    }
+
+    private static DesktopWindow rooms(int width, int height, List<String> rooms, Path folder) throws Exception {
+        DesktopWindow window = open(width, height);
         Session session = window.session();
         settle(session);
         onWindow(() -> {
@@ -62,24 +80,19 @@ final class Screenshots {
             return null;
         });
         settle(session);
-        for (int[] size : SIZES) {
-            for (boolean dark : new boolean[] {false, true}) {
-                for (String room : rooms) {
-                    onWindow(() -> {
-                        window.theme().dark().set(dark);
-                        window.frame().getScene().getWindow().setWidth(size[0]);
-                        window.frame().getScene().getWindow().setHeight(size[1]);
-                        window.frame().goTo(room);
-                        return null;
-                    });
-                    settle(session);
-                    Thread.sleep(400);
-                    picture(window, folder.resolve(String.format(Locale.ROOT, "%s-%d-%s.png", room.toLowerCase(Locale.ROOT), size[0], dark ? "dark" : "light")));
-                }
+        for (boolean dark : new boolean[] {false, true}) {
+            for (String room : rooms) {
+                onWindow(() -> {
+                    window.theme().dark().set(dark);
+                    window.frame().goTo(room);
+                    return null;
+                });
+                settle(session);
+                Thread.sleep(400);
+                picture(window, folder.resolve(String.format(Locale.ROOT, "%s-%d-%s.png", room.toLowerCase(Locale.ROOT), width, dark ? "dark" : "light")));
             }
         }
-        variants(window, folder);
-        System.exit(0);
+        return window;
     }
 
     /** States of the strip that the rooms do not show: many layers, pairs that differ, faults, large text. */
@@ -88,15 +101,13 @@ final class Screenshots {
         Document demo = Document.demo();
         variant(window, folder, "strip-twelve-layers", () -> {
             window.theme().dark().set(false);
-            window.frame().getScene().getWindow().setWidth(1440);
-            window.frame().getScene().getWindow().setHeight(900);
             for (int k = 0; k < 9; k++) {
-                session.edit("copy", d -> d.withProgramme(p -> layerweft.desktop.session.LayerEdit.duplicated(p, 2)));
+                session.edit("copy", d -> d.withProgramme(p -> LayerEdit.duplicated(p, 2)));
             }
         });
         variant(window, folder, "strip-matrix", () -> {
             session.open(demo);
-            session.edit("matrix", d -> d.withPortfolio(p -> p.set("dependence.copula", java.util.Map.of("family", "gaussian", "correlation",
+            session.edit("matrix", d -> d.withPortfolio(p -> p.set("dependence.copula", Map.of("family", "gaussian", "correlation",
                     List.of(List.of(1.0, 0.6, 0.2), List.of(0.6, 1.0, 0.4), List.of(0.2, 0.4, 1.0))))));
         });
         variant(window, folder, "strip-independent", () -> {
@@ -106,19 +117,15 @@ final class Screenshots {
         variant(window, folder, "strip-two-perils-negative", () -> {
             session.open(demo);
             session.edit("two perils", d -> d.withPortfolio(p -> p.remove("perils[2]").set("dependence.copula",
-                    java.util.Map.of("family", "frank", "kendallTau", -0.25))).withProgramme(p -> p.remove("layers[2].perils")));
+                    Map.of("family", "frank", "kendallTau", -0.25))).withProgramme(p -> p.remove("layers[2].perils")));
         });
-        variant(window, folder, "strip-fault", () -> {
-            session.open(demo);
-        });
+        variant(window, folder, "strip-demo", () -> session.open(demo));
         variant(window, folder, "strip-fault", () -> session.edit("limit", d -> d.withProgramme(p -> p.set("layers[0].occurrence.limit", -5))));
         variant(window, folder, "strip-inuring", () -> session.open(new Document(Document.demo("demo-portfolios/harrow-coast.json"),
                 Document.demo("treaties/harrow-coast-inuring.json"), null, null)));
         variant(window, folder, "strip-large-text", () -> {
             session.open(demo);
             window.theme().textPercent().set(130);
-            window.frame().getScene().getWindow().setWidth(1920);
-            window.frame().getScene().getWindow().setHeight(1080);
         });
     }
 
@@ -149,7 +156,7 @@ final class Screenshots {
         }
     }
 
-    private static <T> T onWindow(java.util.concurrent.Callable<T> what) throws InterruptedException, ExecutionException {
+    private static <T> T onWindow(Callable<T> what) throws InterruptedException, ExecutionException {
         FutureTask<T> task = new FutureTask<>(what);
         Platform.runLater(task);
         return task.get();

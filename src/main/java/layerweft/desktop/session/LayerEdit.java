@@ -46,6 +46,18 @@ public final class LayerEdit {
         return copied.set(path(place + 1) + ".name", name);
     }
 
+    /** With another name of the layer at a place, also where others name it. */
+    public static FileTree renamed(FileTree programme, int place, String name) {
+        String old = programme.text(path(place) + ".name");
+        FileTree changed = programme.set(path(place) + ".name", name);
+        for (int j = 0; j < count(changed); j++) {
+            if (changed.get(path(j) + ".inuring") instanceof List<?> names && names.contains(old)) {
+                changed = changed.set(path(j) + ".inuring", names.stream().map(n -> n.equals(old) ? name : n).toList());
+            }
+        }
+        return changed;
+    }
+
     /** Without the layer at a place. */
     public static FileTree removed(FileTree programme, int place) {
         String name = programme.text(path(place) + ".name");

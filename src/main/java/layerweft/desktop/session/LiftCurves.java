@@ -45,6 +45,18 @@ public record LiftCurves(Treaty treaty, List<Double> taus, List<Curve> layers, b
             return base > 0 && base < Double.POSITIVE_INFINITY ? of.expectedLoss().value() / base - 1 : Double.NaN;
         }
 
+        /** The lift at any τ on the curve, by the straight line between its neighbours; NaN beyond the curve's ends. */
+        double liftAt(List<Double> taus, double tau) {
+            List<Double> lifts = lifts();
+            for (int k = 1; k < taus.size(); k++) {
+                if (tau >= taus.get(k - 1) - 1e-9 && tau <= taus.get(k) + 1e-9) {
+                    double part = (tau - taus.get(k - 1)) / (taus.get(k) - taus.get(k - 1));
+                    return (1 - part) * lifts.get(k - 1) + part * lifts.get(k);
+                }
+            }
+            return Double.NaN;
+        }
+
         /** The lift at each τ. */
         public List<Double> lifts() {
             return figures.stream().map(this::lift).toList();

@@ -25,6 +25,7 @@ final class Pricing {
     private static final Duration REST_OF_LONG_RUN = Duration.ofMillis(700);
 
     private final Background background;
+    private final SimulationSettings longRunSettings;
     private final ReadOnlyObjectWrapper<LivePrices> prices = new ReadOnlyObjectWrapper<>();
     private final ReadOnlyObjectWrapper<LiftCurves> curves = new ReadOnlyObjectWrapper<>();
     private final ReadOnlyObjectWrapper<Task> pricingTask = new ReadOnlyObjectWrapper<>();
@@ -35,8 +36,9 @@ final class Pricing {
     private int opened;
     private boolean faulty;
 
-    Pricing(Background background) {
+    Pricing(Background background, SimulationSettings longRunSettings) {
         this.background = background;
+        this.longRunSettings = longRunSettings;
     }
 
     ReadOnlyObjectProperty<LivePrices> prices() {
@@ -107,7 +109,7 @@ final class Pricing {
 
     private void longRun(Treaty treaty) {
         longRun.set(background.runAfter(REST_OF_LONG_RUN, LONG_RUN,
-                control -> Quote.of(treaty, EngineChoice.AUTO, SimulationSettings.usual(), control), quote -> {
+                control -> Quote.of(treaty, EngineChoice.AUTO, longRunSettings, control), quote -> {
             if (prices.get() != null && prices.get().treaty() == quote.treaty()) {
                 prices.set(prices.get().confirmed(quote));
             }

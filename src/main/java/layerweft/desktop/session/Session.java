@@ -17,6 +17,7 @@ import javafx.beans.property.SimpleIntegerProperty;
 import javafx.beans.property.SimpleObjectProperty;
 import javafx.collections.FXCollections;
 import javafx.collections.ObservableList;
+import layerweft.engine.simulation.SimulationSettings;
 import layerweft.file.Fault;
 import layerweft.file.FileTree;
 import layerweft.file.TreatyCheck;
@@ -51,8 +52,13 @@ public final class Session {
     private Document valid;
 
     public Session(Document first, Background background) {
+        this(first, background, SimulationSettings.usual());
+    }
+
+    /** @param longRun the simulation that is run behind each treaty once the hand rests */
+    public Session(Document first, Background background, SimulationSettings longRun) {
         this.background = background;
-        this.pricing = new Pricing(background);
+        this.pricing = new Pricing(background, longRun);
         open(first);
     }
 

@@ -35,7 +35,7 @@ public record StripCell(
     public static List<StripCell> of(LivePrices prices, LiftCurves curves, Pin pin) {
         List<StripCell> cells = new ArrayList<>();
         for (int j = 0; j < prices.live().size(); j++) {
-            cells.add(of(prices.treaty(), prices.live().get(j), curve(curves, j, prices), curves, pin));
+            cells.add(of(prices.treaty(), prices.tau().tau(), prices.live().get(j), curve(curves, j, prices), curves, pin));
         }
         return cells;
     }
@@ -45,14 +45,16 @@ public record StripCell(
         return curves != null && curves.current() && curves.layers().size() == prices.live().size() ? curves.layers().get(j) : null;
     }
 
-    private static StripCell of(Treaty treaty, LiveLayer live, LiftCurves.Curve curve, LiftCurves curves, Pin pin) {
+    private static StripCell of(Treaty treaty, double tau, LiveLayer live, LiftCurves.Curve curve, LiftCurves curves, Pin pin) {
         LayerFigures figures = live.figures();
         FigureShown shown = FigureShown.percent(figures.lossOnLine());
         Optional<LayerFigures> pinned = pin == null ? Optional.empty() : pin.layer(figures.name());
         String change = pinned.map(base -> shown.change(100 * (figures.lossOnLine().value() - base.lossOnLine().value()))).orElse("");
-        double lift = curve == null ? Double.NaN : curve.lift(figures);
+        // a short simulation drew the curve: a mark from a longer one would stand beside it
+        boolean simulated = figures.engine() == Engine.SIMULATION;
+        double lift = curve == null ? Double.NaN : simulated ? curve.liftAt(curves.taus(), tau) : curve.lift(figures);
         double pinnedLift = curve == null || pinned.isEmpty() ? Double.NaN : curve.lift(pinned.get());
-        return new StripCell(figures.name(), shown, figures.engine() == Engine.SIMULATION, change, live.unmoved(), lift, pinnedLift,
+        return new StripCell(figures.name(), shown, simulated, change, live.unmoved(), lift, pinnedLift,
                 pin == null ? Double.NaN : pin.tau().tau(), curve == null ? List.of() : curves.taus(), curve == null ? List.of() : curve.lifts(),
                 hover(treaty, live));
     }

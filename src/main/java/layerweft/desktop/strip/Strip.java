@@ -14,6 +14,7 @@ import javafx.scene.input.MouseEvent;
 import javafx.scene.input.ScrollEvent;
 import javafx.scene.layout.Region;
 import javafx.util.Duration;
+import layerweft.desktop.session.FigureShown;
 import layerweft.desktop.session.LiftCurves;
 import layerweft.desktop.session.LivePrices;
 import layerweft.desktop.session.Session;
@@ -181,7 +182,7 @@ public final class Strip extends Region {
     }
 
     private static String refiningWords(LivePrices prices, int j, Task longRun) {
-        String error = StripCell.of(prices, null, null).get(j).figure().error();
+        String error = FigureShown.percent(prices.layers().get(j).lossOnLine()).error();
         double left = longRun.secondsLeft().get();
         String time = Double.isNaN(left) ? "" : String.format(Locale.ROOT, ", %d:%02d left", (int) left / 60, (int) Math.ceil(left) % 60);
         return error + ", refining" + time;

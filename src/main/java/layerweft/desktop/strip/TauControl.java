@@ -154,7 +154,7 @@ public final class TauControl extends VBox {
         boolean turns = now != null && now.turns();
         track.setDisable(!turns);
         family.setDisable(!turns);
-        value.setText(turns ? TauText.of(now.tau()) : "—");
+        value.setText(!turns ? "—" : now.kind() == Kind.PAIRS ? TauText.rounded(now.tau()) : TauText.of(now.tau()));
         track.setAccessibleText("Kendall's τ " + value.getText());
         family.setText(now == null ? "" : now.copula());
         family.setTooltip(new Tooltip(turns ? now.copula() + ": [ and ] step through the families" : "one peril: no copula"));

@@ -7,6 +7,11 @@ final class TauText {
 
     private TauText() {}
 
+    /** Two decimals. */
+    static String rounded(double tau) {
+        return of(Math.rint(tau * 100) / 100);
+    }
+
     /** Two decimals, three where the third is not 0; a true minus. */
     static String of(double tau) {
         double thousandths = Math.rint(tau * 1000);

@@ -26,6 +26,7 @@ final class TauTrack extends Region {
     private final Line dataLow = new Line();
     private final Line dataHigh = new Line();
     private final Line track = new Line();
+    private final Line hollow = new Line();
     private final Line filled = new Line();
     private final Line pinMark = new Line();
     private final List<Line> ticks = new ArrayList<>();
@@ -47,6 +48,7 @@ final class TauTrack extends Region {
         dataLow.getStyleClass().add("lw-tau-data-edge");
         dataHigh.getStyleClass().add("lw-tau-data-edge");
         track.getStyleClass().add("lw-tau-line");
+        hollow.getStyleClass().add("lw-tau-hollow");
         filled.getStyleClass().add("lw-tau-filled");
         pinMark.getStyleClass().add("lw-tau-pin");
         ring.getStyleClass().add("lw-tau-ring");
@@ -58,7 +60,7 @@ final class TauTrack extends Region {
             ticks.add(tick);
             getChildren().add(tick);
         }
-        getChildren().addAll(track, filled, pinMark, bar, ring);
+        getChildren().addAll(track, hollow, filled, pinMark, bar, ring);
         for (Text text : List.of(left, zero, right)) {
             text.getStyleClass().add("lw-mark-text");
             getChildren().add(text);
@@ -106,9 +108,11 @@ final class TauTrack extends Region {
             tick.setVisible(tau >= low() - 1e-9);
             vertical(tick, x(tau), y + theme.px(6), y + theme.px(10));
         }
-        boolean hollow = !turns || state.kind() == Kind.INDEPENDENT;
+        boolean independent = !turns || state.kind() == Kind.INDEPENDENT;
+        hollow.setVisible(independent);
+        horizontal(hollow, x(low()), x(1), y);
         boolean pairs = turns && state.kind() == Kind.PAIRS;
-        filled.setVisible(!hollow && !pairs);
+        filled.setVisible(!independent && !pairs);
         horizontal(filled, x(0), turns ? x(state.tau()) : x(0), y);
         ring.setVisible(turns && !pairs);
         ring.setCenterX(turns ? x(state.tau()) : 0);
@@ -174,7 +178,7 @@ final class TauTrack extends Region {
         return switch (state.kind()) {
             case ONE_PERIL -> "one peril: no copula";
             case INDEPENDENT -> "independent";
-            case PAIRS -> "pairs " + TauText.of(state.lowestPair()) + "–" + TauText.of(state.highestPair());
+            case PAIRS -> "pairs " + TauText.rounded(state.lowestPair()) + "–" + TauText.rounded(state.highestPair());
             case FIXED, ONE_TAU -> range == null ? "" : "data " + TauText.of(range.low()) + "–" + TauText.of(range.high());
         };
     }

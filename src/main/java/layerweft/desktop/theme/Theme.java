@@ -85,7 +85,12 @@ public final class Theme {
 
     private void dressNow(Scene scene) {
         scene.setUserAgentStylesheet(dark.get() ? new PrimerDark().getUserAgentStylesheet() : new PrimerLight().getUserAgentStylesheet());
-        scene.getStylesheets().setAll(inline(text(dark.get() ? "dark.css" : "light.css")), inline(scaled(text("layerweft.css"))));
+        scene.getStylesheets().setAll(inline(text(dark.get() ? "dark.css" : "light.css")), inline(scaled(text("layerweft.css")) + scaled(text("rooms.css")) + icons()));
+    }
+
+    /** Outlines have no lengths that a stylesheet could scale. */
+    private String icons() {
+        return String.format(Locale.ROOT, ".lw-icon { -fx-scale-x: %.2f; -fx-scale-y: %.2f; }%n", scale.get(), scale.get());
     }
 
     private String scaled(String css) {

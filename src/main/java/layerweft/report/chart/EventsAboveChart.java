@@ -55,7 +55,7 @@ public record EventsAboveChart(List<Peril> perils, int chosen, double from, doub
         XYPlot plot = Axes.plot(x, y, palette);
         plot.setBackgroundPaint(palette.surface());
         ChartRenderingInfo info = new ChartRenderingInfo();
-        Axes.chart(plot, new RectangleInsets(20, 0, 0, 6), palette.surface()).draw(g, area, info);
+        Axes.chart(plot, new RectangleInsets(20, 0, 0, 20), palette.surface()).draw(g, area, info);
         Rectangle2D data = info.getPlotInfo().getDataArea();
         Marks.right(g, "events a year above", area.getMaxX() - 6, area.getY() + 8, ChartFonts.regular(Axes.LABEL), palette.ink2());
         Shape clip = g.getClip();
