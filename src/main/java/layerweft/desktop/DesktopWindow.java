@@ -113,7 +113,7 @@ public final class DesktopWindow {
         stage.titleProperty().bind(session.document().map(document -> document.name() + " – Layerweft"));
         stage.setMaximized(Boolean.parseBoolean(preferences.get("maximized", "false")));
         stage.setOnCloseRequest(this::closing);
-        frame.goTo(preferences.get("room", Rooms.FIRST));
+        frame.open(preferences.get("room", Rooms.FIRST));
         stage.show();
         if (first) {
             welcome();
@@ -136,8 +136,10 @@ public final class DesktopWindow {
         session.tau().addListener(new ChangeListener<>() {
             @Override
             public void changed(ObservableValue<? extends TauState> is, TauState was, TauState now) {
-                session.tau().removeListener(this);
-                frame.hint().set("");
+                if (was != null && now != null) { // turned, not another document
+                    session.tau().removeListener(this);
+                    frame.hint().set("");
+                }
             }
         });
     }
@@ -187,7 +189,8 @@ public final class DesktopWindow {
 
     /** Keys without Ctrl belong to whoever is being typed into, and to the window otherwise. */
     private void plainKey(KeyEvent event, String typed) {
-        if (stage.getScene().getFocusOwner() instanceof TextInputControl || event.isShortcutDown() || event.isAltDown()) {
+        boolean chord = typed.isEmpty() && (event.isShortcutDown() || event.isAltDown()); // a sign may itself need Alt on a keyboard
+        if (stage.getScene().getFocusOwner() instanceof TextInputControl || chord) {
             return;
         }
         Command command = commands.ofPlainKey(typed, event.getCode());

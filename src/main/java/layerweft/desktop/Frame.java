@@ -61,6 +61,8 @@ public final class Frame extends Region {
         notice.textProperty().bind(hint);
         notice.visibleProperty().bind(hint.isNotEmpty());
         hint.addListener((is, was, now) -> requestLayout());
+        session.background().failed().addListener((is, was, now) -> hint.set(now.name() + " failed: " + now.failure().getMessage()
+                + ". This is a fault of the program, not of your file."));
         // in the order in which the keyboard goes through them
         getChildren().addAll(title, area, notice, strip, rail, header);
         theme.scale().addListener((is, was, now) -> requestLayout());
@@ -70,6 +72,14 @@ public final class Frame extends Region {
         List<Command> all = new ArrayList<>(room.get() == null ? List.of() : room.get().commands());
         all.addAll(commands.all());
         return all;
+    }
+
+    /** Shows the room of a name, the first start's where that cannot be entered. */
+    void open(String name) {
+        goTo(name);
+        if (room.get() == null) {
+            goTo(Rooms.FIRST);
+        }
     }
 
     /** Shows the room of a name; nothing happens where there is none, or it cannot be entered. */

@@ -14,13 +14,24 @@ import java.util.concurrent.ExecutionException;
 import java.util.concurrent.FutureTask;
 import javafx.application.Platform;
 import javafx.embed.swing.SwingFXUtils;
+import javafx.geometry.Insets;
+import javafx.scene.Scene;
 import javafx.scene.image.WritableImage;
+import javafx.scene.layout.HBox;
+import javafx.scene.layout.StackPane;
+import javafx.scene.layout.VBox;
 import javafx.stage.Stage;
 import javax.imageio.ImageIO;
+import layerweft.desktop.control.AmountField;
+import layerweft.desktop.control.AmountText;
+import layerweft.desktop.control.FigureLabel;
+import layerweft.desktop.control.Panel;
+import layerweft.desktop.control.SegmentedSwitch;
 import layerweft.desktop.session.Background;
 import layerweft.desktop.session.Document;
 import layerweft.desktop.session.LayerEdit;
 import layerweft.desktop.session.Session;
+import layerweft.desktop.theme.Theme;
 
 /**
  * Draws the window in memory, every room, light and dark, in three sizes, and writes the pictures to a folder:
@@ -51,6 +62,11 @@ final class Screenshots {
             last = rooms(size[0], size[1], rooms, folder);
         }
         variants(last, folder);
+        DesktopWindow least = open(1180, 720);
+        settle(least.session());
+        picture(least, folder.resolve("least-window.png"));
+        controls(folder, false);
+        controls(folder, true);
         System.exit(0);
     }
 
@@ -127,6 +143,41 @@ final class Screenshots {
             session.open(demo);
             window.theme().textPercent().set(130);
         });
+    }
+
+    /** Fields, switches and figures in all their states. */
+    private static void controls(Path folder, boolean dark) throws Exception {
+        WritableImage image = onWindow(() -> {
+            AmountField changed = new AmountField("Changed since pin", AmountText.Kind.AMOUNT, "million");
+            changed.value().set(35.0);
+            changed.changedFrom().set("30");
+            AmountField missing = new AmountField("Not available here", AmountText.Kind.AMOUNT, "million");
+            missing.reason().set("needs an occurrence limit");
+            AmountField wrong = new AmountField("Limit", AmountText.Kind.AMOUNT, "million");
+            wrong.value().set(-5.0);
+            wrong.fault().set("Limit must be more than 0. The last valid limit, 30, still prices the layer.");
+            AmountField part = new AmountField("Share", AmountText.Kind.PART, "million");
+            part.value().set(0.85);
+            AmountField blank = new AmountField("Annual limit", AmountText.Kind.AMOUNT, "million").orBlank("no limit");
+            FigureLabel figure = new FigureLabel("lw-figure-26");
+            figure.show("14.87", "%", "± 0.03, 1,000,000 years");
+            FigureLabel old = new FigureLabel("lw-figure-26");
+            old.show("26.24", "%", "last valid");
+            old.lastValid().set(true);
+            SegmentedSwitch<String> segments = new SegmentedSwitch<>(List.of("Families", "All dependence"), name -> name);
+            Panel panel = new Panel("A panel", new VBox(12, new HBox(16, changed, missing, part, blank), wrong, new HBox(40, figure, old)))
+                    .withControls(segments);
+            panel.note().set("EUR million");
+            StackPane ground = new StackPane(panel);
+            ground.getStyleClass().add("lw-frame");
+            ground.setPadding(new Insets(20));
+            Scene scene = new Scene(ground, 820, 330);
+            Theme theme = new Theme();
+            theme.dark().set(dark);
+            theme.dress(scene);
+            return scene.snapshot(null);
+        });
+        ImageIO.write(SwingFXUtils.fromFXImage(image, null), "png", folder.resolve(dark ? "controls-dark.png" : "controls-light.png").toFile());
     }
 
     private static void variant(DesktopWindow window, Path folder, String name, Runnable set) throws Exception {

@@ -46,6 +46,8 @@ public final class CommandField extends StackPane {
         found.setFixedCellSize(ROW);
         found.setPrefWidth(LIST_WIDTH);
         found.setOnMouseClicked(clicked -> run());
+        // keys go to the field, which moves the choice
+        found.setFocusTraversable(false);
         popup.getContent().add(found);
         popup.setAutoHide(true);
         field.textProperty().addListener((is, was, now) -> look());
@@ -126,7 +128,6 @@ public final class CommandField extends StackPane {
     }
 
     private void close() {
-        popup.hide();
         field.clear();
         popup.hide();
     }

@@ -187,6 +187,8 @@ public final class AmountField extends VBox {
         String wrong = !typing.isEmpty() ? "Type " + typing + ". " + stillPrices() : fault.get();
         boolean invalid = available && !wrong.isEmpty();
         field.setDisable(!available);
+        sign.setVisible(available);
+        field.setPromptText(available ? blank : "—");
         pseudoClassStateChanged(INVALID, invalid);
         warning.setVisible(invalid);
         warning.setManaged(invalid);

@@ -3,11 +3,14 @@ package layerweft.desktop.session;
 import java.time.Duration;
 import java.util.HashMap;
 import java.util.Map;
+import java.util.Set;
 import java.util.concurrent.Executor;
 import java.util.concurrent.Executors;
 import java.util.function.Consumer;
 import java.util.function.Function;
 import javafx.application.Platform;
+import javafx.beans.property.ReadOnlyObjectProperty;
+import javafx.beans.property.ReadOnlyObjectWrapper;
 import javafx.collections.FXCollections;
 import javafx.collections.ObservableList;
 import layerweft.engine.RunControl;
@@ -21,6 +24,7 @@ public final class Background {
     private final Function<String, Executor> lanes;
     private final Map<String, Task> newest = new HashMap<>();
     private final ObservableList<Task> running = FXCollections.observableArrayList();
+    private final ReadOnlyObjectWrapper<Task> failed = new ReadOnlyObjectWrapper<>();
 
     private Background(Executor publish, Function<String, Executor> lanes) {
         this.publish = publish;
@@ -41,6 +45,11 @@ public final class Background {
     /** Everything on the calling thread and at once: for tests, and for programs without a window. */
     public static Background immediate() {
         return new Background(Runnable::run, name -> Runnable::run);
+    }
+
+    /** The same, but work of these names never begins. */
+    static Background immediateWithout(Set<String> names) {
+        return new Background(Runnable::run, name -> names.contains(name) ? work -> {} : Runnable::run);
     }
 
     private static Executor thread(String name) {
@@ -76,19 +85,25 @@ public final class Background {
      * its result, since otherwise nothing would be seen as long as the hand moves.
      *
      * @param patience how long, from its start, an older one may be at work once there is a newer one
+     * @param rest before it begins
      */
-    public <T> Task follow(String name, Duration patience, Function<RunControl, T> work, Consumer<T> onDone) {
+    public <T> Task follow(String name, Duration patience, Duration rest, Function<RunControl, T> work, Consumer<T> onDone) {
         Task older = newest.get(name);
         if (older != null) {
             older.supersede();
         }
-        return start(new Task(name, publish, Duration.ZERO, patience), work, onDone);
+        return start(new Task(name, publish, rest, patience), work, onDone);
     }
 
     private <T> Task start(Task task, Function<RunControl, T> work, Consumer<T> onDone) {
         newest.put(task.name(), task);
         running.add(task);
-        task.onEnd(() -> running.remove(task));
+        task.onEnd(() -> {
+            running.remove(task);
+            if (task.state().get() == Task.State.FAILED) {
+                failed.set(task);
+            }
+        });
         lanes.apply(task.name()).execute(task.job(work, onDone));
         return task;
     }
@@ -99,6 +114,11 @@ public final class Background {
         if (task != null) {
             task.stop();
         }
+    }
+
+    /** The last task that failed, for telling the user; null as long as none has. */
+    public ReadOnlyObjectProperty<Task> failed() {
+        return failed.getReadOnlyProperty();
     }
 
     /** What is waiting or at work, oldest first. */

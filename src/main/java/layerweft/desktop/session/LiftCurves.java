@@ -5,6 +5,7 @@ import java.util.List;
 import layerweft.engine.RunControl;
 import layerweft.figures.Figure;
 import layerweft.figures.LayerFigures;
+import layerweft.model.copula.Copula;
 import layerweft.model.copula.Independence;
 import layerweft.model.treaty.Treaty;
 import layerweft.study.DependenceStrength;
@@ -107,17 +108,20 @@ public record LiftCurves(Treaty treaty, List<Double> taus, List<Curve> layers, b
                 taus.add(tau);
             }
         }
-        LivePricing pricing = new LivePricing(treaty, LivePricing.shortRun());
-        List<LiveLayer> independent = pricing.with(new Independence()).price(control);
-        List<List<LiveLayer>> priced = new ArrayList<>();
-        for (double tau : taus) {
-            control.progress(priced.size(), taus.size());
-            priced.add(pricing.with(strength.at(tau)).price(control));
+        // the middle first: there the transform works hardest of those that tell it apart from independence
+        List<Copula> copulas = new ArrayList<>();
+        if (!taus.isEmpty()) {
+            copulas.add(strength.at(taus.get(taus.size() / 2)));
         }
+        copulas.add(new Independence());
+        taus.forEach(tau -> copulas.add(strength.at(tau)));
+        int before = copulas.size() - taus.size();
+        List<List<LiveLayer>> priced = new LivePricing(treaty, LivePricing.shortRun()).along(copulas, control);
         List<Curve> curves = new ArrayList<>();
         for (int j = 0; j < treaty.layers(); j++) {
             int layer = j;
-            curves.add(new Curve(independent.get(j).figures(), priced.stream().map(at -> at.get(layer).figures()).toList()));
+            curves.add(new Curve(priced.get(before - 1).get(j).figures(),
+                    priced.subList(before, priced.size()).stream().map(at -> at.get(layer).figures()).toList()));
         }
         return new LiftCurves(treaty, taus, curves, true);
     }

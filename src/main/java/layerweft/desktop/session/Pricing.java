@@ -16,10 +16,13 @@ import layerweft.study.Quote;
 /** Keeps prices, curves and the long run behind up with the newest treaty. */
 final class Pricing {
     static final String PRICES = "Pricing";
+    static final String FIRST_ANSWER = "First answer";
     static final String CURVES = "Curves against τ";
     static final String LONG_RUN = "Simulating the whole treaty";
     /** An older pricing may go on beside a newer treaty for so long: a hand that moves must see answers on the way. */
     private static final Duration PATIENCE = Duration.ofMillis(400);
+    /** Where exact prices take longer, a rough answer comes first. */
+    private static final Duration LONGEST_WAIT = Duration.ofMillis(150);
     /** The hand must rest for so long before curves and long runs are begun. */
     private static final Duration REST_OF_CURVES = Duration.ofMillis(150);
     private static final Duration REST_OF_LONG_RUN = Duration.ofMillis(700);
@@ -30,11 +33,15 @@ final class Pricing {
     private final ReadOnlyObjectWrapper<LiftCurves> curves = new ReadOnlyObjectWrapper<>();
     private final ReadOnlyObjectWrapper<Task> pricingTask = new ReadOnlyObjectWrapper<>();
     private final ReadOnlyObjectWrapper<Task> longRun = new ReadOnlyObjectWrapper<>();
-    /** What the last pricing has prepared; only touched by the pricing thread. */
-    private LivePricing prepared;
+    /** What the last pricing has prepared; set by the pricing thread alone. */
+    private volatile LivePricing prepared;
     /** Counts documents opened, so that a price of the one before is not shown. */
     private int opened;
     private boolean faulty;
+    private Treaty newest;
+    /** Whether a treaty waits for its exact price, and since when the hand has seen none. */
+    private boolean unanswered;
+    private long askedAt;
 
     Pricing(Background background, SimulationSettings longRunSettings) {
         this.background = background;
@@ -61,6 +68,7 @@ final class Pricing {
     void forget() {
         opened++;
         background.stop(PRICES);
+        background.stop(FIRST_ANSWER);
         background.stop(CURVES);
         background.stop(LONG_RUN);
         prices.set(null);
@@ -82,6 +90,11 @@ final class Pricing {
         if (prices.get() != null && !prices.get().valid()) {
             prices.set(prices.get().validAgain());
         }
+        newest = treaty;
+        long now = System.nanoTime();
+        boolean late = unanswered && now - askedAt > LONGEST_WAIT.toNanos();
+        askedAt = unanswered ? askedAt : now;
+        unanswered = true;
         background.stop(LONG_RUN);
         boolean curvesDue = newCurves || curves.get() == null || !curves.get().current();
         if (curvesDue) {
@@ -90,12 +103,33 @@ final class Pricing {
             }
             curves(treaty);
         }
-        pricingTask.set(background.follow(PRICES, PATIENCE, control -> live(treaty, control), live -> {
+        pricingTask.set(background.follow(PRICES, PATIENCE, Duration.ZERO, control -> live(treaty, control), live -> {
             if (mine == opened) {
+                askedAt = System.nanoTime();
+                unanswered = newest != treaty;
+                if (!unanswered) {
+                    background.stop(FIRST_ANSWER);
+                }
                 prices.set(new LivePrices(document, treaty, tau, live, !faulty, Optional.empty()));
             }
         }));
+        firstAnswer(document, treaty, tau, late);
         longRun(treaty);
+    }
+
+    /** A rough answer, at once where the one before is late already. */
+    private void firstAnswer(Document document, Treaty treaty, TauState tau, boolean late) {
+        int mine = opened;
+        background.follow(FIRST_ANSWER, PATIENCE, late ? Duration.ZERO : LONGEST_WAIT, control -> roughly(treaty, control), live -> {
+            if (mine == opened && pricingTask.get().active()) {
+                prices.set(new LivePrices(document, treaty, tau, live, !faulty, Optional.empty()));
+            }
+        });
+    }
+
+    private List<LiveLayer> roughly(Treaty treaty, RunControl control) {
+        LivePricing known = prepared;
+        return known == null ? LivePricing.rough(treaty, LivePricing.shortRun(), control) : known.rough(treaty, control);
     }
 
     private List<LiveLayer> live(Treaty treaty, RunControl control) {

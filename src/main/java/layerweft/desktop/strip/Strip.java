@@ -172,7 +172,7 @@ public final class Strip extends Region {
         for (int j = 0; prices != null && j < cells.size(); j++) {
             boolean rough = prices.quote().isEmpty() && prices.live().get(j).simulatedBecause().isPresent();
             if (late) {
-                cells.get(j).refining(0, "computing");
+                cells.get(j).refining(0, error(prices, j) + "computing");
             } else if (rough && prices.valid() && longRun != null && longRun.state().get() == Task.State.WORKING) {
                 cells.get(j).refining(Math.max(0, longRun.progress().get()), refiningWords(prices, j, longRun));
             } else {
@@ -181,11 +181,15 @@ public final class Strip extends Region {
         }
     }
 
-    private static String refiningWords(LivePrices prices, int j, Task longRun) {
+    private static String error(LivePrices prices, int j) {
         String error = FigureShown.percent(prices.layers().get(j).lossOnLine()).error();
+        return error.isEmpty() ? "" : error + ", ";
+    }
+
+    private static String refiningWords(LivePrices prices, int j, Task longRun) {
         double left = longRun.secondsLeft().get();
         String time = Double.isNaN(left) ? "" : String.format(Locale.ROOT, ", %d:%02d left", (int) left / 60, (int) Math.ceil(left) % 60);
-        return error + ", refining" + time;
+        return error(prices, j) + "refining" + time;
     }
 
     private int rows() {

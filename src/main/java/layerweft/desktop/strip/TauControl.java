@@ -48,6 +48,7 @@ public final class TauControl extends VBox {
     private final Button pin = new Button("Pin figures");
     private final MenuButton pinned = new MenuButton();
     private final Label unpinned = new Label("Nothing pinned");
+    private final Tooltip familyHover = new Tooltip();
     private Object gesture;
     private double pressedAt;
     private double pressedTau;
@@ -113,6 +114,9 @@ public final class TauControl extends VBox {
         family.setId("family");
         family.getStyleClass().add("lw-choice");
         family.setAccessibleText("Family of the copula");
+        family.setTooltip(familyHover);
+        family.setOnShowing(opening -> fillFamilies(session.tau().get()));
+        fillFamilies(session.tau().get());
         SVGPath icon = Icons.stroked(Icons.PIN);
         pin.setGraphic(icon);
         pin.setId("pin");
@@ -157,8 +161,7 @@ public final class TauControl extends VBox {
         value.setText(!turns ? "—" : now.kind() == Kind.PAIRS ? TauText.rounded(now.tau()) : TauText.of(now.tau()));
         track.setAccessibleText("Kendall's τ " + value.getText());
         family.setText(now == null ? "" : now.copula());
-        family.setTooltip(new Tooltip(turns ? now.copula() + ": [ and ] step through the families" : "one peril: no copula"));
-        fillFamilies(now);
+        familyHover.setText(turns ? now.copula() + ": [ and ] step through the families" : "one peril: no copula");
     }
 
     private void fillFamilies(TauState now) {

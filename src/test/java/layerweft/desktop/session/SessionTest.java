@@ -159,24 +159,22 @@ class SessionTest {
 
     @Test
     void curvesStayWhileOnlyTauIsTurned() {
+        Session session = Sessions.complete(Sessions.twoPerils(Sessions.gumbel(0.3)));
         LiftCurves curves = session.curves().get();
         session.setTau(0.5, null);
         assertSame(curves, session.curves().get());
-        limit(25, null);
+        session.edit("limit", d -> d.withProgramme(p -> p.set("layers[0].annual.limit", 25)));
         assertNotEquals(curves, session.curves().get());
         assertTrue(session.curves().get().current());
         assertSame(session.treaty().get(), session.curves().get().treaty());
-    }
-
-    @Test
-    void curvesAreNewForAnotherFamily() {
-        LiftCurves curves = session.curves().get();
+        LiftCurves ofGumbel = session.curves().get();
         session.stepFamily(1);
-        assertNotEquals(curves, session.curves().get());
+        assertNotEquals(ofGumbel, session.curves().get(), "another family has other curves");
     }
 
     @Test
     void theLongRunBringsTheWholeTreaty() {
+        Session session = Sessions.complete(Sessions.twoPerils(Sessions.gumbel(0.3)));
         assertNotNull(session.prices().get().whole().orElseThrow());
         assertEquals(1, session.prices().get().quote().orElseThrow().layers().size());
     }

@@ -2,6 +2,7 @@ package layerweft.desktop.session;
 
 import java.util.List;
 import java.util.Map;
+import java.util.Set;
 import layerweft.engine.simulation.SimulationSettings;
 import layerweft.file.FileTree;
 
@@ -27,7 +28,13 @@ final class Sessions {
         return new Document(joined, programme, null, null);
     }
 
+    /** With prices, without curves and the run behind. */
     static Session of(Document document) {
+        return new Session(document, Background.immediateWithout(Set.of(Pricing.FIRST_ANSWER, Pricing.CURVES, Pricing.LONG_RUN)), SHORT);
+    }
+
+    /** With all that a session computes. */
+    static Session complete(Document document) {
         return new Session(document, Background.immediate(), SHORT);
     }
 
