@@ -163,12 +163,12 @@ public final class FamilyTile extends Picture {
         }
         String tail = shape.upperTail() < 0.005 ? "λU 0" : String.format(Locale.ROOT, "λU %.2f", shape.upperTail());
         Text left = at(text(tail, 12, false, c.ink2()), MARGIN, baseline, Anchor.LEFT);
-        Text right = at(text(shape.figure(), 13.5, true, c.ink()), width - MARGIN, baseline, Anchor.RIGHT);
+        Text right = at(text(shape.figure(), 13.5, shape.current(), shape.current() ? c.ink() : c.ink2()), width - MARGIN, baseline, Anchor.RIGHT);
         add(left);
         if (widthOf(left) + widthOf(right) + 8 <= width - 2 * MARGIN) {
             add(right);
         } else {
-            add(at(text(shape.figure(), 12, true, c.ink()), width - MARGIN + 4, baseline, Anchor.RIGHT));
+            add(at(text(shape.figure(), 12, shape.current(), shape.current() ? c.ink() : c.ink2()), width - MARGIN + 4, baseline, Anchor.RIGHT));
         }
     }
 

@@ -44,7 +44,7 @@ class DependencePicturesTest {
     }
 
     private static FamilyShape shape(String reason) {
-        return new FamilyShape(GUMBEL, "Gumbel", GUMBEL.at(0.3), 0.38, "4.62\u2009%", false, reason);
+        return new FamilyShape(GUMBEL, "Gumbel", GUMBEL.at(0.3), 0.38, "4.62\u2009%", true, false, reason);
     }
 
     private void moveTo(FxRobot hand, Node picture, double x, double y) {

@@ -65,14 +65,14 @@ final class PicturePreview {
                 Copula pair = family.at(tau);
                 FamilyTile tile = new FamilyTile(theme, new TileRecorder());
                 tile.setPrefSize(theme.px(153), theme.px(170));
-                tile.show(new FamilyShape(family, family.label(), pair, pair.upperTail(0, 1), "4.62\u2009%", family.label().equals("gumbel"), ""));
+                tile.show(new FamilyShape(family, family.label(), pair, pair.upperTail(0, 1), "4.62\u2009%", true, family.label().equals("gumbel"), ""));
                 pane.getChildren().add(tile);
             }
         }
         CopulaFamily gumbel = CopulaFamily.parse("gumbel");
         FamilyTile tile = new FamilyTile(theme, new TileRecorder());
         tile.setPrefSize(theme.px(153), theme.px(170));
-        tile.show(new FamilyShape(gumbel, "Gumbel", null, 0, "", false, "begins at τ 0"));
+        tile.show(new FamilyShape(gumbel, "Gumbel", null, 0, "", true, false, "begins at τ 0"));
         pane.getChildren().add(tile);
         return pane;
     }
