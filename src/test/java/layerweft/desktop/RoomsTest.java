@@ -12,7 +12,6 @@ import java.util.Set;
 import java.util.concurrent.Callable;
 import java.util.concurrent.TimeUnit;
 import java.util.concurrent.TimeoutException;
-import javafx.geometry.Bounds;
 import javafx.scene.Node;
 import javafx.scene.control.Button;
 import javafx.scene.control.Label;
@@ -130,7 +129,7 @@ class RoomsTest {
     }
 
     @Test
-    void dependenceATileTakesItsFamilyAndTheCornerCounts(FxRobot robot) throws Exception {
+    void dependenceATileTakesItsFamilyAndTheCornerIsCounted(FxRobot robot) throws Exception {
         settled();
         enter(robot, "Dependence");
         until(() -> robot.lookup(n -> String.valueOf(n.getAccessibleText()).startsWith("Joe, upper tail")).tryQuery().isPresent());
@@ -140,13 +139,8 @@ class RoomsTest {
         assertEquals(0.3, session.document().get().portfolio().number("dependence.copula.kendallTau"), 1e-9);
         JointYearsPicture years = robot.lookup(n -> n instanceof JointYearsPicture).queryAs(JointYearsPicture.class);
         String before = years.getAccessibleText();
-        assertTrue(before.startsWith("years at least as bad as 1 in 10 for both"), before);
-        Bounds at = robot.bounds(years).query();
-        Node corner = robot.lookup(n -> String.valueOf(n.getAccessibleText()).startsWith("years at least as bad")).query();
-        robot.interact(corner::requestFocus);
-        robot.type(KeyCode.UP).type(KeyCode.UP);
-        WaitForAsyncUtils.waitForFxEvents();
-        assertTrue(at.getWidth() > 200 && !years.getAccessibleText().equals(before), years.getAccessibleText());
+        assertTrue(before.startsWith("years at least as bad as 1 in 10"), before);
+        assertTrue(before.endsWith(" of 4000"), before);
     }
 
     @Test
