@@ -143,7 +143,12 @@ public final class FigureTable extends GridPane {
 
     /** A node in front of a row's name, e.g. a line in the colour of a family. */
     public void mark(int row, Node node) {
-        cells[row + 1][0].setGraphic(node);
+        mark(row, 0, node);
+    }
+
+    /** A node in a cell, in front of its text, e.g. a bar. */
+    public void mark(int row, int column, Node node) {
+        cells[row + 1][column].setGraphic(node);
     }
 
     /** What is shown, as text. */

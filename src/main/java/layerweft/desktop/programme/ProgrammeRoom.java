@@ -1,17 +1,16 @@
 package layerweft.desktop.programme;
 
 import java.time.Duration;
-import java.util.ArrayList;
 import java.util.List;
 import java.util.SortedMap;
-import java.util.function.UnaryOperator;
-import java.util.stream.IntStream;
-import javafx.beans.binding.Bindings;
+import java.util.TreeMap;
 import javafx.beans.property.ReadOnlyObjectWrapper;
 import javafx.beans.value.ObservableValue;
 import javafx.scene.Node;
 import javafx.scene.control.Button;
 import javafx.scene.control.ScrollPane;
+import javafx.scene.input.KeyCode;
+import javafx.scene.input.KeyEvent;
 import javafx.scene.layout.HBox;
 import javafx.scene.layout.Priority;
 import javafx.scene.layout.VBox;
@@ -20,22 +19,15 @@ import layerweft.desktop.Room;
 import layerweft.desktop.RoomTools;
 import layerweft.desktop.control.Panel;
 import layerweft.desktop.control.SegmentedSwitch;
-import layerweft.desktop.picture.Tower;
-import layerweft.desktop.picture.TowerActions;
-import layerweft.desktop.picture.TowerChange;
 import layerweft.desktop.picture.TowerPicture;
 import layerweft.desktop.session.FigureShown;
 import layerweft.desktop.session.LayerEdit;
 import layerweft.desktop.session.LivePrices;
 import layerweft.desktop.session.Session;
-import layerweft.engine.simulation.PerilShares;
+import layerweft.engine.RunControl;
 import layerweft.engine.simulation.SimulationSettings;
 import layerweft.figures.Figure;
-import layerweft.figures.FigureText;
 import layerweft.file.FileTree;
-import layerweft.model.portfolio.Peril;
-import layerweft.model.treaty.Layer;
-import layerweft.model.treaty.LayerTerms;
 import layerweft.model.treaty.Treaty;
 import layerweft.study.Drivers;
 import layerweft.study.ExceedanceCurves;
@@ -45,43 +37,40 @@ import layerweft.study.LimitUse;
 public final class ProgrammeRoom implements Room {
     private static final SimulationSettings YEARS = new SimulationSettings(100_000, SimulationSettings.usual().seed(), SimulationSettings.usual().threads());
     private static final Duration REST = Duration.ofMillis(200);
+    private static final Duration PATIENCE = Duration.ofMillis(1_000);
+    private static final String USES = "Use of each limit";
+    private static final String BEHIND = "Largest events and drivers";
+    private static final String[] NUMBERS = {"No", "One", "Two", "Three", "Four", "Five", "Six", "Seven", "Eight", "Nine", "Ten", "Eleven", "Twelve"};
 
     private final Session session;
     private final TowerPicture tower;
     private final SegmentedSwitch<Boolean> scale = new SegmentedSwitch<>(List.of(false, true), log -> log ? "Log" : "Linear");
     private final SegmentedSwitch<Boolean> forms = new SegmentedSwitch<>(List.of(false, true), p -> p ? "Pricing and buyer" : "Layer");
     private final VBox formBox = new VBox();
+    private final Button copy = button("Copy layer");
+    private final Button delete = button("Delete layer");
     private final HBox view;
     private final ReadOnlyObjectWrapper<Reading> reading = new ReadOnlyObjectWrapper<>(Reading.EMPTY);
     private LayerForm form;
     private String formShape = "";
-    private List<Tower.Mark> haze = List.of();
-    private Treaty hazeOf;
+    private SortedMap<Double, Double> largest = new TreeMap<>();
     private Drivers drivers;
     private List<LimitUse> uses = List.of();
     private Treaty usesOf;
+    private Treaty behindOf;
     private boolean shown;
-    private Object gesture = new Object();
-    private boolean moving;
 
     public ProgrammeRoom(RoomTools tools) {
         this.session = tools.session();
-        tower = new TowerPicture(tools.theme(), new Hand());
-        Button add = new Button("New layer");
-        add.setOnAction(asked -> session.edit("a new layer",
-                d -> d.withProgramme(t -> LayerEdit.addedAbove(t, Math.min(session.selectedLayer().get(), LayerEdit.count(t) - 1)))));
-        Button copy = new Button("Copy layer");
+        tower = new TowerPicture(tools.theme(), new TowerEdits(session));
+        tower.logarithmic().bind(scale.value());
+        Button add = button("New layer");
+        add.setOnAction(asked -> addLayer());
         copy.setOnAction(asked -> session.edit("copy of a layer", d -> d.withProgramme(t -> LayerEdit.duplicated(t, session.selectedLayer().get()))));
-        Button delete = new Button("Delete layer");
-        delete.setOnAction(asked -> {
-            if (LayerEdit.count(session.document().get().programme()) > 1) {
-                session.edit("deletion of a layer", d -> d.withProgramme(t -> LayerEdit.removed(t, session.selectedLayer().get())));
-            }
-        });
-        for (Button button : List.of(add, copy, delete)) {
-            button.getStyleClass().add("lw-small-button");
-        }
-        Panel towerPanel = new Panel("Height: what one event costs. Width: how many full limits the year can use.", tower).withControls(add, copy, delete, scale);
+        delete.setOnAction(asked -> deleteLayer());
+        Panel towerPanel = new Panel("", tower).withControls(add, copy, delete, scale);
+        towerPanel.note().set("Height: what one event costs. Width: how many full limits the year can use.");
+        towerPanel.addEventHandler(KeyEvent.KEY_PRESSED, this::key);
         HBox.setHgrow(towerPanel, Priority.ALWAYS);
         ScrollPane scroll = new ScrollPane(formBox);
         scroll.setFitToWidth(true);
@@ -95,15 +84,47 @@ public final class ProgrammeRoom implements Room {
         formPanel.setMaxWidth(392);
         view = new HBox(towerPanel, formPanel);
         view.getStyleClass().add("lw-row");
-        tower.logarithmic().bind(Bindings.createBooleanBinding(() -> scale.value().get(), scale.value()));
         forms.value().addListener((is, was, now) -> buildForm());
         session.prices().addListener((is, was, now) -> changed());
-        session.document().addListener((is, was, now) -> buildForm());
+        session.document().addListener((is, was, now) -> {
+            buildForm();
+            draw();
+        });
         session.selectedLayer().addListener((is, was, now) -> {
             buildForm();
             draw();
         });
         buildForm();
+    }
+
+    private static Button button(String words) {
+        Button button = new Button(words);
+        button.getStyleClass().add("lw-small-button");
+        return button;
+    }
+
+    private void addLayer() {
+        session.edit("a new layer", d -> d.withProgramme(t -> {
+            int count = LayerEdit.count(t);
+            return count == 0 ? LayerEdit.added(t, 0, 20, 30) : LayerEdit.addedAbove(t, Math.min(session.selectedLayer().get(), count - 1));
+        }));
+    }
+
+    private void deleteLayer() {
+        int place = session.selectedLayer().get();
+        if (place < LayerEdit.count(session.document().get().programme())) {
+            session.edit("deletion of a layer", d -> d.withProgramme(t -> LayerEdit.removed(t, place)));
+        }
+    }
+
+    private void key(KeyEvent event) {
+        if (event.getCode() == KeyCode.DELETE) {
+            deleteLayer();
+            event.consume();
+        } else if (event.getCode() == KeyCode.ADD || "+".equals(event.getText())) {
+            addLayer();
+            event.consume();
+        }
     }
 
     @Override
@@ -115,18 +136,28 @@ public final class ProgrammeRoom implements Room {
     @Override
     public void left() {
         shown = false;
+        session.background().stop(USES);
+        session.background().stop(BEHIND);
+    }
+
+    private int chosen(int layers) {
+        return Math.max(0, Math.min(layers - 1, session.selectedLayer().get()));
     }
 
     private void buildForm() {
         FileTree tree = session.document().get().programme();
-        int place = Math.max(0, Math.min(LayerEdit.count(tree) - 1, session.selectedLayer().get()));
+        int count = LayerEdit.count(tree);
+        copy.setDisable(count == 0);
+        delete.setDisable(count == 0);
+        int place = chosen(count);
+        boolean pricing = forms.value().get() || count == 0;
         String at = "layers[" + place + "]";
-        String shape = forms.value().get() ? "pricing" : place + " " + LayerEdit.count(tree) + " " + tree.has(at + ".occurrence.franchise");
+        String shape = pricing ? "pricing" : place + " " + count + " " + tree.has(at + ".occurrence.franchise");
         if (shape.equals(formShape)) {
             return;
         }
         formShape = shape;
-        form = forms.value().get() ? null : new LayerForm(session, place);
+        form = pricing ? null : new LayerForm(session, place);
         formBox.getChildren().setAll(form == null ? new PricingForm(session) : form);
         if (form != null && session.prices().get() != null) {
             form.show(session.prices().get());
@@ -144,35 +175,31 @@ public final class ProgrammeRoom implements Room {
         }
         Treaty treaty = prices.treaty();
         if (shown && usesOf != treaty) {
-            session.background().runAfter(Duration.ZERO, "Use of each limit", control -> LimitUse.of(treaty, YEARS, control), found -> {
+            session.background().follow(USES, PATIENCE, Duration.ZERO, control -> LimitUse.of(treaty, YEARS, control), found -> {
                 uses = found;
                 usesOf = treaty;
                 draw();
             });
         }
-        if (shown && hazeOf != treaty && !moving) {
-            session.background().runAfter(REST, "Largest events and drivers", control -> {
-                List<Tower.Mark> largest = new ArrayList<>();
-                ExceedanceCurves.of(treaty, YEARS, control).gross().largestEvent().forEach((years, amount) -> addRising(largest, new Tower.Mark(amount.value(), years)));
-                return new Behind(largest, Drivers.of(treaty, YEARS, control));
-            }, found -> {
-                haze = found.largest;
-                drivers = found.drivers;
-                hazeOf = treaty;
+        if (shown && behindOf != treaty) {
+            session.background().runAfter(REST, BEHIND, control -> Behind.of(treaty, control), found -> {
+                largest = found.largest();
+                drivers = found.drivers();
+                behindOf = treaty;
                 draw();
-                read();
             });
         }
         draw();
         read();
     }
 
-    private record Behind(List<Tower.Mark> largest, Drivers drivers) {}
+    /** What the tower shows beside prices and takes a simulation. */
+    private record Behind(SortedMap<Double, Double> largest, Drivers drivers) {
 
-    /** Amounts have to rise: of several return periods with one amount the first stands. */
-    private static void addRising(List<Tower.Mark> marks, Tower.Mark next) {
-        if (next.amount() > 0 && Double.isFinite(next.amount()) && (marks.isEmpty() || next.amount() > marks.get(marks.size() - 1).amount())) {
-            marks.add(next);
+        static Behind of(Treaty treaty, RunControl control) {
+            SortedMap<Double, Double> largest = new TreeMap<>();
+            ExceedanceCurves.of(treaty, YEARS, control).gross().largestEvent().forEach((years, amount) -> largest.put(years, amount.value()));
+            return new Behind(largest, Drivers.of(treaty, YEARS, control));
         }
     }
 
@@ -181,111 +208,28 @@ public final class ProgrammeRoom implements Room {
         double taken = prices.layers().stream().mapToDouble(l -> l.expectedLoss().value()).sum();
         double all = prices.treaty().portfolio().expectedLoss();
         int n = prices.layers().size();
-        Reading words = Reading.of(n == 1 ? "One layer takes " : n + " layers take ").strong(FigureShown.of(new Figure(taken, taken * 1e-3), "").value()).plain(" of the ")
-                .strong(FigureShown.of(Double.isInfinite(all) ? Figure.INFINITE : Figure.exact(all), "").value()).plain(" expected in a year");
+        String count = n < NUMBERS.length ? NUMBERS[n] : String.valueOf(n);
+        Reading words = Reading.of(count + (n == 1 ? " layer takes " : " layers take ")).strong(three(taken)).plain(" of the ").strong(three(all)).plain(" expected in a year");
         reading.set(prices.whole().map(whole -> words.plain("; the retained 1-in-100 year falls from ").strong(at100(whole.gross().valueAtRisk())).plain(" to ")
                 .strong(at100(whole.net().valueAtRisk())).plain(".")).orElse(words.plain(".")));
     }
 
+    /** To three significant digits. */
+    private static String three(double value) {
+        return FigureShown.of(Double.isInfinite(value) ? Figure.INFINITE : new Figure(value, Math.abs(value) * 1e-3), "").value();
+    }
+
     private static String at100(SortedMap<Double, Figure> byLevel) {
         Figure at = byLevel.get(0.99);
-        return at == null ? "—" : FigureShown.of(at, "").value();
+        return at == null ? "—" : three(at.value());
     }
 
     private void draw() {
         LivePrices prices = session.prices().get();
-        if (prices == null) {
-            return;
-        }
-        Treaty treaty = prices.treaty();
-        List<Tower.Layer> layers = IntStream.range(0, treaty.layers()).mapToObj(j -> layer(treaty, j, prices)).toList();
-        tower.show(new Tower(treaty.portfolio().perils().stream().map(Peril::name).toList(), layers, haze),
-                Math.max(0, Math.min(treaty.layers() - 1, session.selectedLayer().get())));
-    }
-
-    private Tower.Layer layer(Treaty treaty, int j, LivePrices prices) {
-        Layer layer = treaty.layer(j);
-        LayerTerms terms = layer.terms();
-        boolean ofYear = Double.isInfinite(terms.occurrenceLimit());
-        List<Double> use = usesOf == treaty ? uses.get(j).uses().stream().map(Figure::value).toList() : List.of();
-        List<Double> shares = new ArrayList<>();
-        PerilShares known = drivers != null && j < drivers.layers().size() && drivers.treaty().layer(j).name().equals(layer.name())
-                && drivers.treaty().portfolio().perils().size() == treaty.portfolio().perils().size() ? drivers.layers().get(j) : null;
-        for (int i = 0; i < treaty.portfolio().perils().size(); i++) {
-            boolean covered = treaty.cover(j).covers(i);
-            double share = covered && known != null ? known.expectedShare().get(i).value() : 0;
-            shares.add(covered ? Double.isNaN(share) ? 0 : share : Double.NaN);
-        }
-        double start = ofYear ? terms.deductible() : terms.hasFranchise() ? 0 : terms.retention();
-        double limit = ofYear ? terms.annualLimit() : terms.occurrenceLimit();
-        int reinstatements = layer.reinstatements() != null && layer.annual().limit() == Double.POSITIVE_INFINITY ? layer.reinstatements().size()
-                : terms.annualLimit() == Double.POSITIVE_INFINITY ? Tower.UNLIMITED : Tower.BY_ANNUAL_LIMIT;
-        double lossOnLine = prices.layers().get(j).lossOnLine().value();
-        return new Tower.Layer(layer.name(), words(layer, terms), ofYear, start, limit, terms.hasFranchise() ? terms.franchise() : Double.NaN,
-                ofYear ? 0 : terms.deductible() / limit, ofYear ? 1 : terms.annualLimit() / limit, reinstatements, use, shares,
-                Double.isFinite(lossOnLine) ? lossOnLine : Double.NaN, layer.inuring().stream().map(n -> treaty.programme().indexOf(n)).toList());
-    }
-
-    /** The terms as one says them: 60 xs 40, 2 at 100 %. */
-    private static String words(Layer layer, LayerTerms terms) {
-        StringBuilder words = new StringBuilder();
-        if (terms.occurrenceLimit() < Double.POSITIVE_INFINITY) {
-            words.append(FigureText.groupedPlain(terms.occurrenceLimit())).append(terms.hasFranchise() ? " from " + FigureText.groupedPlain(terms.franchise()) + " on"
-                    : " xs " + FigureText.groupedPlain(terms.retention()));
-            if (layer.reinstatements() != null) {
-                words.append(layer.reinstatements().isEmpty() ? ", none" : ", " + layer.reinstatements().size() + " at " + FigureText.plainPercent(layer.reinstatements().get(0)));
-            }
-            if (layer.annual().deductible() > 0 || layer.annual().limit() < Double.POSITIVE_INFINITY) {
-                words.append(", year ").append(layer.annual().limit() < Double.POSITIVE_INFINITY ? FigureText.groupedPlain(layer.annual().limit()) : "no limit")
-                        .append(" xs ").append(FigureText.groupedPlain(layer.annual().deductible()));
-            }
-        } else {
-            words.append(terms.annualLimit() < Double.POSITIVE_INFINITY ? FigureText.groupedPlain(terms.annualLimit()) : "no limit").append(" xs ")
-                    .append(FigureText.groupedPlain(terms.deductible()));
-        }
-        return words.toString();
-    }
-
-    /** What a hand does to the tower, written into the programme: one movement is one step of undo. */
-    private final class Hand implements TowerActions {
-
-        @Override
-        public void select(int layer) {
-            session.selectedLayer().set(layer);
-        }
-
-        @Override
-        public void terms(List<TowerChange> changes, Phase phase) {
-            edit(phase, "drag of a layer", tree -> {
-                FileTree changed = tree;
-                for (TowerChange c : changes) {
-                    changed = LayerTermsEdit.moved(changed, c.layer(), c.retention(), c.limit());
-                }
-                return changed;
-            });
-        }
-
-        @Override
-        public void reinstatements(int layer, int number, Phase phase) {
-            edit(phase, "change of reinstatements", tree -> LayerTermsEdit.reinstated(tree, layer, number));
-        }
-
-        @Override
-        public void drawn(double retention, double limit) {
-            session.edit("a new layer", d -> d.withProgramme(t -> LayerEdit.added(t, 0, retention, limit)));
-        }
-
-        private void edit(Phase phase, String what, UnaryOperator<FileTree> change) {
-            moving = phase == Phase.MOVING;
-            if (phase == Phase.GIVEN_UP) {
-                session.giveUp(gesture);
-            } else {
-                session.edit(what, gesture, d -> d.withProgramme(change));
-            }
-            if (!moving) {
-                gesture = new Object();
-                changed();
-            }
+        if (LayerEdit.count(session.document().get().programme()) == 0) {
+            tower.show(TowerOf.empty(session.treaty().get(), largest), -1);
+        } else if (prices != null) {
+            tower.show(TowerOf.treaty(prices, uses, drivers, largest), chosen(prices.treaty().layers()));
         }
     }
 

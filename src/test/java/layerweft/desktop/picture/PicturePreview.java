@@ -14,8 +14,11 @@ import javafx.scene.Scene;
 import javafx.scene.image.WritableImage;
 import javafx.scene.layout.Region;
 import javafx.scene.layout.StackPane;
+import javafx.scene.layout.TilePane;
 import javax.imageio.ImageIO;
 import layerweft.desktop.theme.Theme;
+import layerweft.model.copula.Copula;
+import layerweft.model.copula.CopulaFamily;
 
 /** Draws every picture in memory, light and dark, into the folder given. Needs no display. */
 final class PicturePreview {
@@ -49,6 +52,37 @@ final class PicturePreview {
         draw(folder, "tower-one-peril", dark, 884, 600, 100, theme -> tower(theme, TowerExamples.perils(1), 0, false));
         draw(folder, "tower-empty", dark, 884, 600, 100, theme -> tower(theme, TowerExamples.empty(), -1, false));
         draw(folder, "tower-large-text", dark, 884, 600, 130, theme -> tower(theme, TowerExamples.five(), 2, false));
+        draw(folder, "tiles", dark, 660, 1000, 100, PicturePreview::tiles);
+        draw(folder, "years", dark, 330, 330, 100, theme -> years(theme, "gumbel", false, 10));
+        draw(folder, "years-ranks", dark, 330, 330, 100, theme -> years(theme, "clayton", true, 5));
+    }
+
+    private static Region tiles(Theme theme) {
+        TilePane pane = new TilePane(10, 10);
+        pane.setPrefColumns(4);
+        for (double tau : new double[] {0.3, 0.8}) {
+            for (CopulaFamily family : CopulaFamily.withStrength()) {
+                Copula pair = family.at(tau);
+                FamilyTile tile = new FamilyTile(theme, new TileRecorder());
+                tile.setPrefSize(theme.px(153), theme.px(170));
+                tile.show(new FamilyShape(family, family.label(), pair, pair.upperTail(0, 1), "4.62\u2009%", true, family.label().equals("gumbel"), ""));
+                pane.getChildren().add(tile);
+            }
+        }
+        CopulaFamily gumbel = CopulaFamily.parse("gumbel");
+        FamilyTile tile = new FamilyTile(theme, new TileRecorder());
+        tile.setPrefSize(theme.px(153), theme.px(170));
+        tile.show(new FamilyShape(gumbel, "Gumbel", null, 0, "", true, false, "begins at τ 0"));
+        pane.getChildren().add(tile);
+        return pane;
+    }
+
+    private static Region years(Theme theme, String family, boolean ranks, double corner) {
+        JointYearsPicture picture = new JointYearsPicture(theme);
+        picture.ranks().set(ranks);
+        picture.show(JointYears.drawn("Windstorm", "River flood", CopulaFamily.parse(family).at(0.3), 20_000, 1));
+        picture.corner().set(corner);
+        return picture;
     }
 
     private static Region tower(Theme theme, Tower tower, int selected, boolean log) {
