@@ -70,7 +70,13 @@ public final class DependenceRoom implements Room {
         words.getStyleClass().add("lw-column");
         one = new Panel(words);
         one.setVisible(false);
-        view.getChildren().addAll(all, one);
+        // where the window is low the room scrolls; otherwise it fills its area
+        ScrollPane scroll = new ScrollPane(all);
+        scroll.setFitToWidth(true);
+        scroll.setFitToHeight(true);
+        scroll.getStyleClass().add("lw-scroll");
+        scroll.visibleProperty().bind(all.visibleProperty());
+        view.getChildren().addAll(scroll, one);
         years.onChoice(this::show);
         session.prices().addListener((is, was, now) -> changed());
         session.document().addListener((is, was, now) -> show());
